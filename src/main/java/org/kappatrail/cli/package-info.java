@@ -1,0 +1,5 @@
+/** The commands. */
+@NullMarked
+package org.kappatrail.cli;
+
+import org.jspecify.annotations.NullMarked;
