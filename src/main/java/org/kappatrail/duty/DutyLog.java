@@ -1,0 +1,25 @@
+package org.kappatrail.duty;
+
+import java.util.List;
+import java.util.function.Consumer;
+import org.kappatrail.history.FileAccount;
+import org.kappatrail.history.Problem;
+
+/** The temperature and speed logs of a site, read bearing by bearing. */
+public interface DutyLog extends AutoCloseable {
+
+  /**
+   * Hands over every registered bearing that has readings, in the order of {@link
+   * org.kappatrail.history.BearingKey}; only one bearing's cells are held at a time.
+   */
+  void forEachBearing(Consumer<BearingDuty> use);
+
+  /** What became of every file; complete after {@link #forEachBearing}. */
+  List<FileAccount> accounts();
+
+  /** Rows that could not be used; complete after {@link #forEachBearing}. */
+  List<Problem> problems();
+
+  @Override
+  void close();
+}
