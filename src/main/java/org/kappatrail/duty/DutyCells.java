@@ -3,9 +3,9 @@ package org.kappatrail.duty;
 import java.util.Arrays;
 
 /**
- * What one bearing did, as columns of primitives: a row per calendar day and cell of temperature and
- * speed while running, and a row per day of standstill. Rows are in order of day, running first,
- * then temperature and speed cell.
+ * What one bearing did, as columns of primitives: a row per calendar day and cell of temperature
+ * and speed while running, and a row per day of standstill. Rows are in order of day, running
+ * first, then temperature and speed cell.
  */
 public final class DutyCells {
   private final int[] epochDays;

@@ -63,8 +63,7 @@ public record Bearing(
       return givenFatigueLimitKn;
     }
     return OptionalDouble.of(
-        Iso281FatigueLimit.fatigueLoadLimitKn(
-            type.get(), staticRatingKn.getAsDouble(), pitchMm));
+        Iso281FatigueLimit.fatigueLoadLimitKn(type.get(), staticRatingKn.getAsDouble(), pitchMm));
   }
 
   /** True where the register gives all that a rating life needs: family, C, P and Cu or C0. */

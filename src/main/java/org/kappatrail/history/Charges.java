@@ -8,9 +8,9 @@ import java.util.OptionalDouble;
 import org.jspecify.annotations.Nullable;
 
 /**
- * Splits an asset's history into oil charges: at every recorded oil change, and where oil hours fall
- * back without one (tool convention). A sample of the very day of a change is the old oil's, drawn
- * at the drain, unless its oil hours have fallen back.
+ * Splits an asset's history into oil charges: at every recorded oil change, and where oil hours
+ * fall back without one (tool convention). A sample of the very day of a change is the old oil's,
+ * drawn at the drain, unless its oil hours have fallen back.
  */
 public final class Charges {
   private Charges() {}
@@ -33,7 +33,8 @@ public final class Charges {
     int nextChange = 0;
     @Nullable Sample previous = null;
     for (Sample sample : inTime) {
-      while (nextChange < changes.size() && startsBefore(changes.get(nextChange), sample, previous)) {
+      while (nextChange < changes.size()
+          && startsBefore(changes.get(nextChange), sample, previous)) {
         drafts.add(Draft.recorded(asset, changes.get(nextChange++), drafts));
         previous = null;
       }
@@ -70,8 +71,7 @@ public final class Charges {
     List<Charge> charges = new ArrayList<>();
     for (int i = 0; i < drafts.size(); i++) {
       Draft draft = drafts.get(i);
-      Optional<LocalDate> end =
-          i + 1 < drafts.size() ? drafts.get(i + 1).start : Optional.empty();
+      Optional<LocalDate> end = i + 1 < drafts.size() ? drafts.get(i + 1).start : Optional.empty();
       charges.add(
           new Charge(asset.id(), i + 1, draft.oil, draft.origin, draft.start, end, draft.samples));
     }

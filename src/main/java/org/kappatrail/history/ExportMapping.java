@@ -2,7 +2,6 @@ package org.kappatrail.history;
 
 import java.util.Collections;
 import java.util.LinkedHashMap;
-import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 

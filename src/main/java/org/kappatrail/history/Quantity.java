@@ -3,7 +3,9 @@ package org.kappatrail.history;
 import java.util.Locale;
 import java.util.OptionalDouble;
 
-/** Range checks of the register's numbers: each message carries the name, the value and the limit. */
+/**
+ * Range checks of the register's numbers: each message carries the name, the value and the limit.
+ */
 final class Quantity {
   private Quantity() {}
 

@@ -2,7 +2,9 @@ package org.kappatrail.history;
 
 import java.util.List;
 
-/** Names of the sample columns that the program itself knows; every other numeric column is kept. */
+/**
+ * Names of the sample columns that the program itself knows; every other numeric column is kept.
+ */
 public final class SampleColumns {
   public static final String SAMPLE = "sample";
   public static final String ASSET = "asset";

@@ -78,7 +78,8 @@ public record Settings(
    * How acts are weighed.
    *
    * @param horizonDays days over which a failure counts
-   * @param failureCostRatio how many times its price an act may need a failure to cost, and still pay
+   * @param failureCostRatio how many times its price an act may need a failure to cost, and still
+   *     pay
    */
   public record Decision(int horizonDays, double failureCostRatio) {
     static final Decision DEFAULT = new Decision(365, 60);

@@ -43,14 +43,15 @@ public record AssetReview(
 
   /** The bearing with the least κ over its floor at its latest sample; empty where none has a κ. */
   public Optional<BearingReview> governing() {
-    return bearings.stream()
-        .filter(review -> review.latestFilm().isPresent())
-        .min(WORST_FIRST);
+    return bearings.stream().filter(review -> review.latestFilm().isPresent()).min(WORST_FIRST);
   }
 
   /** Level of the governing bearing; empty where no κ is known. */
   public Optional<Level> level() {
-    return governing().flatMap(BearingReview::latestFilm).flatMap(KappaPoint::film).map(Film::level);
+    return governing()
+        .flatMap(BearingReview::latestFilm)
+        .flatMap(KappaPoint::film)
+        .map(Film::level);
   }
 
   private static double filmOverFloor(BearingReview review) {
