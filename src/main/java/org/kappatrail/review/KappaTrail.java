@@ -1,9 +1,7 @@
 package org.kappatrail.review;
 
 import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.ToDoubleFunction;
@@ -46,30 +44,24 @@ final class KappaTrail {
     this.duty = duty;
   }
 
+  private record Drawn(Sample sample, Charge charge, OperatingPoint point) {}
+
   BearingReview review() {
-    Map<Sample, OperatingPoint> operating = new LinkedHashMap<>();
-    charges.forEach(
-        charge -> charge.samples().forEach(sample -> operating.put(sample, points.of(sample))));
-    Optional<Reference> reference = reference(List.copyOf(operating.values()));
+    List<Drawn> drawn = new ArrayList<>();
+    for (Charge charge : charges) {
+      charge.samples().forEach(sample -> drawn.add(new Drawn(sample, charge, points.of(sample))));
+    }
+    Optional<Reference> reference = reference(drawn.stream().map(Drawn::point).toList());
     List<DayKappa> days = DailyKappa.of(bearing, duty.cells(), oil);
     HoursBetween hours = new HoursBetween(days, duty.cells().size() > 0);
-    List<KappaPoint> trail = new ArrayList<>();
-    for (Charge charge : charges) {
-      Oil fresh = history.getOil(charge.oil());
-      for (Sample sample : charge.samples()) {
-        trail.add(point(sample, charge, fresh, operating.get(sample), reference, hours));
-      }
-    }
+    List<KappaPoint> trail = drawn.stream().map(item -> point(item, reference, hours)).toList();
     return new BearingReview(bearing, films.floor(), reference, trail, days, duty.dropped());
   }
 
-  private KappaPoint point(
-      Sample sample,
-      Charge charge,
-      Oil fresh,
-      OperatingPoint point,
-      Optional<Reference> reference,
-      HoursBetween hours) {
+  private KappaPoint point(Drawn drawn, Optional<Reference> reference, HoursBetween hours) {
+    Sample sample = drawn.sample();
+    OperatingPoint point = drawn.point();
+    Oil fresh = history.getOil(drawn.charge().oil());
     var viscosity = oil.ofSample(sample);
     Optional<Film> film = viscosity.flatMap(known -> films.film(known, point));
     OptionalDouble kappa =
@@ -81,7 +73,7 @@ final class KappaTrail {
     HoursBetween.Hours since = hours.upTo(sample.day());
     return new KappaPoint(
         sample,
-        charge,
+        drawn.charge(),
         viscosity,
         point,
         film,
