@@ -20,6 +20,11 @@ public interface DutyLog extends AutoCloseable {
   /** Rows that could not be used; complete after {@link #forEachBearing}. */
   List<Problem> problems();
 
+  /** Why readings were left out, file by file; complete after {@link #forEachBearing}. */
+  default List<ReadingFates> fates() {
+    return List.of();
+  }
+
   @Override
   void close();
 }

@@ -1,0 +1,137 @@
+package org.kappatrail.duty;
+
+import java.sql.ResultSet;
+import java.sql.SQLException;
+import java.util.List;
+import java.util.function.Consumer;
+import org.kappatrail.history.Bearing;
+
+/** Turns the rows of the statement into cells, one bearing after the other. */
+final class CellReader {
+  private static final long DAY_MS = 86_400_000;
+
+  private final List<Bearing> bearings;
+  private final Tally tally;
+  private final Consumer<BearingDuty> use;
+
+  private int bearing;
+  private boolean open;
+  private DutyCells.Builder cells = new DutyCells.Builder();
+  private long[] dropped = new long[ReadingState.values().length];
+
+  private boolean cellOpen;
+  private long dayMs;
+  private int state;
+  private long temperatureCell;
+  private long speedCell;
+  private long readings;
+  private long ms;
+  private long temperatureMs;
+  private long lowest;
+  private long highest;
+  private long speedMs;
+
+  CellReader(List<Bearing> bearings, Tally tally, Consumer<BearingDuty> use) {
+    this.bearings = bearings;
+    this.tally = tally;
+    this.use = use;
+  }
+
+  void read(ResultSet rows) throws SQLException {
+    while (rows.next()) {
+      int key = rows.getInt(1);
+      if (!open || key != bearing) {
+        finishBearing();
+        bearing = key;
+        open = true;
+      }
+      add(rows);
+    }
+    finishBearing();
+  }
+
+  private void add(ResultSet rows) throws SQLException {
+    int rowState = rows.getInt(3);
+    ReadingState kind = ReadingState.of(rowState);
+    long rowDay = rows.getLong(2);
+    long rowReadings = rows.getLong(7);
+    tally.add(rows.getInt(6), kind, rowDay / DAY_MS, rowReadings, rows.getLong(13));
+    if (!kind.isUsed()) {
+      dropped[rowState] += rowReadings;
+      return;
+    }
+    boolean same =
+        cellOpen
+            && rowDay == dayMs
+            && rowState == state
+            && rows.getLong(4) == temperatureCell
+            && rows.getLong(5) == speedCell;
+    if (!same) {
+      finishCell();
+      cellOpen = true;
+      dayMs = rowDay;
+      state = rowState;
+      temperatureCell = rows.getLong(4);
+      speedCell = rows.getLong(5);
+      lowest = Long.MAX_VALUE;
+      highest = Long.MIN_VALUE;
+    }
+    readings += rowReadings;
+    ms += rows.getLong(8);
+    temperatureMs += rows.getLong(9);
+    lowest = Math.min(lowest, rows.getLong(10));
+    highest = Math.max(highest, rows.getLong(11));
+    speedMs += rows.getLong(12);
+  }
+
+  private void finishCell() {
+    if (!cellOpen) {
+      return;
+    }
+    Bearing register = bearings.get(bearing - 1);
+    boolean stopped = state == ReadingState.STOPPED.code();
+    boolean speedLogged = stopped || speedCell >= 0;
+    cells.add(
+        Math.toIntExact(dayMs / DAY_MS),
+        !stopped,
+        ms,
+        readings,
+        temperatureMs / 1000.0 / ms,
+        lowest / 1000.0,
+        highest / 1000.0,
+        speedLogged,
+        speedLogged ? speedMs / 1000.0 / ms : register.speedRpm());
+    cellOpen = false;
+    readings = 0;
+    ms = 0;
+    temperatureMs = 0;
+    speedMs = 0;
+  }
+
+  private void finishBearing() {
+    finishCell();
+    if (open && bearing > 0) {
+      BearingDuty duty =
+          new BearingDuty(bearings.get(bearing - 1).key(), cells.build(), droppedReadings());
+      if (duty.cells().size() > 0 || duty.dropped().total() > 0) {
+        use.accept(duty);
+      }
+    }
+    cells = new DutyCells.Builder();
+    dropped = new long[ReadingState.values().length];
+  }
+
+  private DroppedReadings droppedReadings() {
+    return new DroppedReadings(
+        count(ReadingState.NO_TEMPERATURE)
+            + count(ReadingState.STATUS_TEXT)
+            + count(ReadingState.TEMPERATURE_UNREADABLE),
+        count(ReadingState.BAD_QUALITY) + count(ReadingState.UNKNOWN_QUALITY),
+        count(ReadingState.IMPLAUSIBLE),
+        count(ReadingState.NEGATIVE_SPEED));
+  }
+
+  private long count(ReadingState reason) {
+    return dropped[reason.code()];
+  }
+}

@@ -1,0 +1,31 @@
+package org.kappatrail.duty;
+
+import java.util.Collections;
+import java.util.EnumMap;
+import java.util.Map;
+
+/**
+ * Why the readings of a file were used or left out.
+ *
+ * @param file path within the history folder, or the table of a database
+ * @param counts readings by what became of them; none where a state is absent
+ */
+public record ReadingFates(String file, Map<ReadingState, Long> counts) {
+  public ReadingFates {
+    EnumMap<ReadingState, Long> copy = new EnumMap<>(ReadingState.class);
+    copy.putAll(counts);
+    counts = Collections.unmodifiableMap(copy);
+  }
+
+  public long count(ReadingState state) {
+    return counts.getOrDefault(state, 0L);
+  }
+
+  public long total() {
+    return counts.values().stream().mapToLong(Long::longValue).sum();
+  }
+
+  public long used() {
+    return count(ReadingState.RUNNING) + count(ReadingState.STOPPED);
+  }
+}
