@@ -7,6 +7,7 @@ import org.kappatrail.review.BearingReview;
 import org.kappatrail.review.Film;
 import org.kappatrail.review.KappaPoint;
 import org.kappatrail.review.OperatingPoint;
+import org.kappatrail.review.SinglePoint;
 import org.kappatrail.tribology.OilViscosity;
 
 /** How κ of one sample was computed, line by line, with the numbers that went in. */
@@ -22,58 +23,94 @@ public final class Working {
    */
   public record Line(String quantity, String value, String from) {}
 
+  /** What goes into the lines, with where each number comes from. */
+  private record Inputs(
+      OilViscosity oil,
+      String v40From,
+      String v100From,
+      double temperatureC,
+      String temperatureFrom,
+      double speedRpm,
+      String speedFrom,
+      double pitchMm,
+      String pitchFrom,
+      Film film,
+      double floor) {}
+
   /** Lines for a sample that has a κ. */
-  static List<Line> of(BearingReview review, KappaPoint point) {
+  public static List<Line> of(BearingReview review, KappaPoint point) {
     Bearing bearing = review.bearing();
     OilViscosity oil = point.viscosity().orElseThrow();
-    Film film = point.film().orElseThrow();
     OperatingPoint at = point.point();
+    boolean logged = at.temperatureSource() == OperatingPoint.TemperatureSource.LOG;
+    return lines(
+        new Inputs(
+            oil,
+            "measured, sample " + point.sample().id(),
+            source(oil, "sample " + point.sample().id(), point.charge().oil()),
+            at.temperatureC().getAsDouble(),
+            (logged
+                    ? "median of " + Numbers.fixed(at.windowHours(), 1) + " running hours"
+                    : "the laboratory's form")
+                + offset(bearing),
+            at.speedRpm(),
+            at.speedSource() == OperatingPoint.SpeedSource.LOG
+                ? "mean of the same hours"
+                : "nominal, from the register",
+            bearing.pitchMm(),
+            "register: pitch diameter, or mean of bore and outside",
+            point.film().orElseThrow(),
+            review.floor()));
+  }
+
+  /** Lines for a point from bare numbers, with the usual floor of 1. */
+  public static List<Line> of(SinglePoint point) {
+    return lines(
+        new Inputs(
+            point.oil(),
+            "given",
+            point.oil().source() == OilViscosity.Source.MEASURED
+                ? "given"
+                : "where ASTM D2270 gives the viscosity index",
+            point.temperatureC(),
+            "given",
+            point.speedRpm(),
+            "given",
+            point.pitchMm(),
+            "given, or mean of bore and outside",
+            point.film(),
+            1));
+  }
+
+  private static List<Line> lines(Inputs in) {
+    Film film = in.film();
     List<Line> lines = new ArrayList<>();
-    lines.add(
-        new Line(
-            "ν40",
-            Numbers.significant(oil.viscosity40Cst(), 6) + " mm²/s",
-            "measured, sample " + point.sample().id()));
-    lines.add(
-        new Line(
-            "ν100", Numbers.significant(oil.viscosity100Cst(), 6) + " mm²/s", source(oil, point)));
+    lines.add(new Line("ν40", cst(in.oil().viscosity40Cst(), 6), in.v40From()));
+    lines.add(new Line("ν100", cst(in.oil().viscosity100Cst(), 6), in.v100From()));
     lines.add(
         new Line(
             "A, B",
-            Numbers.significant(oil.law().a(), 6) + ", " + Numbers.significant(oil.law().b(), 6),
+            Numbers.significant(in.oil().law().a(), 6)
+                + ", "
+                + Numbers.significant(in.oil().law().b(), 6),
             "ASTM D341: log log (ν + 0.7) = A − B log T through both points"));
     lines.add(
-        new Line(
-            "T",
-            Numbers.fixed(at.temperatureC(), 2) + " °C",
-            at.temperatureSource() == OperatingPoint.TemperatureSource.LOG
-                ? "median of "
-                    + Numbers.fixed(at.windowHours(), 1)
-                    + " running hours before the sample"
-                    + offset(bearing)
-                : "the laboratory's form" + offset(bearing)));
-    lines.add(
-        new Line(
-            "n",
-            Numbers.significant(at.speedRpm(), 5) + " r/min",
-            at.speedSource() == OperatingPoint.SpeedSource.LOG
-                ? "mean of the same hours"
-                : "nominal, from the register"));
-    lines.add(
-        new Line("ν", Numbers.significant(film.operatingCst(), 5) + " mm²/s", "ASTM D341 at T"));
-    lines.add(
-        new Line(
-            "Dpw",
-            Numbers.significant(bearing.pitchMm(), 5) + " mm",
-            "register: pitch diameter, or mean of bore and outside"));
+        new Line("T", Numbers.fixed(in.temperatureC(), 2) + " °C", in.temperatureFrom()));
+    lines.add(new Line("n", Numbers.significant(in.speedRpm(), 5) + " r/min", in.speedFrom()));
+    lines.add(new Line("ν", cst(film.operatingCst(), 5), "ASTM D341 at T"));
+    lines.add(new Line("Dpw", Numbers.significant(in.pitchMm(), 5) + " mm", in.pitchFrom()));
     lines.add(
         new Line(
             "ν1",
-            Numbers.significant(film.ratedCst(), 5) + " mm²/s",
-            at.speedRpm() < 1000
+            cst(film.ratedCst(), 5),
+            in.speedRpm() < 1000
                 ? "ISO 281: 45000 n^−0.83 Dpw^−0.5, n below 1000"
                 : "ISO 281: 4500 n^−0.5 Dpw^−0.5, n from 1000"));
-    lines.add(new Line("κ", Numbers.significant(film.kappa(), 4), "ν / ν1"));
+    lines.add(
+        new Line(
+            "κ",
+            Numbers.significant(film.kappa(), 4),
+            "ν / ν1; " + film.regime().label() + " regime"));
     lines.add(
         new Line(
             "σ(ln κ)",
@@ -94,20 +131,22 @@ public final class Working {
             "κ · exp(±1.96 σ)"));
     lines.add(
         new Line(
-            "P(κ < floor)",
-            Numbers.significant(film.probabilityBelowFloor(), 3),
-            "Φ((ln floor − ln κ)/σ), floor " + Numbers.significant(review.floor(), 3)));
+            "P(κ < " + Numbers.significant(in.floor(), 3) + ")",
+            Numbers.significant(film.uncertainty().probabilityBelow(in.floor()), 3),
+            "Φ((ln floor − ln κ)/σ)"));
     return lines;
   }
 
-  private static String source(OilViscosity oil, KappaPoint point) {
+  private static String cst(double value, int digits) {
+    return Numbers.significant(value, digits) + " mm²/s";
+  }
+
+  private static String source(OilViscosity oil, String measuredBy, String registered) {
     return switch (oil.source()) {
-      case MEASURED -> "measured, sample " + point.sample().id();
+      case MEASURED -> "measured, " + measuredBy;
       case INDEX ->
-          "where ASTM D2270 gives the registered oil's viscosity index ("
-              + point.charge().oil()
-              + ")";
-      case SLOPE -> "slope B of the registered oil kept (" + point.charge().oil() + ")";
+          "where ASTM D2270 gives the registered oil's viscosity index (" + registered + ")";
+      case SLOPE -> "slope B of the registered oil kept (" + registered + ")";
     };
   }
 

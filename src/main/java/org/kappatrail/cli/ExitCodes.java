@@ -1,0 +1,12 @@
+package org.kappatrail.cli;
+
+/** What the program's exit codes mean. */
+final class ExitCodes {
+  static final int DONE = 0;
+  static final int FOUND = 1;
+  static final int USAGE = 2;
+  static final int UNUSABLE_INPUT = 3;
+  static final int BUG = 70;
+
+  private ExitCodes() {}
+}

@@ -1,0 +1,94 @@
+package org.kappatrail.cli;
+
+import java.io.IOException;
+import java.nio.file.Path;
+import java.time.LocalDate;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.TreeSet;
+import org.kappatrail.duty.DutyLog;
+import org.kappatrail.duty.DutyLogs;
+import org.kappatrail.duty.DutyOptions;
+import org.kappatrail.history.FileAccount;
+import org.kappatrail.history.PlantHistory;
+import org.kappatrail.history.Problem;
+import org.kappatrail.history.Sample;
+import org.kappatrail.history.UnusableInputException;
+import org.kappatrail.intake.HistoryReader;
+import org.kappatrail.intake.Intake;
+import org.kappatrail.review.AssetReview;
+import org.kappatrail.review.Progress;
+import org.kappatrail.review.Review;
+import org.kappatrail.review.Reviewer;
+
+/** Reads a history folder and reviews it: what the commands share. */
+final class HistoryLoad {
+  private final Path folder;
+  private final Intake intake;
+  private final PlantHistory chosen;
+  private final LocalDate asOf;
+
+  HistoryLoad(HistoryOptions options) throws IOException {
+    folder = options.folder();
+    intake = HistoryReader.read(folder);
+    chosen = choose(intake.history(), options.assets());
+    LocalDate given = options.asOf();
+    asOf =
+        given != null
+            ? given
+            : Reviewer.latestSampling(intake.history())
+                .orElseThrow(
+                    () ->
+                        new UnusableInputException(
+                            folder
+                                + ": no oil sample that can be used, so there is nothing to"
+                                + " review; put the laboratory's files into samples/, or give"
+                                + " --as-of to look at the logs alone"));
+  }
+
+  Intake intake() {
+    return intake;
+  }
+
+  LocalDate asOf() {
+    return asOf;
+  }
+
+  /** Reviews the chosen assets. */
+  Review review(Progress progress) {
+    try (DutyLog log =
+        DutyLogs.open(folder, intake.settings(), chosen, asOf, DutyOptions.defaults())) {
+      List<AssetReview> assets =
+          new Reviewer(chosen, intake.settings(), asOf, progress).review(log);
+      List<Problem> problems = new ArrayList<>(intake.problems());
+      problems.addAll(log.problems());
+      List<FileAccount> files = new ArrayList<>(intake.files());
+      files.addAll(log.accounts());
+      return new Review(asOf, intake.settings(), assets, problems, files);
+    }
+  }
+
+  private static PlantHistory choose(PlantHistory history, List<String> assets) {
+    if (assets.isEmpty()) {
+      return history;
+    }
+    TreeSet<String> wanted = new TreeSet<>(assets);
+    for (String asset : wanted) {
+      if (history.findAsset(asset).isEmpty()) {
+        Optional<String> nearest = Nearest.to(asset, history.assets().stream().map(a -> a.id()).toList());
+        throw new UnusableInputException(
+            "no asset '"
+                + asset
+                + "' in assets.csv"
+                + nearest.map(name -> "; nearest is '" + name + "'").orElse(""));
+      }
+    }
+    return new PlantHistory(
+        history.oils(),
+        history.assets().stream().filter(asset -> wanted.contains(asset.id())).toList(),
+        history.bearings().stream().filter(item -> wanted.contains(item.asset())).toList(),
+        history.samples().stream().filter((Sample item) -> wanted.contains(item.asset())).toList(),
+        wanted.stream().flatMap(asset -> history.eventsOf(asset).stream()).toList());
+  }
+}
