@@ -4,7 +4,7 @@ package org.kappatrail.duty;
 final class FaultSql {
   /** Marks that historians put on readings which are not good; they are counted, not reported. */
   private static final String KNOWN_BAD =
-      "'bad', 'uncertain', 'questionable', 'substituted', 'suspect', 'stale', 'false'";
+      "'bad|uncertain|questionable|substituted|suspect|stale|-?\\d+'";
 
   private FaultSql() {}
 
@@ -18,9 +18,9 @@ final class FaultSql {
         + ReadingState.UNKNOWN_BEARING.code()
         + " WHEN quality_text IS NOT NULL AND quality_text NOT IN ('Good', 'good', 'GOOD', '192')"
         + " AND lower(trim(quality_text)) NOT IN ('good', '192', '') THEN CASE WHEN"
-        + " lower(trim(quality_text)) IN ("
+        + " regexp_full_match(lower(trim(quality_text)), "
         + KNOWN_BAD
-        + ") OR regexp_full_match(trim(quality_text), '-?\\d+') THEN "
+        + ") THEN "
         + ReadingState.BAD_QUALITY.code()
         + " ELSE "
         + ReadingState.UNKNOWN_QUALITY.code()
