@@ -1,6 +1,7 @@
 package org.kappatrail.tribology;
 
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalInt;
 
@@ -58,6 +59,7 @@ public final class Iso281ContaminationFactor {
     boolean bound = covering.isEmpty() || code.c6().bound() || code.c14().bound();
     String basis =
         String.format(
+            Locale.ROOT,
             "%s, code -/%d/%d%s",
             supply.label(),
             chosen.most6um(),

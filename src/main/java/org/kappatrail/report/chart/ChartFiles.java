@@ -1,0 +1,55 @@
+package org.kappatrail.report.chart;
+
+import de.erichseifert.vectorgraphics2d.Document;
+import de.erichseifert.vectorgraphics2d.VectorGraphics2D;
+import de.erichseifert.vectorgraphics2d.svg.SVGProcessor;
+import de.erichseifert.vectorgraphics2d.util.PageSize;
+import java.awt.Graphics2D;
+import java.awt.image.BufferedImage;
+import java.io.ByteArrayOutputStream;
+import java.io.IOException;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import javax.imageio.ImageIO;
+
+/** Writes a drawing as PNG at twice its size, and as SVG. */
+public final class ChartFiles {
+  private static final int SCALE = 2;
+
+  private ChartFiles() {}
+
+  public static void writePng(Drawing drawing, Path file) throws IOException {
+    Files.write(file, png(drawing));
+  }
+
+  public static void writeSvg(Drawing drawing, Path file) throws IOException {
+    Files.writeString(file, svg(drawing), StandardCharsets.UTF_8);
+  }
+
+  /** The drawing as PNG. */
+  public static byte[] png(Drawing drawing) throws IOException {
+    BufferedImage image =
+        new BufferedImage(
+            drawing.width() * SCALE, drawing.height() * SCALE, BufferedImage.TYPE_INT_RGB);
+    Graphics2D g = image.createGraphics();
+    g.scale(SCALE, SCALE);
+    drawing.paint(g);
+    g.dispose();
+    ByteArrayOutputStream bytes = new ByteArrayOutputStream();
+    ImageIO.write(image, "png", bytes);
+    return bytes.toByteArray();
+  }
+
+  /** The drawing as SVG text. */
+  public static String svg(Drawing drawing) throws IOException {
+    VectorGraphics2D g = new VectorGraphics2D();
+    drawing.paint(g);
+    Document document =
+        new SVGProcessor()
+            .getDocument(g.getCommands(), new PageSize(0, 0, drawing.width(), drawing.height()));
+    ByteArrayOutputStream bytes = new ByteArrayOutputStream();
+    document.writeTo(bytes);
+    return bytes.toString(StandardCharsets.UTF_8);
+  }
+}

@@ -1,0 +1,14 @@
+package org.kappatrail.report.chart;
+
+import java.awt.Graphics2D;
+
+/** Something that can be painted at a fixed size, as raster or vector. */
+public interface Drawing {
+  /** Width, px. */
+  int width();
+
+  /** Height, px. */
+  int height();
+
+  void paint(Graphics2D g);
+}

@@ -1,0 +1,59 @@
+package org.kappatrail.report.page;
+
+/** Writes HTML; every text goes through {@link #escape}. */
+final class Html {
+  private final StringBuilder text = new StringBuilder();
+
+  /** Text as it can stand in element content and in quoted attributes. */
+  static String escape(String text) {
+    StringBuilder safe = new StringBuilder(text.length() + 16);
+    for (int i = 0; i < text.length(); i++) {
+      char c = text.charAt(i);
+      switch (c) {
+        case '&' -> safe.append("&amp;");
+        case '<' -> safe.append("&lt;");
+        case '>' -> safe.append("&gt;");
+        case '"' -> safe.append("&quot;");
+        case '\'' -> safe.append("&#39;");
+        default -> {
+          boolean control = c < ' ' && c != '\n' && c != '\t';
+          safe.append(control || c == 0x7F ? '\uFFFD' : c);
+        }
+      }
+    }
+    return safe.toString();
+  }
+
+  /** Adds markup of the program's own. */
+  Html raw(String markup) {
+    text.append(markup);
+    return this;
+  }
+
+  /** Adds text from anywhere. */
+  Html text(String content) {
+    text.append(escape(content));
+    return this;
+  }
+
+  /** Adds an element with text in it; the tag may carry attributes of the program's own. */
+  Html element(String tag, String content) {
+    int blank = tag.indexOf(' ');
+    String name = blank < 0 ? tag : tag.substring(0, blank);
+    return raw("<" + tag + ">").text(content).raw("</" + name + ">");
+  }
+
+  /** Adds an element around what the body writes. */
+  Html around(String tag, Runnable body) {
+    int blank = tag.indexOf(' ');
+    String name = blank < 0 ? tag : tag.substring(0, blank);
+    raw("<" + tag + ">");
+    body.run();
+    return raw("</" + name + ">\n");
+  }
+
+  @Override
+  public String toString() {
+    return text.toString();
+  }
+}

@@ -1,0 +1,138 @@
+package org.kappatrail.report.page;
+
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.UncheckedIOException;
+import java.nio.charset.StandardCharsets;
+import java.util.List;
+import java.util.Map;
+import org.kappatrail.history.Problem;
+import org.kappatrail.report.FileNames;
+import org.kappatrail.review.AssetReview;
+import org.kappatrail.review.Level;
+import org.kappatrail.review.Review;
+
+/** The review as one self-contained page: nothing is loaded from anywhere. */
+public final class Page {
+  private static final int MOST_PROBLEMS = 200;
+
+  private final Review review;
+  private final Map<String, String> pictures;
+  private final Map<String, String> anchors;
+
+  /**
+   * A page.
+   *
+   * @param review what was found
+   * @param pictures SVG text of an asset's chart by asset; an asset without one gets none
+   */
+  public Page(Review review, Map<String, String> pictures) {
+    this.review = review;
+    this.pictures = Map.copyOf(pictures);
+    this.anchors = FileNames.of(review.assets().stream().map(asset -> asset.asset().id()).toList());
+  }
+
+  /** The page's text. */
+  public String html() {
+    Html html = new Html();
+    String site = review.settings().site();
+    String title = (site.isEmpty() ? "Oil film review" : site + ": oil film review");
+    html.raw("<!DOCTYPE html>\n<html lang=\"en\">\n<head>\n<meta charset=\"utf-8\">\n")
+        .raw(
+            "<meta http-equiv=\"Content-Security-Policy\" content=\"default-src 'none'; img-src"
+                + " data:; style-src 'unsafe-inline'; script-src 'unsafe-inline'\">\n")
+        .raw("<meta name=\"viewport\" content=\"width=device-width, initial-scale=1\">\n")
+        .element("title", title + ", " + review.asOf())
+        .raw("\n<style>\n")
+        .raw(resource("page.css"))
+        .raw("</style>\n</head>\n<body>\n");
+    html.around("header", () -> head(html, title));
+    html.around(
+        "main",
+        () -> {
+          new FleetTable(review, anchors).write(html);
+          for (AssetReview asset : review.worstFirst()) {
+            new AssetSection(asset, anchorOf(asset), pictures.getOrDefault(asset.asset().id(), ""))
+                .write(html);
+          }
+          problems(html);
+          html.raw(resource("method.html"));
+        });
+    return html.raw("</body>\n</html>\n").toString();
+  }
+
+  private String anchorOf(AssetReview asset) {
+    return anchors.getOrDefault(asset.asset().id(), "");
+  }
+
+  private void head(Html html, String title) {
+    html.element("h1", title).raw("\n");
+    long alarms = count(Level.ALARM);
+    long alerts = count(Level.ALERT);
+    long unknown = review.assets().stream().filter(asset -> asset.level().isEmpty()).count();
+    html.element(
+        "p class=\"lead\"",
+        "State of "
+            + review.asOf()
+            + ". Of "
+            + review.assets().size()
+            + (review.assets().size() == 1 ? " asset, " : " assets, ")
+            + alarms
+            + (alarms == 1 ? " has" : " have")
+            + " a bearing below its κ floor, "
+            + alerts
+            + (alerts == 1 ? " has" : " have")
+            + " one whose interval reaches below it"
+            + (unknown == 0 ? "." : ", and of " + unknown + " no κ is known."));
+    if (!review.problems().isEmpty()) {
+      html.raw("<p><a href=\"#problems\">")
+          .text(review.problems().size() + " problems in the inputs")
+          .raw("</a> were left out of what follows.</p>\n");
+    }
+  }
+
+  private long count(Level level) {
+    return review.assets().stream()
+        .filter(asset -> asset.level().filter(found -> found == level).isPresent())
+        .count();
+  }
+
+  private void problems(Html html) {
+    List<Problem> problems = review.problems();
+    if (problems.isEmpty()) {
+      return;
+    }
+    html.around(
+        "section id=\"problems\"",
+        () -> {
+          html.element("h2", "Problems in the inputs");
+          html.raw("<div class=\"scroll\"><table>\n<thead><tr><th>file</th><th class=\"n\">line")
+              .raw("</th><th>column</th><th>value</th><th>problem</th></tr></thead>\n<tbody>\n");
+          for (Problem problem : problems.subList(0, Math.min(MOST_PROBLEMS, problems.size()))) {
+            long line = problem.source().line();
+            html.raw("<tr>")
+                .element("td", problem.source().file())
+                .element("td class=\"n\"", line > 0 ? Long.toString(line) : "")
+                .element("td", problem.column())
+                .element("td", problem.value())
+                .element("td", problem.text())
+                .raw("</tr>\n");
+          }
+          html.raw("</tbody></table></div>\n");
+          if (problems.size() > MOST_PROBLEMS) {
+            html.element("p", problems.size() - MOST_PROBLEMS + " more are in problems.csv.");
+          }
+        });
+  }
+
+  private static String resource(String name) {
+    try (InputStream in = Page.class.getResourceAsStream(name)) {
+      if (in == null) {
+        throw new IllegalStateException("the program lacks its file " + name);
+      }
+      return new String(in.readAllBytes(), StandardCharsets.UTF_8);
+    } catch (IOException e) {
+      throw new UncheckedIOException(e);
+    }
+  }
+}

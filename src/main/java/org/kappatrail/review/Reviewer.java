@@ -1,0 +1,152 @@
+package org.kappatrail.review;
+
+import java.time.LocalDate;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import org.kappatrail.duty.BearingDuty;
+import org.kappatrail.duty.DutyLog;
+import org.kappatrail.history.Asset;
+import org.kappatrail.history.Bearing;
+import org.kappatrail.history.BearingKey;
+import org.kappatrail.history.Charge;
+import org.kappatrail.history.Charges;
+import org.kappatrail.history.Event;
+import org.kappatrail.history.PlantHistory;
+import org.kappatrail.history.Sample;
+import org.kappatrail.history.Settings;
+
+/** Makes the review: one pass over the logs, bearing by bearing, then asset by asset. */
+public final class Reviewer {
+  private final PlantHistory history;
+  private final Settings settings;
+  private final LocalDate asOf;
+  private final Progress progress;
+  private final Map<String, AssetInputs> inputs = new HashMap<>();
+
+  private record AssetInputs(
+      Asset asset,
+      List<Charge> charges,
+      List<Sample> samples,
+      List<Event> events,
+      OilTimeline oil) {}
+
+  /**
+   * Prepares a review.
+   *
+   * @param history the records
+   * @param settings settings in force
+   * @param asOf last day that counts: later samples, events and readings are left out
+   * @param progress told how far it has come
+   */
+  public Reviewer(PlantHistory history, Settings settings, LocalDate asOf, Progress progress) {
+    this.history = history;
+    this.settings = settings;
+    this.asOf = asOf;
+    this.progress = progress;
+    for (Asset asset : history.assets()) {
+      List<Sample> samples =
+          history.samplesOf(asset.id()).stream()
+              .filter(sample -> !sample.day().isAfter(asOf))
+              .toList();
+      List<Event> events =
+          history.eventsOf(asset.id()).stream()
+              .filter(event -> !event.date().isAfter(asOf))
+              .toList();
+      List<Charge> charges = Charges.of(asset, samples, events);
+      inputs.put(
+          asset.id(),
+          new AssetInputs(asset, charges, samples, events, new OilTimeline(charges, history)));
+    }
+  }
+
+  /** Latest sampling day of a history; empty where there is no sample. */
+  public static Optional<LocalDate> latestSampling(PlantHistory history) {
+    return history.samples().stream().map(Sample::day).max(LocalDate::compareTo);
+  }
+
+  /** Reads the logs once and reviews every asset of the history. */
+  public List<AssetReview> review(DutyLog log) {
+    Map<BearingKey, BearingReview> bearings = new HashMap<>();
+    Map<BearingKey, List<Finding>> logFindings = new HashMap<>();
+    int total = history.bearings().size();
+    log.forEachBearing(
+        duty -> {
+          review(duty, bearings, logFindings);
+          progress.at("bearings", bearings.size(), total);
+        });
+    for (Bearing bearing : history.bearings()) {
+      if (!bearings.containsKey(bearing.key())) {
+        review(BearingDuty.none(bearing.key()), bearings, logFindings);
+      }
+    }
+    progress.at("bearings", total, total);
+    return history.assets().stream()
+        .map(asset -> review(inputs(asset.id()), bearings, logFindings))
+        .toList();
+  }
+
+  private void review(
+      BearingDuty duty,
+      Map<BearingKey, BearingReview> bearings,
+      Map<BearingKey, List<Finding>> logFindings) {
+    BearingKey key = duty.bearing();
+    AssetInputs asset = inputs(key.asset());
+    Bearing bearing =
+        history.bearingsOf(key.asset()).stream()
+            .filter(known -> known.id().equals(key.bearing()))
+            .findFirst()
+            .orElseThrow(() -> new IllegalStateException("log of an unknown bearing " + key));
+    KappaTrail trail =
+        new KappaTrail(
+            asset.asset(), bearing, asset.charges(), asset.oil(), history, duty, settings);
+    bearings.put(key, trail.review());
+    logFindings.put(key, LogFindings.of(duty, lastSample(asset).orElse(asOf)));
+  }
+
+  private static Optional<LocalDate> lastSample(AssetInputs asset) {
+    return asset.samples().stream().map(Sample::day).max(LocalDate::compareTo);
+  }
+
+  private AssetReview review(
+      AssetInputs asset,
+      Map<BearingKey, BearingReview> bearings,
+      Map<BearingKey, List<Finding>> logFindings) {
+    List<BearingReview> own =
+        history.bearingsOf(asset.asset().id()).stream()
+            .map(bearing -> found(bearings, bearing.key()))
+            .toList();
+    List<Finding> findings =
+        new ArrayList<>(SampleFindings.of(asset.asset(), asset.charges(), history, settings));
+    for (Charge charge : asset.charges()) {
+      findings.addAll(UnrecordedChange.in(charge, history.getOil(charge.oil()), asset.events()));
+    }
+    for (BearingReview bearing : own) {
+      findings.addAll(FilmFindings.of(bearing));
+      findings.addAll(found(logFindings, bearing.bearing().key()));
+    }
+    findings.sort(Finding.ORDER);
+    return new AssetReview(
+        asset.asset(),
+        history.getOil(asset.asset().oil()),
+        asset.charges(),
+        asset.samples(),
+        asset.events(),
+        own,
+        findings);
+  }
+
+  private AssetInputs inputs(String asset) {
+    return found(inputs, asset);
+  }
+
+  private static <K, V> V found(Map<K, V> map, K key) {
+    V value = map.get(key);
+    if (value == null) {
+      throw new IllegalStateException("nothing known of " + key);
+    }
+    return value;
+  }
+}
