@@ -1,6 +1,6 @@
 package org.kappatrail.duty;
 
-/** Why a row of a file is no reading, as an SQL expression over the columns of LongReadings. */
+/** Why a row of a file is no reading, as SQL expressions over the columns of FileReadings. */
 final class FaultSql {
   /** Marks that historians put on readings which are not good; they are counted, not reported. */
   private static final String KNOWN_BAD =
@@ -8,7 +8,7 @@ final class FaultSql {
 
   private FaultSql() {}
 
-  /** A ReadingState code, 0 where the reading may be used. */
+  /** Long form: a ReadingState code, 0 where the reading may be used. */
   static String fault() {
     return "CASE WHEN trim(overflow) <> '' THEN "
         + ReadingState.TOO_MANY_CELLS.code()
@@ -16,22 +16,44 @@ final class FaultSql {
         + ReadingState.TIME_UNREADABLE.code()
         + " WHEN names.bearing IS NULL THEN "
         + ReadingState.UNKNOWN_BEARING.code()
-        + " WHEN quality_text IS NOT NULL AND quality_text NOT IN ('Good', 'good', 'GOOD', '192')"
-        + " AND lower(trim(quality_text)) NOT IN ('good', '192', '') THEN CASE WHEN"
-        + " regexp_full_match(lower(trim(quality_text)), "
+        + " WHEN "
+        + isNotGood("quality_text")
+        + " THEN "
+        + badQuality("quality_text")
+        + " WHEN temperature IS NULL THEN "
+        + noTemperature()
+        + " ELSE 0 END";
+  }
+
+  /** True where a quality mark stands there and is not good. */
+  static String isNotGood(String mark) {
+    return "({q} IS NOT NULL AND {q} NOT IN ('Good', 'good', 'GOOD', '192')"
+        .concat(" AND lower(trim({q})) NOT IN ('good', '192', ''))")
+        .replace("{q}", mark);
+  }
+
+  /** The state of a mark that is not good. */
+  static String badQuality(String mark) {
+    return "CASE WHEN regexp_full_match(lower(trim("
+        + mark
+        + ")), "
         + KNOWN_BAD
         + ") THEN "
         + ReadingState.BAD_QUALITY.code()
         + " ELSE "
         + ReadingState.UNKNOWN_QUALITY.code()
-        + " END WHEN temperature IS NULL THEN CASE WHEN temperature_text IS NULL OR"
-        + " trim(temperature_text) = '' THEN "
+        + " END";
+  }
+
+  /** The state of a temperature that is no number. */
+  static String noTemperature() {
+    return "CASE WHEN temperature_text IS NULL OR trim(temperature_text) = '' THEN "
         + ReadingState.NO_TEMPERATURE.code()
         + " WHEN regexp_matches(temperature_text, '\\d') THEN "
         + ReadingState.TEMPERATURE_UNREADABLE.code()
         + " ELSE "
         + ReadingState.STATUS_TEXT.code()
-        + " END ELSE 0 END";
+        + " END";
   }
 
   /** 1 where a speed stands there and is no number. */

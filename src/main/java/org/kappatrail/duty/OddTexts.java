@@ -34,8 +34,12 @@ final class OddTexts {
     return texts.getOrDefault(fault, Map.of());
   }
 
-  boolean isEmpty() {
-    return texts.isEmpty();
+  /** The same texts but those of one kind. */
+  OddTexts without(CellFault fault) {
+    OddTexts rest = new OddTexts();
+    rest.texts.putAll(texts);
+    rest.texts.remove(fault);
+    return rest;
   }
 
   /**
@@ -70,7 +74,7 @@ final class OddTexts {
     StringBuilder text = new StringBuilder("CASE fault");
     List<String> codes = new ArrayList<>();
     for (CellFault fault : CellFault.values()) {
-      if (fault.state().isUsed()) {
+      if (fault.state().isReading()) {
         continue;
       }
       int code = fault.state().code();
