@@ -65,9 +65,10 @@ final class CellFinder {
       Map<String, OddTexts.Occurrence> texts = odd.of(fault);
       if (!texts.isEmpty()) {
         for (Cell cell : cells(fault, row)) {
-          OddTexts.Occurrence occurrence = texts.get(cell.text());
-          if (occurrence != null && isNew(fault, cell.text())) {
-            listener.found(fault, cell.column(), cell.text(), occurrence, line);
+          String text = OddTexts.key(cell.text());
+          OddTexts.Occurrence occurrence = texts.get(text);
+          if (occurrence != null && isNew(fault, text)) {
+            listener.found(fault, cell.column(), text, occurrence, line);
           }
         }
       }

@@ -58,7 +58,8 @@ final class RejectedCells {
               new SourceLine(table.file().name(), 0),
               "",
               "",
-              String.format(Locale.ROOT, "%,d further cells of this file cannot be read", rest)));
+              String.format(
+                  Locale.ROOT, "further cells of this file that cannot be read: %,d", rest)));
     }
   }
 
