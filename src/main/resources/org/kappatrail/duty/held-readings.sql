@@ -5,6 +5,7 @@
 --   temperature_text, temperature_c, speed_text, speed_rpm, mark_text (of a tag of quality)
 --
 -- A cell that is not empty and no usable number ends the value before it: it is held as -2147483648.
+-- A negative speed is seen at its own instant, where it drops the reading, and not held.
 WITH events AS ({events}),
 parsed AS (
   SELECT *, {instant} AS instant_ms, {temperature} AS temperature, {speed} AS speed
@@ -37,7 +38,7 @@ coded AS (
       WHEN trim(temperature_text) <> '' THEN -2147483648
     END AS temperature_code,
     CASE
-      WHEN speed >= 0 AND own_fault NOT IN (7, 8) THEN speed
+      WHEN speed IS NOT NULL AND own_fault NOT IN (7, 8) THEN speed
       WHEN trim(speed_text) <> '' THEN -2147483648
     END AS speed_code
   FROM judged
@@ -76,8 +77,8 @@ filled AS (
       ELSE temperature
     END AS temperature_now,
     CASE
-      WHEN speed < 0 THEN speed
-      WHEN speed_held > -2147483648 AND instant_ms - speed_ms <= {gap_ms} THEN speed_held
+      WHEN speed_held >= 0 AND instant_ms - speed_ms <= {gap_ms} THEN speed_held
+      WHEN speed_held > -2147483648 AND instant_ms = speed_ms THEN speed_held
     END AS speed_now
   FROM held
 )
