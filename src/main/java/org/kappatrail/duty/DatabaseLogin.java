@@ -20,7 +20,8 @@ final class DatabaseLogin {
   private static final String PASSWORD = "KAPPATRAIL_DB_PASSWORD";
   private static final String FILE = "KAPPATRAIL_DB_CREDENTIALS";
 
-  private static final Pattern IN_ADDRESS = Pattern.compile("(?<=[/:])[^/@\\s]*[:/][^@\\s]*@");
+  private static final Pattern IN_ADDRESS =
+      Pattern.compile("(?<=//)[^@\\n]*@|(?<=:)[^/:@\\s]+/[^@\\s]*@");
   private static final Pattern PARAMETERS = Pattern.compile("(jdbc:[^\\s?;]*)[?;]\\S*");
 
   private final Optional<String> user;
