@@ -5,6 +5,7 @@ import java.sql.PreparedStatement;
 import java.sql.SQLException;
 import java.sql.Types;
 import java.time.LocalDateTime;
+import java.time.OffsetDateTime;
 import java.util.List;
 
 /** Puts readings into a table. */
@@ -31,13 +32,17 @@ final class DatabaseRows {
         + ", quality VARCHAR(20))";
   }
 
-  /** Local times. */
+  /** Times with Z go to a column of instants, others to one of local times. */
   static void insert(Connection connection, String table, List<RawReading> rows)
       throws SQLException {
     String sql = "INSERT INTO " + table + " VALUES (?, ?, ?, ?, ?, ?)";
     try (PreparedStatement insert = connection.prepareStatement(sql)) {
       for (RawReading row : rows) {
-        insert.setObject(1, LocalDateTime.parse(row.time()));
+        insert.setObject(
+            1,
+            row.time().endsWith("Z")
+                ? OffsetDateTime.parse(row.time())
+                : LocalDateTime.parse(row.time()));
         insert.setString(2, row.bearing().asset());
         insert.setString(3, row.bearing().bearing());
         number(insert, 4, row.temperature());
