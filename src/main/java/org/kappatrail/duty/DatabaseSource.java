@@ -73,7 +73,9 @@ final class DatabaseSource implements DutySource {
                       new UnusableInputException(
                           name + ": " + product + " is not known; PostgreSQL and DuckDB are"));
       connection.setAutoCommit(false);
-      readings = new TableReadings(engine, quotedTable(), columns(), mapping, bearings);
+      readings =
+          new TableReadings(
+              engine, quotedTable(), columns(), mapping, TableReadings.namesOf(bearings));
       sql = DayCellsStatement.over(readings.sql(zone), bearings, settings, asOf);
     } catch (SQLException e) {
       close();

@@ -10,7 +10,7 @@ enum SqlEngine {
       "postgresql",
       "CAST(FLOOR(EXTRACT(EPOCH FROM %s) * 1000) AS BIGINT)",
       "CAST(%s AS DOUBLE PRECISION)"),
-  SPARK("spark", "unix_millis(%s)", "CAST(%s AS DOUBLE)");
+  SPARK("spark", "unix_millis(CAST(%s AS TIMESTAMP))", "CAST(%s AS DOUBLE)");
 
   private final String product;
   private final String epochMillis;

@@ -18,7 +18,7 @@ final class TableReadings {
   private final String table;
   private final List<Column> columns;
   private final ExportMapping mapping;
-  private final List<Bearing> bearings;
+  private final String names;
   private final LogLayout layout;
 
   /**
@@ -48,17 +48,21 @@ final class TableReadings {
     }
   }
 
+  /**
+   * Looks at the columns.
+   *
+   * @param table the table as it stands in a statement
+   * @param columns its columns
+   * @param mapping what they carry
+   * @param names relation {@code names} of bearing, asset and name, with the register's keys
+   */
   TableReadings(
-      SqlEngine engine,
-      String table,
-      List<Column> columns,
-      ExportMapping mapping,
-      List<Bearing> bearings) {
+      SqlEngine engine, String table, List<Column> columns, ExportMapping mapping, String names) {
     this.engine = engine;
     this.table = table;
     this.columns = List.copyOf(columns);
     this.mapping = mapping;
-    this.bearings = List.copyOf(bearings);
+    this.names = names;
     if (!mapping.tags().isEmpty()) {
       throw new UnusableInputException(
           table + ": tags: are for files; make a view with a row per reading and name that");
@@ -93,7 +97,7 @@ final class TableReadings {
             FROM {table}
           ) parsed
         ) whole
-        LEFT JOIN (VALUES {names}) AS names (bearing, asset, name)
+        LEFT JOIN {names}
           ON names.asset = TRIM(asset_text) AND names.name = TRIM(bearing_text)"""
         .replace("{instant}", instant(zone))
         .replace("{temperature}", thousandths("temperature_c"))
@@ -104,7 +108,7 @@ final class TableReadings {
         .replace("{celsius}", NumberSql.celsius(number(LogLayout.TEMPERATURE), mapping))
         .replace("{rpm}", NumberSql.rpm(number(LogLayout.SPEED), mapping))
         .replace("{quality}", text(LogLayout.QUALITY))
-        .replace("{names}", names())
+        .replace("{names}", names)
         .replace("{table}", table);
   }
 
@@ -185,13 +189,15 @@ final class TableReadings {
                     table + ": a table of readings needs a column of times"));
   }
 
-  private String names() {
-    if (bearings.isEmpty()) {
-      return "(0, '', '')";
-    }
-    return IntStream.range(0, bearings.size())
-        .mapToObj(index -> name(index + 1, bearings.get(index)))
-        .collect(Collectors.joining(", "));
+  /** The register's names as values in the statement, for engines with standard literals. */
+  static String namesOf(List<Bearing> bearings) {
+    String rows =
+        bearings.isEmpty()
+            ? "(0, '', '')"
+            : IntStream.range(0, bearings.size())
+                .mapToObj(index -> name(index + 1, bearings.get(index)))
+                .collect(Collectors.joining(", "));
+    return "(VALUES " + rows + ") AS names (bearing, asset, name)";
   }
 
   private static String name(int key, Bearing bearing) {
