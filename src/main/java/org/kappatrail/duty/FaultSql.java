@@ -1,6 +1,9 @@
 package org.kappatrail.duty;
 
-/** Why a row of a file is no reading, as SQL expressions over the columns of FileReadings. */
+/**
+ * Why a row of a file is no reading, as SQL expressions over the columns of FileReadings. What most
+ * rows need not pass stands in a CASE, which skips it; AND and OR evaluate both sides.
+ */
 final class FaultSql {
   /** Marks that historians put on readings which are not good; they are counted, not reported. */
   private static final String KNOWN_BAD =
@@ -27,8 +30,11 @@ final class FaultSql {
 
   /** True where a quality mark stands there and is not good. */
   static String isNotGood(String mark) {
-    return "({q} IS NOT NULL AND {q} NOT IN ('Good', 'good', 'GOOD', '192')"
-        .concat(" AND lower(trim({q})) NOT IN ('good', '192', ''))")
+    return """
+        CASE
+          WHEN {q} IS NULL OR {q} IN ('Good', 'good', 'GOOD', '192') THEN FALSE
+          ELSE lower(trim({q})) NOT IN ('good', '192', '')
+        END"""
         .replace("{q}", mark);
   }
 
@@ -58,6 +64,6 @@ final class FaultSql {
 
   /** 1 where a speed stands there and is no number. */
   static String flaw() {
-    return "CASE WHEN speed IS NULL AND trim(speed_text) <> '' THEN 1 ELSE 0 END";
+    return "CASE WHEN speed IS NOT NULL THEN 0 WHEN trim(speed_text) <> '' THEN 1 ELSE 0 END";
   }
 }

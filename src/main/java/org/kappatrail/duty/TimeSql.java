@@ -20,13 +20,13 @@ record TimeSql(String clockMs, String zoned) {
     // As long as yyyy-MM-ddTHH:mm:ss and with its last colon: needs no closer look.
     String plain = "length(" + column + ") = 19 AND " + column + "[17] = ':'";
     String zoned =
-        "NOT ("
+        "CASE WHEN "
             + plain
-            + ") AND regexp_full_match(trim("
+            + " THEN FALSE ELSE regexp_full_match(trim("
             + column
             + "), "
             + SqlText.literal(OFFSET)
-            + ")";
+            + ") END";
     String clock =
         "CASE WHEN "
             + plain
