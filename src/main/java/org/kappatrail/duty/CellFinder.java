@@ -6,29 +6,31 @@ import de.siegmar.fastcsv.reader.CsvRecord;
 import java.io.BufferedReader;
 import java.io.IOException;
 import java.io.UncheckedIOException;
+import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
-import org.jspecify.annotations.Nullable;
 import org.kappatrail.history.UnusableInputException;
 
 /** Goes through a CSV file for the lines on which odd texts stand, as an editor numbers them. */
 final class CellFinder {
   /** Takes a cell that was found. */
   interface Listener {
-    void found(CellFault fault, String text, OddTexts.Occurrence occurrence, long line);
+    void found(
+        CellFault fault, String column, String text, OddTexts.Occurrence occurrence, long line);
   }
+
+  private record Cell(String column, String text) {}
 
   private final LogTable table;
   private final LogLayout layout;
-  private final Map<String, String> constants;
   private final OddTexts odd;
   private final Map<CellFault, Map<String, Boolean>> seen = new EnumMap<>(CellFault.class);
 
   CellFinder(LogTable table, LogLayout layout, OddTexts odd) {
     this.table = table;
     this.layout = layout;
-    this.constants = table.file().mapping().constants();
     this.odd = odd;
   }
 
@@ -42,6 +44,9 @@ final class CellFinder {
       }
       for (CsvRecord row : rows) {
         long line = offset + row.getStartingLineNumber();
+        if (Footer.ends(table.file(), row.getField(0))) {
+          return;
+        }
         if (line > table.headerLines()) {
           look(row, line, listener);
         }
@@ -58,10 +63,14 @@ final class CellFinder {
   private void look(CsvRecord row, long line, Listener listener) {
     for (CellFault fault : CellFault.values()) {
       Map<String, OddTexts.Occurrence> texts = odd.of(fault);
-      String text = texts.isEmpty() ? null : text(fault, row);
-      OddTexts.Occurrence occurrence = text == null ? null : texts.get(text);
-      if (text != null && occurrence != null && isNew(fault, text)) {
-        listener.found(fault, text, occurrence, line);
+      if (!texts.isEmpty()) {
+        for (Cell cell : cells(fault, row)) {
+          String text = OddTexts.key(cell.text());
+          OddTexts.Occurrence occurrence = texts.get(text);
+          if (occurrence != null && isNew(fault, text)) {
+            listener.found(fault, cell.column(), text, occurrence, line);
+          }
+        }
       }
     }
   }
@@ -71,12 +80,32 @@ final class CellFinder {
         || seen.computeIfAbsent(fault, key -> new LinkedHashMap<>()).put(text, true) == null;
   }
 
-  private @Nullable String text(CellFault fault, CsvRecord row) {
+  private List<Cell> cells(CellFault fault, CsvRecord row) {
     return switch (fault) {
-      case CELLS -> overflows(row) ? "" : null;
-      case BEARING -> cell(LogLayout.ASSET, row) + OddTexts.BETWEEN + cell(LogLayout.BEARING, row);
-      default -> cell(fault.column(), row);
+      case CELLS -> overflows(row) ? List.of(new Cell("", "")) : List.of();
+      case BEARING -> List.of(new Cell(fault.column(), bearing(row)));
+      default -> {
+        List<Cell> cells = new ArrayList<>();
+        layout
+            .constant(fault.column())
+            .ifPresent(text -> cells.add(new Cell(fault.column(), text)));
+        for (int index : layout.places(fault.column(), row.getFields())) {
+          cells.add(new Cell(name(fault, index), field(row, index)));
+        }
+        yield cells;
+      }
     };
+  }
+
+  /** The tag where many columns carry the quantity, else the program's name. */
+  private String name(CellFault fault, int index) {
+    return layout.tagColumns().containsKey(index) ? table.columns().get(index) : fault.column();
+  }
+
+  private String bearing(CsvRecord row) {
+    return layout.form() == LogLayout.Form.TAGGED
+        ? cell(LogLayout.TAG, row) + OddTexts.BETWEEN
+        : cell(LogLayout.ASSET, row) + OddTexts.BETWEEN + cell(LogLayout.BEARING, row);
   }
 
   private boolean overflows(CsvRecord row) {
@@ -85,14 +114,13 @@ final class CellFinder {
   }
 
   private String cell(String canonical, CsvRecord row) {
-    String constant = constants.get(canonical);
-    if (constant != null) {
-      return constant;
-    }
     return layout
-        .find(canonical)
-        .filter(index -> index < row.getFieldCount())
-        .map(row::getField)
+        .constant(canonical)
+        .or(() -> layout.find(canonical).map(index -> field(row, index)))
         .orElse("");
+  }
+
+  private static String field(CsvRecord row, int index) {
+    return index < row.getFieldCount() ? row.getField(index) : "";
   }
 }

@@ -3,7 +3,8 @@ package org.kappatrail.duty;
 import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.util.List;
-import java.util.function.Consumer;
+import java.util.Optional;
+import org.jspecify.annotations.Nullable;
 import org.kappatrail.history.Bearing;
 
 /** Turns the rows of the statement into cells, one bearing after the other. */
@@ -12,10 +13,10 @@ final class CellReader {
 
   private final List<Bearing> bearings;
   private final Tally tally;
-  private final Consumer<BearingDuty> use;
+  private final ResultSet rows;
 
+  private boolean ahead;
   private int bearing;
-  private boolean open;
   private DutyCells.Builder cells = new DutyCells.Builder();
   private long[] dropped = new long[ReadingState.values().length];
 
@@ -31,32 +32,36 @@ final class CellReader {
   private long highest;
   private long speedMs;
 
-  CellReader(List<Bearing> bearings, Tally tally, Consumer<BearingDuty> use) {
+  CellReader(List<Bearing> bearings, Tally tally, ResultSet rows) throws SQLException {
     this.bearings = bearings;
     this.tally = tally;
-    this.use = use;
+    this.rows = rows;
+    this.ahead = rows.next();
   }
 
-  void read(ResultSet rows) throws SQLException {
-    while (rows.next()) {
-      int key = rows.getInt(1);
-      if (!open || key != bearing) {
-        finishBearing();
-        bearing = key;
-        open = true;
+  /** The next bearing that has readings; null after the last one. */
+  @Nullable BearingDuty next() throws SQLException {
+    while (ahead) {
+      bearing = rows.getInt(1);
+      while (ahead && rows.getInt(1) == bearing) {
+        add();
+        ahead = rows.next();
       }
-      add(rows);
+      Optional<BearingDuty> duty = finishBearing();
+      if (duty.isPresent()) {
+        return duty.get();
+      }
     }
-    finishBearing();
+    return null;
   }
 
-  private void add(ResultSet rows) throws SQLException {
+  private void add() throws SQLException {
     int rowState = rows.getInt(3);
     ReadingState kind = ReadingState.of(rowState);
     long rowDay = rows.getLong(2);
     long rowReadings = rows.getLong(7);
     tally.add(rows.getInt(6), kind, rowDay / DAY_MS, rowReadings, rows.getLong(13));
-    if (!kind.isUsed()) {
+    if (!kind.isReading()) {
       dropped[rowState] += rowReadings;
       return;
     }
@@ -108,17 +113,16 @@ final class CellReader {
     speedMs = 0;
   }
 
-  private void finishBearing() {
+  private Optional<BearingDuty> finishBearing() {
     finishCell();
-    if (open && bearing > 0) {
-      BearingDuty duty =
-          new BearingDuty(bearings.get(bearing - 1).key(), cells.build(), droppedReadings());
-      if (duty.cells().size() > 0 || duty.dropped().total() > 0) {
-        use.accept(duty);
-      }
-    }
+    DutyCells built = cells.build();
+    DroppedReadings left = droppedReadings();
     cells = new DutyCells.Builder();
     dropped = new long[ReadingState.values().length];
+    if (bearing == 0 || (built.size() == 0 && left.total() == 0)) {
+      return Optional.empty();
+    }
+    return Optional.of(new BearingDuty(bearings.get(bearing - 1).key(), built, left));
   }
 
   private DroppedReadings droppedReadings() {

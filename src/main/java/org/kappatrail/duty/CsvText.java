@@ -8,6 +8,7 @@ import java.io.IOException;
 import java.io.InputStream;
 import java.io.InputStreamReader;
 import java.io.Reader;
+import java.io.UncheckedIOException;
 import java.nio.charset.Charset;
 import java.nio.charset.CodingErrorAction;
 import java.nio.charset.IllegalCharsetNameException;
@@ -53,9 +54,12 @@ final class CsvText {
     }
   }
 
-  /** The encoding that the settings name, else UTF-8. */
+  /** The encoding that the settings name, else what the byte order mark tells, else UTF-8. */
   static Charset charset(LogFile file) {
-    String name = file.mapping().encoding().orElse("UTF-8");
+    if (file.mapping().encoding().isEmpty()) {
+      return beginsLikeUtf16(file.path()) ? StandardCharsets.UTF_16 : StandardCharsets.UTF_8;
+    }
+    String name = file.mapping().encoding().get();
     try {
       return Charset.forName(name);
     } catch (IllegalCharsetNameException | UnsupportedCharsetException e) {
@@ -64,6 +68,16 @@ final class CsvText {
               + name
               + "' is not known; common ones are UTF-8, windows-1252 and UTF-16",
           e);
+    }
+  }
+
+  private static boolean beginsLikeUtf16(Path path) {
+    try (InputStream bytes = Files.newInputStream(path)) {
+      int first = bytes.read();
+      int second = bytes.read();
+      return (first == 0xFF && second == 0xFE) || (first == 0xFE && second == 0xFF);
+    } catch (IOException e) {
+      throw new UncheckedIOException(e);
     }
   }
 

@@ -46,7 +46,11 @@ final class DateFormatSql {
       return TimeSql.epoch("TRY_CAST(" + column + " AS DOUBLE)", format, place);
     }
     String specifiers = specifiers(format);
-    String parsed = "try_strptime(trim(" + column + "), " + SqlText.literal(specifiers) + ")";
+    String text = "trim(" + column + ")";
+    if (format.contains("X")) {
+      text = "regexp_replace(" + text + ", 'Z$', '+00')";
+    }
+    String parsed = "try_strptime(" + text + ", " + SqlText.literal(specifiers) + ")";
     return new TimeSql("epoch_ms(" + parsed + ")", specifiers.contains("%z") ? "TRUE" : "FALSE");
   }
 

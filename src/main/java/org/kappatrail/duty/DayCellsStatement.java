@@ -1,9 +1,5 @@
 package org.kappatrail.duty;
 
-import java.io.IOException;
-import java.io.InputStream;
-import java.io.UncheckedIOException;
-import java.nio.charset.StandardCharsets;
 import java.time.Instant;
 import java.time.LocalDate;
 import java.time.ZoneId;
@@ -16,7 +12,7 @@ import org.kappatrail.history.Settings;
 
 /** The statement that turns readings into day cells, the same for every engine. */
 final class DayCellsStatement {
-  private static final String TEXT = load();
+  private static final String TEXT = Resources.sql("day-cells.sql");
 
   /** Speeds above this are not speeds of a bearing, r/min. */
   private static final long FASTEST_RPM = 1_000_000;
@@ -63,19 +59,5 @@ final class DayCellsStatement {
     long step = Math.max(1, Math.round(nominal / 100));
     long standstill = (long) Math.floor(nominal * settings.duty().runningSpeedPercent() / 100);
     return "(" + key + ", " + step + ", " + standstill + ")";
-  }
-
-  private static String load() {
-    try (InputStream in = DayCellsStatement.class.getResourceAsStream("day-cells.sql")) {
-      if (in == null) {
-        throw new IllegalStateException("day-cells.sql is not on the class path");
-      }
-      return new String(in.readAllBytes(), StandardCharsets.UTF_8)
-          .lines()
-          .filter(line -> !line.startsWith("--"))
-          .collect(Collectors.joining("\n"));
-    } catch (IOException e) {
-      throw new UncheckedIOException(e);
-    }
   }
 }

@@ -90,6 +90,9 @@ final class DuckEngine implements AutoCloseable {
         "memory_limit = '" + options.memoryMib() + "MiB'",
         "temp_directory = " + SqlText.literal(work.path().toString()),
         "preserve_insertion_order = false",
+        // Nothing is known of the number of rows in a CSV file: left to itself the planner takes it
+        // for small and holds all readings in memory, to look the register up in them.
+        "disabled_optimizers = 'join_order,build_side_probe_side,in_clause'",
         "autoinstall_known_extensions = false",
         "autoload_known_extensions = false",
         "TimeZone = 'UTC'");

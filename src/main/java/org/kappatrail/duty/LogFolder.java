@@ -2,6 +2,7 @@ package org.kappatrail.duty;
 
 import java.io.IOException;
 import java.nio.file.FileSystems;
+import java.nio.file.FileVisitOption;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.PathMatcher;
@@ -20,6 +21,9 @@ import org.kappatrail.history.UnusableInputException;
 final class LogFolder {
   private static final String FOLDER = "temperatures";
   private static final int DEEPEST = 6;
+
+  /** One block for all files without one of their own, so that one scan reads them. */
+  private static final ExportMapping CANONICAL = ExportMapping.canonical(FOLDER + "/*");
 
   private final List<LogFile> files = new ArrayList<>();
   private final List<Problem> problems = new ArrayList<>();
@@ -41,7 +45,7 @@ final class LogFolder {
         matched[block] = true;
         add(new LogFile(name, entry.getValue(), blocks.get(block)));
       } else if (isDirectlyInFolder(name)) {
-        add(new LogFile(name, entry.getValue(), ExportMapping.canonical(name)));
+        add(new LogFile(name, entry.getValue(), CANONICAL));
       }
     }
     for (int block = 0; block < matched.length; block++) {
@@ -110,7 +114,7 @@ final class LogFolder {
     if (!Files.isDirectory(history)) {
       return found;
     }
-    try (Stream<Path> paths = Files.walk(history, DEEPEST)) {
+    try (Stream<Path> paths = Files.walk(history, DEEPEST, FileVisitOption.FOLLOW_LINKS)) {
       paths
           .filter(path -> !path.equals(history))
           .forEach(path -> found.put(relativeName(history, path), path));

@@ -8,9 +8,10 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 import org.kappatrail.history.ExportMapping;
+import org.kappatrail.history.ExportMapping.Tag;
 import org.kappatrail.history.UnusableInputException;
 
-/** Which column of a long-form table carries what. */
+/** Which column of a table of readings carries what. */
 final class LogLayout {
   static final String TIME = "time";
   static final String ASSET = "asset";
@@ -18,12 +19,35 @@ final class LogLayout {
   static final String TEMPERATURE = "temperature_c";
   static final String SPEED = "speed_rpm";
   static final String QUALITY = "quality";
+  static final String TAG = "tag";
+  static final String VALUE = "value";
 
   private static final List<String> CANONICAL =
-      List.of(TIME, ASSET, BEARING, TEMPERATURE, SPEED, QUALITY);
-  private static final List<String> REQUIRED = List.of(TIME, ASSET, BEARING, TEMPERATURE);
+      List.of(TIME, ASSET, BEARING, TEMPERATURE, SPEED, QUALITY, TAG, VALUE);
 
+  /** Forms of a table of readings. */
+  enum Form {
+    /** A row per reading. */
+    LONG,
+    /** A row per instant and a column per tag. */
+    WIDE,
+    /** A row per value, which names its tag. */
+    TAGGED;
+
+    private List<String> required() {
+      return switch (this) {
+        case LONG -> List.of(TIME, ASSET, BEARING, TEMPERATURE);
+        case WIDE -> List.of(TIME);
+        case TAGGED -> List.of(TIME, TAG, VALUE);
+      };
+    }
+  }
+
+  private final String name;
+  private final ExportMapping mapping;
+  private final Form form;
   private final Map<String, Integer> columns = new LinkedHashMap<>();
+  private final Map<Integer, Tag> tagColumns = new LinkedHashMap<>();
   private final List<String> unused = new ArrayList<>();
 
   /**
@@ -35,17 +59,84 @@ final class LogLayout {
    * @throws UnusableInputException where a required or mapped column is missing or stands twice
    */
   LogLayout(String name, List<String> header, ExportMapping mapping) {
-    Map<String, String> wanted = wanted(name, header, mapping);
-    for (int index = 0; index < header.size(); index++) {
-      String canonical = wanted.get(key(header.get(index)));
-      if (canonical == null || mapping.constants().containsKey(canonical)) {
-        unused.add(header.get(index));
-      } else if (columns.putIfAbsent(canonical, index) != null) {
-        throw new UnusableInputException(
-            name + ": two columns carry " + canonical + "; name one of them in columns: only");
-      }
+    this.name = name;
+    this.mapping = mapping;
+    Map<String, String> wanted = wanted(header);
+    boolean named = header.stream().anyMatch(column -> TAG.equals(wanted.get(key(column))));
+    form = mapping.tags().isEmpty() ? Form.LONG : named ? Form.TAGGED : Form.WIDE;
+    if (form == Form.TAGGED && !wanted.containsValue(VALUE)) {
+      wanted.replaceAll((column, meant) -> meant.equals(TEMPERATURE) ? VALUE : meant);
     }
-    for (String required : REQUIRED) {
+    for (int index = 0; index < header.size(); index++) {
+      place(header.get(index), index, wanted);
+    }
+    requireColumns(header);
+  }
+
+  Form form() {
+    return form;
+  }
+
+  /** Position of a canonical column; empty where the table has none. */
+  Optional<Integer> find(String canonical) {
+    return Optional.ofNullable(columns.get(canonical));
+  }
+
+  /** Wide form: position and tag of every column that is one. */
+  Map<Integer, Tag> tagColumns() {
+    return Map.copyOf(tagColumns);
+  }
+
+  /** The text that the settings give for every row. */
+  Optional<String> constant(String canonical) {
+    return Optional.ofNullable(mapping.constants().get(canonical));
+  }
+
+  /** Columns in which a row carries a quantity. */
+  List<Integer> places(String canonical, List<String> row) {
+    if (form == Form.WIDE && !canonical.equals(TIME)) {
+      return tagColumns.keySet().stream()
+          .filter(index -> label(tagColumns.get(index)).equals(canonical))
+          .toList();
+    }
+    if (form == Form.TAGGED && (canonical.equals(TEMPERATURE) || canonical.equals(SPEED))) {
+      String tag = find(TAG).filter(index -> index < row.size()).map(row::get).orElse("");
+      boolean meant = label(mapping.tags().get(tag.strip())).equals(canonical);
+      return meant ? List.of(find(VALUE).orElseThrow()) : List.of();
+    }
+    return find(canonical).map(List::of).orElse(List.of());
+  }
+
+  List<String> unused() {
+    return List.copyOf(unused);
+  }
+
+  private static String label(@org.jspecify.annotations.Nullable Tag tag) {
+    return tag == null ? "" : tag.quantity().label();
+  }
+
+  private void place(String column, int index, Map<String, String> wanted) {
+    Optional<Tag> tag = form == Form.WIDE ? tagOf(column) : Optional.empty();
+    String canonical = wanted.get(key(column));
+    if (tag.isPresent()) {
+      tagColumns.put(index, tag.get());
+    } else if (canonical == null || mapping.constants().containsKey(canonical)) {
+      unused.add(column);
+    } else if (columns.putIfAbsent(canonical, index) != null) {
+      throw new UnusableInputException(
+          name + ": two columns carry " + canonical + "; name one of them in columns: only");
+    }
+  }
+
+  private Optional<Tag> tagOf(String column) {
+    return mapping.tags().entrySet().stream()
+        .filter(entry -> key(entry.getKey()).equals(key(column)))
+        .map(Map.Entry::getValue)
+        .findFirst();
+  }
+
+  private void requireColumns(List<String> header) {
+    for (String required : form.required()) {
       if (!columns.containsKey(required) && !mapping.constants().containsKey(required)) {
         throw new UnusableInputException(
             name
@@ -56,19 +147,18 @@ final class LogLayout {
                 + "; add a temperatures: block with columns: to kappatrail.yaml");
       }
     }
+    boolean measures =
+        tagColumns.values().stream().anyMatch(tag -> tag.quantity() == Tag.Quantity.TEMPERATURE);
+    if (form == Form.WIDE && !measures) {
+      throw new UnusableInputException(
+          name
+              + ": no column is a temperature tag of the settings; it has "
+              + String.join(", ", header)
+              + "; correct tags: in kappatrail.yaml");
+    }
   }
 
-  /** Position of a canonical column; empty where the table has none. */
-  Optional<Integer> find(String canonical) {
-    return Optional.ofNullable(columns.get(canonical));
-  }
-
-  List<String> unused() {
-    return List.copyOf(unused);
-  }
-
-  private static Map<String, String> wanted(
-      String name, List<String> header, ExportMapping mapping) {
+  private Map<String, String> wanted(List<String> header) {
     Map<String, String> wanted = new TreeMap<>();
     for (Map.Entry<String, String> entry : mapping.columns().entrySet()) {
       String canonical = key(entry.getValue());
@@ -94,10 +184,11 @@ final class LogLayout {
         wanted.putIfAbsent(canonical, canonical);
       }
     }
+    wanted.keySet().removeIf(column -> header.stream().noneMatch(name -> key(name).equals(column)));
     return wanted;
   }
 
-  private static String key(String column) {
+  static String key(String column) {
     return column.strip().toLowerCase(Locale.ROOT);
   }
 }

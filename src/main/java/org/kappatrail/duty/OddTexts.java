@@ -15,7 +15,7 @@ import java.util.Map;
  */
 final class OddTexts {
   /** Stands between asset and bearing in the text of an unknown bearing. */
-  static final char BETWEEN = '\u001F';
+  static final char BETWEEN = '\u0001';
 
   private static final int MOST_TEXTS = 20_000;
 
@@ -25,7 +25,11 @@ final class OddTexts {
    * @param count rows
    * @param firstRow first row of a Parquet file; 0 in a CSV file
    */
-  record Occurrence(long count, long firstRow) {}
+  record Occurrence(long count, long firstRow) {
+    private Occurrence plus(Occurrence other) {
+      return new Occurrence(count + other.count, Math.min(firstRow, other.firstRow));
+    }
+  }
 
   private final Map<CellFault, Map<String, Occurrence>> texts = new EnumMap<>(CellFault.class);
 
@@ -34,8 +38,17 @@ final class OddTexts {
     return texts.getOrDefault(fault, Map.of());
   }
 
-  boolean isEmpty() {
-    return texts.isEmpty();
+  /** A text as it is looked for: readers of CSV differ in the blanks around it. */
+  static String key(String text) {
+    return text.strip();
+  }
+
+  /** The same texts but those of one kind. */
+  OddTexts without(CellFault fault) {
+    OddTexts rest = new OddTexts();
+    rest.texts.putAll(texts);
+    rest.texts.remove(fault);
+    return rest;
   }
 
   /**
@@ -60,7 +73,10 @@ final class OddTexts {
         CellFault fault = CellFault.valueOf(rows.getString(1));
         texts
             .computeIfAbsent(fault, key -> new LinkedHashMap<>())
-            .put(rows.getString(2), new Occurrence(rows.getLong(3), rows.getLong(4)));
+            .merge(
+                key(rows.getString(2)),
+                new Occurrence(rows.getLong(3), rows.getLong(4)),
+                Occurrence::plus);
       }
     }
   }
@@ -70,7 +86,7 @@ final class OddTexts {
     StringBuilder text = new StringBuilder("CASE fault");
     List<String> codes = new ArrayList<>();
     for (CellFault fault : CellFault.values()) {
-      if (fault.state().isUsed()) {
+      if (fault.state().isReading()) {
         continue;
       }
       int code = fault.state().code();

@@ -26,6 +26,9 @@ public record ReadingFates(String file, Map<ReadingState, Long> counts) {
   }
 
   public long used() {
-    return count(ReadingState.RUNNING) + count(ReadingState.STOPPED);
+    return counts.entrySet().stream()
+        .filter(entry -> entry.getKey().isUsed())
+        .mapToLong(Map.Entry::getValue)
+        .sum();
   }
 }

@@ -15,7 +15,8 @@ public enum ReadingState {
   STATUS_TEXT(10, "a text in place of the temperature"),
   TEMPERATURE_UNREADABLE(11, "temperature that is not a number"),
   IMPLAUSIBLE(12, "outside −40…200 °C"),
-  NEGATIVE_SPEED(13, "speed below 0");
+  NEGATIVE_SPEED(13, "speed below 0"),
+  JOINED(14, "used within another reading of the instant");
 
   private final int code;
   private final String label;
@@ -35,9 +36,14 @@ public enum ReadingState {
     return label;
   }
 
-  /** True where the reading counts. */
-  public boolean isUsed() {
+  /** True where it is a reading that counts. */
+  public boolean isReading() {
     return this == RUNNING || this == STOPPED;
+  }
+
+  /** True where the row is used, as a reading or as a part of one. */
+  public boolean isUsed() {
+    return isReading() || this == JOINED;
   }
 
   /** The state of a code of the statement. */

@@ -1,10 +1,10 @@
 package org.kappatrail.duty;
 
 import java.util.ArrayList;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
+import java.util.stream.Collectors;
 import org.kappatrail.history.BearingKey;
 import org.kappatrail.history.ExportMapping;
 import org.kappatrail.history.Problem;
@@ -13,15 +13,13 @@ import org.kappatrail.history.SourceLine;
 /** Gathers the problems of the readings: each cell by itself, or one row for cells of one text. */
 final class RejectedCells {
   private static final int MOST_PER_FILE = 1000;
+  private static final int MOST_NAMES = 10;
 
-  private record Unknown(SourceLine first, long count) {}
-
-  private final List<BearingKey> register;
   private final List<Problem> problems = new ArrayList<>();
-  private final Map<String, Unknown> unknownBearings = new LinkedHashMap<>();
+  private final UnknownBearings unknownBearings;
 
   RejectedCells(List<BearingKey> register) {
-    this.register = List.copyOf(register);
+    this.unknownBearings = new UnknownBearings(register);
   }
 
   /**
@@ -32,6 +30,14 @@ final class RejectedCells {
    * @param unreadable cells that are listed one by one, as the statement counted them
    */
   void add(LogTable table, LogLayout layout, OddTexts odd, long unreadable) {
+    if (layout.form() == LogLayout.Form.TAGGED && !odd.of(CellFault.BEARING).isEmpty()) {
+      problems.add(unknownTags(table, odd.of(CellFault.BEARING)));
+      odd = odd.without(CellFault.BEARING);
+    }
+    addCells(table, layout, odd, unreadable);
+  }
+
+  private void addCells(LogTable table, LogLayout layout, OddTexts odd, long unreadable) {
     if (table.file().format() == LogFile.Format.PARQUET) {
       addTexts(table, odd);
       return;
@@ -39,9 +45,9 @@ final class RejectedCells {
     int[] listed = {0};
     new CellFinder(table, layout, odd)
         .find(
-            (fault, text, occurrence, line) -> {
+            (fault, column, text, occurrence, line) -> {
               if (fault.isSummed() || listed[0] < MOST_PER_FILE) {
-                add(table, fault, text, occurrence, line);
+                add(table, fault, column, text, occurrence, line);
               }
               listed[0] += fault.isSummed() ? 0 : 1;
             });
@@ -52,14 +58,15 @@ final class RejectedCells {
               new SourceLine(table.file().name(), 0),
               "",
               "",
-              String.format(Locale.ROOT, "%,d further cells of this file cannot be read", rest)));
+              String.format(
+                  Locale.ROOT, "further cells of this file that cannot be read: %,d", rest)));
     }
   }
 
   /** All problems; call it once, after the last file. */
   List<Problem> problems() {
     List<Problem> all = new ArrayList<>(problems);
-    unknownBearings.forEach((text, unknown) -> all.add(unknownBearing(text, unknown)));
+    all.addAll(unknownBearings.problems());
     all.sort(null);
     return all;
   }
@@ -70,39 +77,48 @@ final class RejectedCells {
           .limit(MOST_PER_FILE)
           .forEach(
               entry ->
-                  add(table, fault, entry.getKey(), entry.getValue(), entry.getValue().firstRow()));
+                  add(
+                      table,
+                      fault,
+                      fault.column(),
+                      entry.getKey(),
+                      entry.getValue(),
+                      entry.getValue().firstRow()));
     }
   }
 
   private void add(
-      LogTable table, CellFault fault, String text, OddTexts.Occurrence occurrence, long line) {
+      LogTable table,
+      CellFault fault,
+      String column,
+      String text,
+      OddTexts.Occurrence occurrence,
+      long line) {
     ExportMapping mapping = table.file().mapping();
     SourceLine source = new SourceLine(table.file().name(), line);
     if (fault == CellFault.BEARING && text.indexOf('\n') < 0) {
-      unknownBearings.merge(
-          text,
-          new Unknown(source, occurrence.count()),
-          (first, next) -> new Unknown(first.first(), first.count() + next.count()));
+      unknownBearings.add(text.replace(OddTexts.BETWEEN, '/'), source, occurrence.count());
       return;
     }
     problems.add(
-        new Problem(
-            source, fault.column(), text, fault.explain(text, occurrence.count(), mapping)));
+        new Problem(source, column, text, fault.explain(text, occurrence.count(), mapping)));
   }
 
-  private Problem unknownBearing(String text, Unknown unknown) {
-    String name = text.replace(OddTexts.BETWEEN, '/');
-    String nearest =
-        NearestName.of(name, register.stream().map(BearingKey::toString).toList())
-            .map(known -> "; the nearest name there is '" + known + "'")
-            .orElse("");
-    String remedy = "; correct bearings.csv or the log";
+  private static Problem unknownTags(LogTable table, Map<String, OddTexts.Occurrence> tags) {
+    long readings = tags.values().stream().mapToLong(OddTexts.Occurrence::count).sum();
+    String names =
+        tags.keySet().stream()
+            .map(tag -> tag.replace(String.valueOf(OddTexts.BETWEEN), ""))
+            .limit(MOST_NAMES)
+            .collect(Collectors.joining(", "));
     return new Problem(
-        unknown.first(),
-        LogLayout.BEARING,
-        name,
-        CellFault.BEARING.explain(name, unknown.count(), ExportMapping.canonical("*"))
-            + nearest
-            + remedy);
+        new SourceLine(table.file().name(), 0),
+        LogLayout.TAG,
+        names,
+        String.format(
+            Locale.ROOT,
+            "%,d values of %,d tags that the settings do not name; add to tags: what is wanted",
+            readings,
+            tags.size()));
   }
 }

@@ -2,8 +2,10 @@ package org.kappatrail.duty;
 
 import java.time.LocalDate;
 import java.util.EnumMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import org.kappatrail.history.FileAccount;
 
 /** Counts what became of the readings, source by source. */
 final class Tally {
@@ -24,10 +26,14 @@ final class Tally {
   void add(int source, ReadingState state, long epochDay, long readings, long flawed) {
     counts[source][state.code()] += readings;
     flaws[source] += flawed;
-    if (state.isUsed()) {
+    if (state.isReading()) {
       firstDay[source] = Math.min(firstDay[source], epochDay);
       lastDay[source] = Math.max(lastDay[source], epochDay);
     }
+  }
+
+  int sources() {
+    return counts.length;
   }
 
   long count(int source, ReadingState state) {
@@ -49,15 +55,38 @@ final class Tally {
     return byState;
   }
 
-  Optional<LocalDate> from(int source) {
-    return firstDay[source] == Long.MAX_VALUE
-        ? Optional.empty()
-        : Optional.of(LocalDate.ofEpochDay(firstDay[source]));
+  /** True where a file has cells that are to be reported. */
+  boolean hasOddCells(int source) {
+    boolean odd = flaws[source] > 0;
+    for (CellFault fault : CellFault.values()) {
+      odd |= !fault.state().isReading() && count(source, fault.state()) > 0;
+    }
+    return odd;
   }
 
-  Optional<LocalDate> to(int source) {
-    return lastDay[source] == Long.MIN_VALUE
+  /** Rows that are reported one by one. */
+  long unreadable(int source) {
+    return count(source, ReadingState.TIME_UNREADABLE)
+        + count(source, ReadingState.TOO_MANY_CELLS)
+        + count(source, ReadingState.TEMPERATURE_UNREADABLE);
+  }
+
+  /** The account of a file. */
+  FileAccount account(int source, ReadingFates fate, List<String> unusedColumns) {
+    return new FileAccount(
+        fate.file(),
+        FileAccount.Kind.TEMPERATURES,
+        fate.total(),
+        fate.used(),
+        fate.total() - fate.used(),
+        day(firstDay[source]),
+        day(lastDay[source]),
+        unusedColumns);
+  }
+
+  private static Optional<LocalDate> day(long epochDay) {
+    return epochDay == Long.MAX_VALUE || epochDay == Long.MIN_VALUE
         ? Optional.empty()
-        : Optional.of(LocalDate.ofEpochDay(lastDay[source]));
+        : Optional.of(LocalDate.ofEpochDay(epochDay));
   }
 }

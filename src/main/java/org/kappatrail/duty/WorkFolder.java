@@ -92,12 +92,22 @@ final class WorkFolder implements AutoCloseable {
     }
   }
 
+  /**
+   * The lock goes last, so that a folder which cannot be emptied is still known to the next run.
+   */
   private static void remove(Path folder) {
+    Path lock = folder.resolve(LOCK);
     try (Stream<Path> paths = Files.walk(folder)) {
-      List<Path> deepestFirst = paths.sorted(Comparator.reverseOrder()).toList();
+      List<Path> deepestFirst =
+          paths
+              .filter(path -> !path.equals(lock) && !path.equals(folder))
+              .sorted(Comparator.reverseOrder())
+              .toList();
       for (Path each : deepestFirst) {
         Files.deleteIfExists(each);
       }
+      Files.deleteIfExists(lock);
+      Files.deleteIfExists(folder);
     } catch (IOException | UncheckedIOException e) {
       // The next run finds the lock unheld and tries again.
       return;

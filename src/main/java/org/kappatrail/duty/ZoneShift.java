@@ -15,6 +15,9 @@ import java.util.List;
  * ZoneRules} from 1970 to the end of the span; later instants keep the last one.
  */
 final class ZoneShift {
+  /** Transitions of about four years. */
+  private static final int RECENT = 8;
+
   private record Step(long fromMs, long offsetMs) {}
 
   private final ZoneRules rules;
@@ -36,7 +39,7 @@ final class ZoneShift {
       steps.add(
           new Step(transition.getInstant().toEpochMilli(), millis(transition.getOffsetAfter())));
     }
-    return tree(column, first(), steps);
+    return recentFirst(column, first(), steps);
   }
 
   /**
@@ -54,7 +57,7 @@ final class ZoneShift {
           new Step(
               from.toInstant(ZoneOffset.UTC).toEpochMilli(), millis(transition.getOffsetAfter())));
     }
-    return tree(column, first(), steps);
+    return recentFirst(column, first(), steps);
   }
 
   private long first() {
@@ -65,21 +68,34 @@ final class ZoneShift {
     return offset.getTotalSeconds() * 1000L;
   }
 
-  /** A binary tree of comparisons: few per reading, however many years the zone's rules fill. */
-  private static String tree(String column, long before, List<Step> steps) {
+  /**
+   * A tree of comparisons, halved at every step, but for the first one: most readings are of the
+   * last years, which therefore have a shallow tree of their own.
+   */
+  private static String recentFirst(String column, long before, List<Step> steps) {
+    int older = steps.size() - RECENT;
+    return older <= 0
+        ? tree(column, before, steps, steps.size() / 2)
+        : tree(column, before, steps, older);
+  }
+
+  private static String tree(String column, long before, List<Step> steps, int middle) {
     if (steps.isEmpty()) {
       return Long.toString(before);
     }
-    int middle = steps.size() / 2;
     Step step = steps.get(middle);
     return "CASE WHEN "
         + column
         + " < "
         + step.fromMs()
         + " THEN "
-        + tree(column, before, steps.subList(0, middle))
+        + tree(column, before, steps.subList(0, middle), middle / 2)
         + " ELSE "
-        + tree(column, step.offsetMs(), steps.subList(middle + 1, steps.size()))
+        + tree(
+            column,
+            step.offsetMs(),
+            steps.subList(middle + 1, steps.size()),
+            (steps.size() - middle - 1) / 2)
         + " END";
   }
 }

@@ -12,7 +12,7 @@
 -- {day_shift}: milliseconds from UTC to local time at instant_ms
 --
 -- State codes are those of ReadingState: 0 running, 1 stopped, 2 repeated, 3 later than the review,
--- 4 to 6 not to be placed, above: dropped. Dropped readings have their own partition, so that the
+-- 4 to 6 not to be placed, 14 used within another reading, else dropped. Dropped readings have their own partition, so that the
 -- reading before one counts to the next good one; they take part only to be counted.
 WITH register (bearing, speed_step, standstill) AS (VALUES {register}),
 judged AS (

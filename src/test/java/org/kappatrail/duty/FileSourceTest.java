@@ -26,7 +26,7 @@ import org.kappatrail.history.Settings;
 /**
  * Cells against loops over the raw readings; no outside source, the method's text is the measure.
  */
-class FileDutyLogTest {
+class FileSourceTest {
   private static final List<Bearing> BEARINGS =
       List.of(
           Plant.bearing("Winder", "DE", 1480),
