@@ -8,7 +8,7 @@ public final class Autocorrelation {
   /**
    * Autocorrelations at lags 1 to {@code lags}, the first at index 0: products over the n − j pairs
    * against squares over all n, times n/(n − j) (Pyper and Peterman, Can. J. Fish. Aquat. Sci. 55
-   * (1998) 2127–2140, eq. 7). All 0 for a constant series, which has none. NaN is refused.
+   * (1998) 2127–2140). All 0 for a constant series, which has none. NaN is refused.
    *
    * @param lags 0 to one less than the number of values
    */

@@ -1,5 +1,6 @@
 package org.kappatrail.statistics;
 
+import java.util.Arrays;
 import org.apache.commons.math3.stat.ranking.NaNStrategy;
 import org.apache.commons.math3.stat.ranking.NaturalRanking;
 import org.apache.commons.math3.stat.ranking.TiesStrategy;
@@ -10,14 +11,15 @@ public final class AverageRanks {
   private AverageRanks() {}
 
   /**
-   * Ranks in the order of the values. No values give no ranks; all equal give (n + 1)/2 each. NaN
-   * is refused.
+   * Ranks in the order of the values. No values give no ranks; all equal give (n + 1)/2 each; 0 and
+   * −0 are equal. NaN is refused.
    */
   public static double[] rank(double[] values) {
     Inputs.requireFinite(values, "values");
     if (values.length == 0) {
       return new double[0];
     }
-    return new NaturalRanking(NaNStrategy.FAILED, TiesStrategy.AVERAGE).rank(values);
+    double[] oneZero = Arrays.stream(values).map(value -> value + 0.0).toArray();
+    return new NaturalRanking(NaNStrategy.FAILED, TiesStrategy.AVERAGE).rank(oneZero);
   }
 }

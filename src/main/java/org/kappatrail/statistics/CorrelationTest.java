@@ -45,8 +45,8 @@ public record CorrelationTest(
 
   /**
    * As {@link #of}, for a rank correlation of n pairs: p is never below 2/n!, the share of the
-   * orders of n ranks that agree perfectly, up or down. It matters up to seven pairs or so; without
-   * it every perfect order of three would have p = 0.
+   * orders of n ranks that agree perfectly, up or down. Without it every perfect order of three or
+   * four would have p = 0.
    *
    * @param n pairs in all, not the effective number
    */
@@ -55,6 +55,15 @@ public record CorrelationTest(
     double least = Math.min(1, 2 * Math.exp(-Gamma.logGamma(n + 1.0)));
     return new CorrelationTest(
         coefficient, nEffective, Math.max(least, plain.p), plain.low, plain.high);
+  }
+
+  /**
+   * As {@link #ofRanks}, for residuals from each one's fitted line: the slope has spent one of the
+   * n, so p is never below 2/(n − 1)! (this tool's convention). Residuals of four or five points
+   * agree perfectly far too often to be called.
+   */
+  public static CorrelationTest ofDetrendedRanks(double coefficient, double nEffective, int n) {
+    return ofRanks(coefficient, nEffective, Math.max(0, n - 1));
   }
 
   /**

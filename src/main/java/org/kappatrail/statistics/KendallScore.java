@@ -5,7 +5,7 @@ import java.util.Arrays;
 /**
  * Kendall's score S = Σ sign(xj − xi) sign(yj − yi) over all pairs and its variance under
  * independence, with ties in either variable (Kendall, Rank Correlation Methods, 4th ed. 1970, ch.
- * 4; for ties in y alone it is the Mann–Kendall variance of Gilbert 1987, eq. 16.2).
+ * 4; for ties in y alone it is the Mann–Kendall variance of Gilbert 1987, 16.4).
  */
 record KendallScore(long s, double variance, boolean tied) {
 

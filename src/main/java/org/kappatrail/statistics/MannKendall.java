@@ -8,7 +8,7 @@ import org.apache.commons.math3.distribution.NormalDistribution;
  * Mann–Kendall test for a monotonic trend. Exact up to ten values without ties, by counting the
  * orders that give each score; else the normal form with the tie-corrected variance and a
  * continuity correction of one. Sources: Mann, Econometrica 13 (1945) 245–259; Kendall, Rank
- * Correlation Methods (1970); Gilbert (1987) 16.4; US EPA Unified Guidance (2009) 17.3.1.
+ * Correlation Methods (1970); Gilbert (1987) 16.4; US EPA Unified Guidance (2009) 17.3.
  */
 public final class MannKendall {
 

@@ -12,7 +12,7 @@ import org.apache.commons.math3.distribution.NormalDistribution;
  * <p>Limits: with N′ slopes in order and C = z·√Var(S) of the tie-corrected Mann–Kendall score, the
  * slopes of rank M1 = (N′ − C)/2 and M2 + 1 = (N′ + C)/2 + 1, interpolated linearly between ranks.
  * Sources: Sen, JASA 63 (1968) 1379–1389; Gilbert, Statistical Methods for Environmental Pollution
- * Monitoring (1987) 16.5; US EPA Unified Guidance (2009) 17.3.2 and example 17-6.
+ * Monitoring (1987) 16.5; US EPA Unified Guidance (2009) 17.3, example 17-6.
  */
 public final class TheilSen {
 
