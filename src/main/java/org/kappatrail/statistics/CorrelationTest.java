@@ -44,26 +44,33 @@ public record CorrelationTest(
   }
 
   /**
-   * As {@link #of}, for a rank correlation of n pairs: p is never below 2/n!, the share of the
-   * orders of n ranks that agree perfectly, up or down. Without it every perfect order of three or
-   * four would have p = 0.
-   *
-   * @param n pairs in all, not the effective number
+   * As {@link #of}, for a rank correlation: p is never below 2/N*!, the share of the orders of N*
+   * ranks that agree perfectly, up or down (Γ(N* + 1) for N* between whole numbers). For N* = n it
+   * is the least p that n ranks without ties can give; taking it at N* is this tool's convention.
+   * Without it every perfect order would have p = 0, also that of two series which merely both fall
+   * and are worth four pairs however many samples they have.
    */
-  public static CorrelationTest ofRanks(double coefficient, double nEffective, int n) {
-    CorrelationTest plain = of(coefficient, nEffective);
-    double least = Math.min(1, 2 * Math.exp(-Gamma.logGamma(n + 1.0)));
-    return new CorrelationTest(
-        coefficient, nEffective, Math.max(least, plain.p), plain.low, plain.high);
+  public static CorrelationTest ofRanks(double coefficient, double nEffective) {
+    return notBelow(leastOfRanks(nEffective), of(coefficient, nEffective));
   }
 
   /**
-   * As {@link #ofRanks}, for residuals from each one's fitted line: the slope has spent one of the
-   * n, so p is never below 2/(n − 1)! (this tool's convention). Residuals of four or five points
+   * As {@link #ofRanks}, for residuals from each one's fitted line: the slope has spent one pair,
+   * so p is never below 2/(N* − 1)! (this tool's convention, after Fisher's rule that a correlation
+   * with one variable taken out counts as one of a pair fewer). Residuals of five points or fewer
    * agree perfectly far too often to be called.
    */
-  public static CorrelationTest ofDetrendedRanks(double coefficient, double nEffective, int n) {
-    return ofRanks(coefficient, nEffective, Math.max(0, n - 1));
+  public static CorrelationTest ofDetrendedRanks(double coefficient, double nEffective) {
+    return notBelow(leastOfRanks(Math.max(0, nEffective - 1)), of(coefficient, nEffective));
+  }
+
+  private static double leastOfRanks(double pairs) {
+    return Math.min(1, 2 * Math.exp(-Gamma.logGamma(pairs + 1)));
+  }
+
+  private static CorrelationTest notBelow(double least, CorrelationTest plain) {
+    return new CorrelationTest(
+        plain.coefficient, plain.nEffective, Math.max(least, plain.p), plain.low, plain.high);
   }
 
   /**

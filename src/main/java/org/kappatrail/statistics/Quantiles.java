@@ -18,7 +18,7 @@ public final class Quantiles {
 
   /** Middle value, or the mean of the two middle values. */
   public static OptionalDouble median(double[] values) {
-    return linear(values, 0.5);
+    return quantileType7(values, 0.5);
   }
 
   /**
@@ -27,7 +27,7 @@ public final class Quantiles {
    *
    * @param p 0 (least value) to 1 (greatest value)
    */
-  public static OptionalDouble linear(double[] values, double p) {
+  public static OptionalDouble quantileType7(double[] values, double p) {
     Inputs.requireFinite(values, "values");
     requireProbability(p);
     if (values.length == 0) {

@@ -4,6 +4,8 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatIllegalArgumentException;
 import static org.assertj.core.api.Assertions.within;
 
+import java.util.Arrays;
+import java.util.stream.IntStream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
@@ -65,14 +67,39 @@ class CorrelationTestTest {
   @ParameterizedTest
   @CsvSource({"3, 0.333333", "4, 0.0833333", "5, 0.0166667", "6, 0.00277778"})
   void perfectOrderOfFewRanksIsNoRarerThanChanceMakesIt(int n, double p) {
-    assertThat(CorrelationTest.ofRanks(1, n, n).p()).isCloseTo(p, within(Published.halfUnit(p, 6)));
-    assertThat(CorrelationTest.ofDetrendedRanks(1, n + 1.0, n + 1).p())
-        .isEqualTo(CorrelationTest.ofRanks(1, n, n).p());
+    assertThat(CorrelationTest.ofRanks(1, n).p()).isCloseTo(p, within(Published.halfUnit(p, 6)));
+    assertThat(CorrelationTest.ofDetrendedRanks(1, n + 1.0).p())
+        .isEqualTo(CorrelationTest.ofRanks(1, n).p());
+  }
+
+  /** Γ(5.5) = 945 √π / 32. */
+  @Test
+  void rankBoundHoldsBetweenWholeNumbers() {
+    assertThat(CorrelationTest.ofRanks(-1, 4.5).p())
+        .isCloseTo(2 * 32 / (945 * Math.sqrt(Math.PI)), within(1e-14));
+  }
+
+  @Test
+  void twoSeriesThatMerelyBothAgeAreNoCertaintyHoweverManySamples() {
+    double[] rising = IntStream.rangeClosed(1, 24).asDoubleStream().toArray();
+    double[] falling = Arrays.stream(rising).map(rank -> 25 - rank).toArray();
+    double nEffective = EffectiveSampleSize.pyperPeterman(rising, falling);
+    CorrelationTest test = CorrelationTest.ofRanks(-1, nEffective);
+    assertThat(nEffective).isBetween(4.0, 5.0);
+    assertThat(test.p()).isBetween(2.0 / 120, 2.0 / 24);
+  }
+
+  @ParameterizedTest
+  @ValueSource(doubles = {0, 1, 2})
+  void twoRanksOrFewerProveNothing(double nEffective) {
+    assertThat(CorrelationTest.ofRanks(1, nEffective).p()).isEqualTo(1);
+    assertThat(CorrelationTest.ofDetrendedRanks(1, nEffective).p()).isEqualTo(1);
   }
 
   @Test
   void aLargerProbabilityIsNotTouchedByTheRankBound() {
-    assertThat(CorrelationTest.ofRanks(0.5, 10, 10)).isEqualTo(CorrelationTest.of(0.5, 10));
+    assertThat(CorrelationTest.ofRanks(0.5, 10)).isEqualTo(CorrelationTest.of(0.5, 10));
+    assertThat(CorrelationTest.ofDetrendedRanks(0.5, 10)).isEqualTo(CorrelationTest.of(0.5, 10));
   }
 
   @ParameterizedTest

@@ -39,7 +39,7 @@ class MissingValuesTest {
     byName.put("false discovery", (x, y) -> both(x, y, BenjaminiHochberg::adjust));
     byName.put("residuals", Detrend::residuals);
     byName.put("median", (x, y) -> both(x, y, Quantiles::median));
-    byName.put("linear quantile", (x, y) -> both(x, y, v -> Quantiles.linear(v, 0.9)));
+    byName.put("type 7 quantile", (x, y) -> both(x, y, v -> Quantiles.quantileType7(v, 0.9)));
     byName.put("weighted median", Quantiles::weightedMedian);
     byName.put("median absolute deviation", (x, y) -> both(x, y, RobustScale::mad));
     return byName.entrySet().stream().map(e -> Arguments.of(e.getKey(), e.getValue()));

@@ -15,7 +15,16 @@ import java.util.stream.IntStream;
 record Published(List<String> columns, List<List<String>> rows) {
 
   static Published table(String file) {
-    try (InputStream in = Published.class.getResourceAsStream("/published/" + file)) {
+    return read("/published/" + file);
+  }
+
+  /** A table of this project's own seeded simulations, kept so that a change of a figure shows. */
+  static Published study(String file) {
+    return read("/studies/" + file);
+  }
+
+  private static Published read(String resource) {
+    try (InputStream in = Published.class.getResourceAsStream(resource)) {
       List<List<String>> lines =
           new String(in.readAllBytes(), StandardCharsets.UTF_8)
               .lines()

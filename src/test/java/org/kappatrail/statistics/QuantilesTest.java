@@ -17,17 +17,17 @@ class QuantilesTest {
   @Test
   void quantilesAndScaleAgreeWithTheStatisticsPackage() {
     assertThat(Quantiles.median(Y)).hasValue(EXPECTED.get("median"));
-    assertThat(Quantiles.linear(X, 0.05).orElseThrow())
+    assertThat(Quantiles.quantileType7(X, 0.05).orElseThrow())
         .isCloseTo(EXPECTED.get("q05"), within(1e-12));
-    assertThat(Quantiles.linear(X, 0.90).orElseThrow())
+    assertThat(Quantiles.quantileType7(X, 0.90).orElseThrow())
         .isCloseTo(EXPECTED.get("q90"), within(1e-12));
     assertThat(RobustScale.mad(X).orElseThrow()).isCloseTo(EXPECTED.get("mad"), within(1e-12));
   }
 
   @Test
   void endsOfTheLinearQuantileAreLeastAndGreatest() {
-    assertThat(Quantiles.linear(new double[] {3, 1, 2}, 0)).hasValue(1);
-    assertThat(Quantiles.linear(new double[] {3, 1, 2}, 1)).hasValue(3);
+    assertThat(Quantiles.quantileType7(new double[] {3, 1, 2}, 0)).hasValue(1);
+    assertThat(Quantiles.quantileType7(new double[] {3, 1, 2}, 1)).hasValue(3);
   }
 
   @Test
@@ -37,11 +37,11 @@ class QuantilesTest {
     assertThat(RobustScale.mad(none)).isEmpty();
     assertThat(Quantiles.weightedMedian(none, none)).isEmpty();
     double[] one = {4};
-    assertThat(Quantiles.linear(one, 0.9)).hasValue(4);
+    assertThat(Quantiles.quantileType7(one, 0.9)).hasValue(4);
     assertThat(RobustScale.mad(one)).hasValue(0);
     assertThat(Quantiles.weightedQuantile(one, one, 0.9)).hasValue(4);
     double[] equal = {0.1, 0.1, 0.1};
-    assertThat(Quantiles.linear(equal, 0.3)).hasValue(0.1);
+    assertThat(Quantiles.quantileType7(equal, 0.3)).hasValue(0.1);
     assertThat(RobustScale.mad(equal)).hasValue(0);
     assertThat(Quantiles.weightedMedian(equal, new double[] {1, 2, 3})).hasValue(0.1);
   }
@@ -79,7 +79,7 @@ class QuantilesTest {
         .isThrownBy(() -> Quantiles.weightedMedian(new double[] {1}, new double[] {-1}))
         .withMessageContaining("a weight is -1.0");
     assertThatIllegalArgumentException()
-        .isThrownBy(() -> Quantiles.linear(new double[] {1}, 95))
+        .isThrownBy(() -> Quantiles.quantileType7(new double[] {1}, 95))
         .withMessageContaining("p is 95.0");
   }
 }

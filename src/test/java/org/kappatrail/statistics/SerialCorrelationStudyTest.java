@@ -1,34 +1,20 @@
 package org.kappatrail.statistics;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.within;
 
 import java.util.Arrays;
+import java.util.List;
 import java.util.Random;
 import org.junit.jupiter.api.Tag;
+import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
-import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.MethodSource;
 
 /**
  * How often the rank correlation test at 5 % calls a link between two AR(1) series that have none,
  * and between two whose innovations correlate at 0.6. Seeded; the standard error of a rate of 5 %
- * is 0.2 points. Percent called, no link / linked:
- *
- * <pre>
- *                 all pairs     N* as         N* of residuals  N* of residuals
- *   n   φ        independent   measured      without + 2/N    with + 2/N
- *   8   0         5.8 / 32.3    3.7 / 24.0    5.1 / 22.4       6.3 / 27.2
- *   8   0.5       8.6 / 35.6    4.8 / 25.7    8.8 / 29.5       6.7 / 26.8
- *   8   0.8      13.9 / 38.8    5.3 / 24.6    9.9 / 31.2       6.4 / 25.8
- *  12   0         5.1 / 50.8    3.6 / 42.6    4.2 / 39.2       5.1 / 43.3
- *  12   0.5       9.7 / 51.1    5.2 / 39.8    6.9 / 42.8       5.5 / 39.7
- *  12   0.8      18.7 / 53.8    5.3 / 34.5    9.6 / 42.6       5.7 / 36.3
- *  24   0         4.9 / 85.6    3.9 / 82.8    4.4 / 80.6       4.7 / 81.7
- *  24   0.5      10.7 / 81.0    5.0 / 71.8    6.4 / 73.1       5.3 / 71.6
- *  24   0.8      26.4 / 74.4    5.6 / 51.3    9.8 / 62.0       6.4 / 56.2
- *  60   0         5.2 / 99.8    4.5 / 99.8    4.6 / 99.8       4.7 / 99.8
- *  60   0.5      11.5 / 99.2    5.1 / 97.9    5.4 / 97.9       5.0 / 97.8
- *  60   0.8      32.9 / 94.6    5.6 / 79.0    7.3 / 82.7       6.0 / 81.3
- * </pre>
+ * is 0.2 points. All figures stand in {@code studies/serial_correlation.csv}.
  */
 @Tag("slow")
 class SerialCorrelationStudyTest {
@@ -36,42 +22,54 @@ class SerialCorrelationStudyTest {
   private static final int PAIRS = 10_000;
   private static final double LINK = 0.6;
 
-  @ParameterizedTest
-  @CsvSource({
-    "0.0, 8", "0.5, 8", "0.8, 8", "0.0, 12", "0.5, 12", "0.8, 12", "0.0, 24", "0.5, 24", "0.8, 24",
-    "0.0, 60", "0.5, 60", "0.8, 60"
-  })
-  void falseCallsStayNearFivePercentAsMeasuredAndDetrended(double phi, int n) {
+  static List<List<String>> cases() {
+    return Published.study("serial_correlation.csv").rows();
+  }
+
+  @ParameterizedTest(name = "n, φ, rates {0}")
+  @MethodSource("cases")
+  void falseCallsStayNearFivePercentAsMeasuredAndDetrended(List<String> row) {
+    int n = Integer.parseInt(row.get(0));
+    double phi = Double.parseDouble(row.get(1));
     Rates none = Rates.of(phi, n, 0);
     Rates linked = Rates.of(phi, n, LINK);
-    assertThat(none.measured).isBetween(3.0, 8.0);
-    assertThat(none.detrended).isBetween(3.0, 8.0);
-    assertThat(linked.detrended)
-        .as("power lost by detrending, of %s against %s", linked, none)
-        .isGreaterThan(linked.measured - 4);
-    if (phi >= 0.5) {
-      assertThat(none.naive).as("all pairs taken as independent").isGreaterThan(8);
+
+    double[] stated = row.stream().skip(2).mapToDouble(Double::parseDouble).toArray();
+    double[] found = {
+      none.naive, linked.naive,
+      none.measured, linked.measured,
+      none.residualsPlain, linked.residualsPlain,
+      none.residuals, linked.residuals
+    };
+    assertThat(found).containsExactly(stated, within(0.005));
+
+    assertThat(none.measured).isLessThan(8);
+    assertThat(none.residuals).isLessThan(8);
+    if (n >= 8) {
+      assertThat(none.measured).isGreaterThan(3);
+      assertThat(none.residuals).isGreaterThan(3);
+      assertThat(linked.residuals)
+          .as("power of the residuals against that of the values")
+          .isGreaterThan(linked.measured - 4);
     }
   }
 
-  /** What the correction for the fitted line is for. */
-  @ParameterizedTest
-  @CsvSource({"0.8, 12", "0.8, 24"})
-  void plainEffectiveSizeOfResidualsCallsTooOften(double phi, int n) {
-    assertThat(Rates.of(phi, n, 0).detrendedPlain).isGreaterThan(8);
-  }
-
-  /** Residuals of four or five points agree perfectly by chance; no such pair may be called. */
-  @ParameterizedTest
-  @CsvSource({"0.0, 4", "0.8, 4", "0.0, 5", "0.8, 5", "0.0, 6", "0.8, 6"})
-  void fewPointsAreNotCalledMoreOftenThanMany(double phi, int n) {
-    Rates none = Rates.of(phi, n, 0);
-    assertThat(none.measured).isLessThan(8);
-    assertThat(none.detrended).isLessThan(8);
+  /** What the two corrections are for; the figures are those held above. */
+  @Test
+  void withoutCorrectionStronglyCarriedOverSeriesAreCalledTooOften() {
+    List<List<String>> strong =
+        cases().stream()
+            .filter(row -> row.get(0).matches("12|24") && Double.parseDouble(row.get(1)) >= 0.8)
+            .toList();
+    assertThat(strong).hasSize(4);
+    for (List<String> row : strong) {
+      assertThat(Double.parseDouble(row.get(2))).as("naive, %s", row).isGreaterThan(15);
+      assertThat(Double.parseDouble(row.get(6))).as("residuals plain, %s", row).isGreaterThan(8);
+    }
   }
 
   /** Called at p ≤ 0.05, percent of pairs. */
-  private record Rates(double naive, double measured, double detrendedPlain, double detrended) {
+  private record Rates(double naive, double measured, double residualsPlain, double residuals) {
 
     static Rates of(double phi, int n, double link) {
       Random random = new Random(1998L * n + Math.round(100 * phi) + Math.round(1e6 * link));
@@ -82,16 +80,15 @@ class SerialCorrelationStudyTest {
         double[][] xy = autoregressivePair(random, phi, n, link);
         double[] rankX = AverageRanks.rank(xy[0]);
         double[] rankY = AverageRanks.rank(xy[1]);
-        double rho = Spearman.rho(xy[0], xy[1]).orElseThrow();
+        double rho = Pearson.r(rankX, rankY).orElseThrow();
         double[] leftX = AverageRanks.rank(Detrend.residuals(t, xy[0]).orElseThrow());
         double[] leftY = AverageRanks.rank(Detrend.residuals(t, xy[1]).orElseThrow());
-        double left = Spearman.rho(leftX, leftY).orElseThrow();
+        double left = Pearson.r(leftX, leftY).orElseThrow();
         CorrelationTest[] tests = {
-          CorrelationTest.ofRanks(rho, n, n),
-          CorrelationTest.ofRanks(rho, EffectiveSampleSize.pyperPeterman(rankX, rankY), n),
-          CorrelationTest.ofDetrendedRanks(
-              left, EffectiveSampleSize.pyperPeterman(leftX, leftY), n),
-          CorrelationTest.ofDetrendedRanks(left, EffectiveSampleSize.detrended(leftX, leftY), n)
+          CorrelationTest.ofRanks(rho, n),
+          CorrelationTest.ofRanks(rho, EffectiveSampleSize.pyperPeterman(rankX, rankY)),
+          CorrelationTest.ofDetrendedRanks(left, EffectiveSampleSize.pyperPeterman(leftX, leftY)),
+          CorrelationTest.ofDetrendedRanks(left, EffectiveSampleSize.detrended(leftX, leftY))
         };
         for (int i = 0; i < tests.length; i++) {
           called[i] += tests[i].p() <= 0.05 ? 1 : 0;
