@@ -62,7 +62,7 @@ final class CsvFile {
       }
       row = source.next();
     }
-    return new RawTable(file, header, head.rows().get(0).line(), rows, List.of());
+    return new RawTable(file, header, head.rows().get(0).line(), rows, List.of(), false);
   }
 
   /** True where the row starts the footer that the settings name. */

@@ -31,6 +31,7 @@ final class DateText {
   private final Optional<DateTimeFormatter> formatter;
   private final ZoneId from;
   private final ZoneId site;
+  private final LocalDate dayZero;
 
   /**
    * A moment in site time.
@@ -46,17 +47,19 @@ final class DateText {
    * @param pattern pattern of dates as {@link DatePattern} takes it; ISO 8601 where empty
    * @param from zone of local times in the file
    * @param site the site's zone
+   * @param use1904 true for a workbook that counts days from 1904
    */
-  DateText(Optional<String> pattern, ZoneId from, ZoneId site) {
+  DateText(Optional<String> pattern, ZoneId from, ZoneId site, boolean use1904) {
     this.pattern = pattern;
     this.formatter = pattern.filter(text -> !DatePattern.isEpoch(text)).map(DatePattern::formatter);
     this.from = from;
     this.site = site;
+    this.dayZero = use1904 ? LocalDate.of(1904, 1, 1) : LocalDate.of(1899, 12, 30);
   }
 
   /** ISO 8601 in site time. */
   static DateText iso(ZoneId site) {
-    return new DateText(Optional.empty(), site, site);
+    return new DateText(Optional.empty(), site, site, false);
   }
 
   /**
@@ -66,7 +69,16 @@ final class DateText {
    */
   Optional<Moment> parse(String text, boolean plain) {
     try {
-      if (plain || pattern.isEmpty()) {
+      if (plain && pattern.filter(DatePattern::isEpoch).isEmpty()) {
+        OptionalDouble days = NumberText.PLAIN.parse(text);
+        if (days.isEmpty()) {
+          return iso(text);
+        }
+        Optional<Moment> moment = dayNumber(days.getAsDouble());
+        boolean likely = moment.isPresent() && complaint(moment.get().at().toLocalDate()).isEmpty();
+        return likely || formatter.isEmpty() ? moment : patterned(text, formatter.get());
+      }
+      if (pattern.isEmpty()) {
         return iso(text);
       }
       return formatter.isEmpty() ? epoch(text) : patterned(text, formatter.get());
@@ -136,6 +148,13 @@ final class DateText {
       return Optional.of(new Moment(moment, true));
     }
     return Optional.of(new Moment(shift(day.atTime(time)), true));
+  }
+
+  /** A workbook's day number, which stands without a date format. */
+  private Optional<Moment> dayNumber(double days) {
+    long seconds = Math.round((days - Math.floor(days)) * 86_400);
+    LocalDateTime at = dayZero.atStartOfDay().plusDays((long) Math.floor(days));
+    return Optional.of(new Moment(at.plusSeconds(seconds), seconds != 0));
   }
 
   private Optional<Moment> epoch(String text) {

@@ -99,7 +99,10 @@ public final class HistoryReader {
     SampleFolder found = new SampleFolder(folder, settings.sampleExports(), context.problems());
     for (SampleFolder.Found file : found.files()) {
       register.inputs().add(file.path());
-      RawTable table = CsvFile.read(file.path(), file.name(), file.mapping());
+      RawTable table =
+          file.isWorkbook()
+              ? WorkbookFile.read(file.path(), file.name(), file.mapping())
+              : CsvFile.read(file.path(), file.name(), file.mapping());
       SampleFile read = new SampleReader(table, file.mapping(), context).read();
       read.samples().forEach(merge::add);
       notes.addAll(read.notes());

@@ -59,6 +59,9 @@ record NumberText(boolean decimalComma, Optional<String> thousands) {
     if (text.indexOf(Texts.REPLACEMENT) >= 0) {
       return "holds a byte that is no character; set encoding for this file, such as windows-1252";
     }
+    if (text.startsWith("=")) {
+      return "a formula without a stored value; open the workbook, let it calculate and save it";
+    }
     if (decimalComma) {
       return text.indexOf('.') >= 0
           ? "not a number with a decimal comma; set thousands: \".\" or take decimal: comma out"

@@ -10,9 +10,15 @@ import java.util.List;
  * @param headerLine line of the header's first row
  * @param rows rows below the header; blank ones are passed over
  * @param notes what is worth saying about how it was read
+ * @param use1904 true for a workbook that counts days from 1904
  */
 record RawTable(
-    String file, List<Header> header, long headerLine, List<RawRow> rows, List<String> notes) {
+    String file,
+    List<Header> header,
+    long headerLine,
+    List<RawRow> rows,
+    List<String> notes,
+    boolean use1904) {
 
   /**
    * A column's header.

@@ -52,7 +52,8 @@ final class SampleReader {
         new DateText(
             mapping.dateFormat(),
             mapping.timezone().map(ZoneId::of).orElse(context.site()),
-            context.site());
+            context.site(),
+            table.use1904());
     this.missing =
         mapping.missing().stream().map(Texts::clean).collect(java.util.stream.Collectors.toSet());
     this.numbers = SampleColumn.of(table, columns, mapping, missing);
@@ -67,7 +68,8 @@ final class SampleReader {
       }
     }
     List<String> unused = new ArrayList<>(columns.further().values());
-    List<String> notes = new ArrayList<>(table.notes());
+    List<String> notes = new ArrayList<>();
+    table.notes().forEach(note -> notes.add(table.file() + ": " + note));
     for (SampleColumn column : numbers) {
       unused.remove(column.name());
       column.note().ifPresent(note -> notes.add(table.file() + ": " + note));
