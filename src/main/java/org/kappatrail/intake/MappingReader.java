@@ -18,7 +18,7 @@ import org.kappatrail.history.SampleColumns;
 final class MappingReader {
   /** Canonical columns of readings. */
   static final List<String> READING_COLUMNS =
-      List.of("time", "asset", "bearing", "temperature_c", "speed_rpm", "quality");
+      List.of("time", "asset", "bearing", "temperature_c", "speed_rpm", "quality", "tag", "value");
 
   private static final List<String> KEYS =
       List.of(

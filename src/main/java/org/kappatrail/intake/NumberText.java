@@ -19,6 +19,7 @@ record NumberText(boolean decimalComma, Optional<String> thousands) {
   private static final int LONGEST = 60;
   private static final Pattern NUMBER =
       Pattern.compile("[+-]?(\\d++(\\.\\d*+)?|\\.\\d++)([eE][+-]?\\d{1,3})?");
+  private static final Pattern POINT_NUMBER = Pattern.compile("[+-]?[\\d,']*\\.\\d+");
   private static final Pattern COMMA_NUMBER = Pattern.compile("[+-]?[\\d.']*,\\d+");
 
   static NumberText of(ExportMapping mapping) {
@@ -63,7 +64,7 @@ record NumberText(boolean decimalComma, Optional<String> thousands) {
       return "a formula without a stored value; open the workbook, let it calculate and save it";
     }
     if (decimalComma) {
-      return text.indexOf('.') >= 0
+      return POINT_NUMBER.matcher(text).matches()
           ? "not a number with a decimal comma; set thousands: \".\" or take decimal: comma out"
               + " for this file"
           : "not a number; correct it or leave the cell empty";

@@ -172,7 +172,7 @@ record SampleColumn(
   }
 
   /** The unit that a header states in brackets or in a row of its own. */
-  private static Optional<String> statedUnit(String name, RawTable.Header header) {
+  static Optional<String> statedUnit(String name, RawTable.Header header) {
     Set<String> candidates = new LinkedHashSet<>();
     Matcher bracketed = BRACKETED.matcher(header.name());
     while (bracketed.find()) {
