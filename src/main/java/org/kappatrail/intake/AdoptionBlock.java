@@ -11,6 +11,8 @@ import java.util.TreeSet;
 
 /** Writes the block of the settings for a foreign export. */
 final class AdoptionBlock {
+  private static final String TIME_OF_DAY = "\\d{1,2}:\\d{2}(:\\d{2})?(\\s?[AaPp][Mm])?";
+
   private final String name;
   private final MappingReader.Kind kind;
   private final AdoptionGrid grid;
@@ -77,8 +79,11 @@ final class AdoptionBlock {
     line("    columns:");
     List<String> unknown = new ArrayList<>();
     List<String> found = new ArrayList<>();
+    TreeSet<String> names = new TreeSet<>();
     for (ColumnGuess guess : columns) {
-      if (guess.canonical().isPresent()) {
+      if (guess.canonical().isPresent() && !names.add(guess.header().name())) {
+        note("  '" + guess.header().name() + "' stands twice; rename the second in the file");
+      } else if (guess.canonical().isPresent()) {
         found.add(guess.canonical().get());
         line("      " + quoted(guess.header().name()) + ": " + guess.canonical().get());
         guess.doubt().ifPresent(doubt -> note("  not sure: " + doubt));
@@ -119,14 +124,14 @@ final class AdoptionBlock {
     Map<String, String> units = new LinkedHashMap<>();
     List<String> doubts = new ArrayList<>();
     for (ColumnGuess guess : columns) {
-      String column = guess.canonical().orElse("");
+      String column = guess.canonical().orElse(isWide() ? "temperature_c" : "");
       List<String> known = Units.of(column);
       if (known.isEmpty()) {
         continue;
       }
       Optional<String> stated = SampleColumn.statedUnit(column, guess.header());
       stated.filter(unit -> !unit.equals(known.get(0))).ifPresent(unit -> units.put(column, unit));
-      if (stated.isEmpty()) {
+      if (stated.isEmpty() && guess.canonical().isPresent()) {
         UnitGuess.doubt(column, guess.values()).ifPresent(doubts::add);
       }
     }
@@ -150,6 +155,15 @@ final class AdoptionBlock {
       dates.get().doubt().ifPresent(doubt -> note("date-format is not sure: " + doubt));
     } else if (!texts.isEmpty()) {
       note("date-format: the form of '" + texts.get(0) + "' is not recognised; write it here");
+    }
+    for (ColumnGuess guess : columns) {
+      if (!guess.values().isEmpty()
+          && guess.values().stream().allMatch(value -> value.matches(TIME_OF_DAY))) {
+        note(
+            "the time of day stands in a column of its own, '"
+                + guess.header().name()
+                + "', which is not read; export day and time in one column");
+      }
     }
   }
 
@@ -198,9 +212,13 @@ final class AdoptionBlock {
       }
     }
     if (!odd.isEmpty()) {
-      List<String> some = odd.stream().limit(5).map(AdoptionBlock::quoted).toList();
-      note("texts among numbers; where they stand for a missing value write");
-      note("missing: [" + String.join(", ", some) + "]");
+      String some = String.join(", ", odd.stream().limit(5).map(AdoptionBlock::quoted).toList());
+      if (kind == MappingReader.Kind.SAMPLES) {
+        note("texts among numbers; where they stand for a missing value write");
+        note("missing: [" + some + "]");
+      } else {
+        note("texts among numbers, of which the readings are left out: " + some);
+      }
     }
   }
 
@@ -214,6 +232,7 @@ final class AdoptionBlock {
           columns.stream()
               .filter(guess -> guess.canonical().isEmpty() && guess.isMostlyNumbers())
               .map(guess -> guess.header().name())
+              .distinct()
               .toList());
     }
   }

@@ -20,6 +20,7 @@ import org.kappatrail.history.UnusableInputException;
 final class Columns {
   private final Map<String, Integer> positions = new LinkedHashMap<>();
   private final Map<Integer, String> further = new LinkedHashMap<>();
+  private final Map<String, Integer> furtherByName = new LinkedHashMap<>();
   private final Map<String, String> constants;
   private final RawTable table;
 
@@ -52,7 +53,10 @@ final class Columns {
     }
     for (String name : known) {
       if (!positions.containsKey(name) && !constants.containsKey(name)) {
-        OptionalInt position = only(name, at -> matches(at, name, taken));
+        OptionalInt position = only(name, at -> matches(at, name, taken, Texts::key));
+        if (position.isEmpty()) {
+          position = only(name, at -> matches(at, name, taken, Texts::keyWithoutBrackets));
+        }
         if (position.isPresent()) {
           positions.put(name, position.getAsInt());
           taken.add(position.getAsInt());
@@ -61,7 +65,9 @@ final class Columns {
     }
     for (int position = 0; position < table.header().size(); position++) {
       if (!taken.contains(position) && !table.header().get(position).name().isEmpty()) {
-        further.put(position, Texts.columnName(table.header().get(position).name()));
+        String name = Texts.columnName(table.header().get(position).name());
+        further.put(position, name);
+        furtherByName.putIfAbsent(name, position);
       }
     }
     for (String name : required) {
@@ -75,12 +81,9 @@ final class Columns {
   OptionalInt position(String name) {
     Integer position = positions.get(name);
     if (position == null) {
-      return further.entrySet().stream()
-          .filter(entry -> entry.getValue().equals(name))
-          .mapToInt(Map.Entry::getKey)
-          .findFirst();
+      position = furtherByName.get(name);
     }
-    return OptionalInt.of(position);
+    return position == null ? OptionalInt.empty() : OptionalInt.of(position);
   }
 
   /** Known and mapped columns with their positions. */
@@ -103,15 +106,15 @@ final class Columns {
     return table.header().get(position);
   }
 
-  /** True where a row repeats the header. */
+  /** True where a row repeats the header, or a row of it. */
   boolean isHeader(RawRow row) {
     int filled = 0;
     for (int position = 0; position < table.header().size(); position++) {
-      String cell = Texts.key(row.cell(position));
+      String cell = row.cell(position);
       RawTable.Header header = table.header().get(position);
-      boolean same = cell.equals(Texts.key(header.name()));
+      boolean same = cell.equalsIgnoreCase(header.name());
       for (String alias : header.aliases()) {
-        same |= cell.equals(Texts.key(alias));
+        same |= cell.equalsIgnoreCase(alias);
       }
       if (!same) {
         return false;
@@ -148,9 +151,10 @@ final class Columns {
     return Optional.empty();
   }
 
-  private boolean matches(int position, String name, Set<Integer> taken) {
+  private boolean matches(
+      int position, String name, Set<Integer> taken, UnaryOperator<String> key) {
     return !taken.contains(position)
-        && Texts.key(table.header().get(position).name()).equals(Texts.key(name));
+        && key.apply(table.header().get(position).name()).equals(Texts.key(name));
   }
 
   private OptionalInt only(String name, java.util.function.IntPredicate matches) {

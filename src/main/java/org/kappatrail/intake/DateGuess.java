@@ -86,7 +86,20 @@ record DateGuess(Optional<String> pattern, Optional<String> doubt) {
               ? "d" + one.group("sep") + name + one.group("sep") + year
               : name + " d, " + year;
     }
-    return new DateGuess(Optional.of(day + time(matched)), doubt);
+    String pattern = day + time(matched);
+    DateText reader =
+        new DateText(
+            Optional.of(pattern), java.time.ZoneOffset.UTC, java.time.ZoneOffset.UTC, false);
+    List<String> unread =
+        matched.stream()
+            .map(Matcher::group)
+            .filter(text -> reader.parse(text, false).isEmpty())
+            .toList();
+    if (doubt.isEmpty() && !unread.isEmpty()) {
+      doubt =
+          Optional.of("it does not read '" + unread.get(0) + "'; names of months must be English");
+    }
+    return new DateGuess(Optional.of(pattern), doubt);
   }
 
   private static String time(List<Matcher> matched) {

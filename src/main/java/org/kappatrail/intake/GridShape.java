@@ -13,6 +13,7 @@ import java.util.regex.Pattern;
  * @param footer beginning of the row that ends the table
  */
 record GridShape(int skipLines, List<RawRow> header, List<RawRow> body, Optional<String> footer) {
+  private static final int MOST_HEADER_ROWS = 3;
   private static final Pattern NUMBER =
       Pattern.compile("[<>≤≥=\\s]*[+-]?\\d[\\d.,' \\u00A0]*([eE][+-]?\\d+)?\\s*%?");
   private static final Pattern DATE =
@@ -36,7 +37,9 @@ record GridShape(int skipLines, List<RawRow> header, List<RawRow> body, Optional
       return Optional.empty();
     }
     int header = first - 1;
-    if (header > 0 && isSecondHeader(rows.get(header - 1), rows.get(header), width)) {
+    while (header > 0
+        && first - header < MOST_HEADER_ROWS
+        && isSecondHeader(rows.get(header - 1), rows.get(header), width)) {
       header--;
     }
     int end = rows.size();

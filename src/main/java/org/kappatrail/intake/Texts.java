@@ -16,6 +16,8 @@ final class Texts {
           "", "-", "–", "—", "--", "---", ".", "n/a", "#n/a", "na", "n.a.", "nd", "n.d.", "null",
           "none", "nan");
 
+  private static final int LONGEST_MISSING = 4;
+
   /** Texts that stand for a missing name; shorter, as a name may be NA or ND. */
   private static final List<String> MISSING_NAME =
       List.of("", "-", "–", "—", "--", "n/a", "#n/a", "null", "none");
@@ -41,7 +43,8 @@ final class Texts {
   }
 
   static boolean isMissing(String cleaned) {
-    return MISSING.contains(cleaned.toLowerCase(Locale.ROOT));
+    return cleaned.length() <= LONGEST_MISSING
+        && MISSING.contains(cleaned.toLowerCase(Locale.ROOT));
   }
 
   static boolean isMissingName(String cleaned) {

@@ -197,6 +197,7 @@ final class WorkbookFile {
       throws IOException, SAXException, ParserConfigurationException {
     XMLReader xml = XMLHelper.newXMLReader();
     xml.setContentHandler(handler);
+    xml.setErrorHandler(handler);
     xml.parse(new InputSource(new BoundedStream(part, LARGEST_PART_BYTES)));
   }
 

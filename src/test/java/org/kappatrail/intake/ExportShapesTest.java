@@ -1,6 +1,7 @@
 package org.kappatrail.intake;
 
 import static org.assertj.core.api.Assertions.assertThat;
+import static org.assertj.core.api.Assertions.assertThatThrownBy;
 
 import java.io.IOException;
 import java.nio.charset.Charset;
@@ -12,6 +13,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.kappatrail.history.Measurement;
 import org.kappatrail.history.Sample;
+import org.kappatrail.history.UnusableInputException;
 
 /** Exports in shapes that laboratories and historians give; the data are invented. */
 class ExportShapesTest {
@@ -282,5 +284,48 @@ class ExportShapesTest {
 
     assertThat(intake.problems()).isEmpty();
     assertThat(intake.history().samples()).hasSize(2);
+  }
+
+  @Test
+  void canonicalNamesAreKnownInAnyCaseAndWithAUnitInBracketsThatIsHeeded() throws IOException {
+    Intake intake =
+        Folder.in(temporary)
+            .put(
+                "samples/a.csv",
+                """
+                Sample;ASSET;Sampled at;Viscosity 40C cSt [mm²/s];Temperature C (°F);Iron ppm
+                A1;press-1;2024-03-05;148;212;7
+                """)
+            .read();
+
+    assertThat(intake.problems()).isEmpty();
+    assertThat(Folder.sample(intake, "A1").values())
+        .containsEntry("viscosity_40c_cst", Measurement.of(148))
+        .containsEntry("temperature_c", Measurement.of(100))
+        .containsEntry("iron_ppm", Measurement.of(7));
+    assertThat(intake.notes()).singleElement().asString().contains("fahrenheit");
+  }
+
+  @Test
+  void twoColumnsThatAMappingCouldMeanAreNotGuessedBetween() throws IOException {
+    Folder folder =
+        Folder.in(temporary)
+            .put(
+                "kappatrail.yaml",
+                """
+                samples:
+                  - files: "samples/*.csv"
+                    columns: {Iron: iron_ppm}
+                """)
+            .put(
+                "samples/a.csv",
+                "sample,asset,sampled_at,Iron (ppm),Iron (%)\nA1,press-1,2024-03-05,1,2\n");
+    assertThatThrownBy(folder::read)
+        .isInstanceOf(UnusableInputException.class)
+        .hasMessageContaining("samples/a.csv:1 Iron: columns 4 and 5 both go by this name");
+    folder.put(
+        "kappatrail.yaml",
+        "samples:\n  - files: \"samples/*.csv\"\n    columns: {\"Iron (ppm)\": iron_ppm}\n");
+    assertThat(Folder.sample(folder.read(), "A1").exact("iron_ppm")).hasValue(1);
   }
 }
