@@ -2,6 +2,7 @@ package org.kappatrail.history;
 
 import java.util.Collections;
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 
@@ -25,6 +26,7 @@ import java.util.Optional;
  * @param sheet sheet of a workbook
  * @param timezone zone of local times, where it differs from the site's
  * @param tags wide form: header or tag name to what it measures
+ * @param missing texts that stand for a missing value, beside the usual ones
  */
 public record ExportMapping(
     String files,
@@ -43,7 +45,8 @@ public record ExportMapping(
     Map<String, String> constants,
     Optional<String> sheet,
     Optional<String> timezone,
-    Map<String, Tag> tags) {
+    Map<String, Tag> tags,
+    List<String> missing) {
 
   /** What a historian's tag measures. */
   public record Tag(BearingKey bearing, Quantity quantity) {
@@ -71,6 +74,47 @@ public record ExportMapping(
     units = Collections.unmodifiableMap(new LinkedHashMap<>(units));
     constants = Collections.unmodifiableMap(new LinkedHashMap<>(constants));
     tags = Collections.unmodifiableMap(new LinkedHashMap<>(tags));
+    missing = List.copyOf(missing);
+  }
+
+  /** A block without missing markers of its own. */
+  public ExportMapping(
+      String files,
+      Optional<String> jdbc,
+      Optional<String> table,
+      Map<String, String> columns,
+      Map<String, String> units,
+      Optional<String> dateFormat,
+      boolean decimalComma,
+      Optional<String> thousands,
+      Optional<String> delimiter,
+      Optional<String> encoding,
+      int skipLines,
+      int headerRows,
+      Optional<String> footer,
+      Map<String, String> constants,
+      Optional<String> sheet,
+      Optional<String> timezone,
+      Map<String, Tag> tags) {
+    this(
+        files,
+        jdbc,
+        table,
+        columns,
+        units,
+        dateFormat,
+        decimalComma,
+        thousands,
+        delimiter,
+        encoding,
+        skipLines,
+        headerRows,
+        footer,
+        constants,
+        sheet,
+        timezone,
+        tags,
+        List.of());
   }
 
   /** Canonical columns, everything else by default, for the files of a glob. */
@@ -92,6 +136,7 @@ public record ExportMapping(
         Map.of(),
         Optional.empty(),
         Optional.empty(),
-        Map.of());
+        Map.of(),
+        List.of());
   }
 }

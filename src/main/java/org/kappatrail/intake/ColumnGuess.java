@@ -1,0 +1,124 @@
+package org.kappatrail.intake;
+
+import java.util.ArrayList;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.Set;
+
+/**
+ * What a column of a foreign file seems to carry.
+ *
+ * @param header its header
+ * @param position its place
+ * @param canonical column of the program; empty where none was recognised
+ * @param doubt why that is not sure
+ * @param values its values that are not missing
+ */
+record ColumnGuess(
+    RawTable.Header header,
+    int position,
+    Optional<String> canonical,
+    Optional<String> doubt,
+    List<String> values) {
+  private static final String CODE = "(ISO\\s*)?[>≥*\\-\\d]{1,3}\\s*/\\s*[>≥*\\-\\d]{1,3}.*";
+
+  /** Columns of an export of a laboratory. */
+  static List<ColumnGuess> ofSamples(List<RawTable.Header> headers, List<RawRow> body) {
+    List<ColumnGuess> guesses = new ArrayList<>();
+    Set<String> taken = new HashSet<>();
+    for (int position = 0; position < headers.size(); position++) {
+      RawTable.Header header = headers.get(position);
+      Optional<String> found = ColumnSynonyms.ofSamples(header);
+      guesses.add(guess(header, position, found, taken, body));
+    }
+    return byValues(guesses, taken);
+  }
+
+  /** Columns of a log. */
+  static List<ColumnGuess> ofReadings(List<RawTable.Header> headers, List<RawRow> body) {
+    List<ColumnGuess> guesses = new ArrayList<>();
+    Set<String> taken = new HashSet<>();
+    for (int position = 0; position < headers.size(); position++) {
+      RawTable.Header header = headers.get(position);
+      Optional<String> found = ColumnSynonyms.ofReadings(header);
+      guesses.add(guess(header, position, found, taken, body));
+    }
+    if (!taken.contains("time")) {
+      for (int index = 0; index < guesses.size(); index++) {
+        ColumnGuess guess = guesses.get(index);
+        if (guess.canonical().isEmpty() && DateGuess.of(guess.values()).isPresent()) {
+          guesses.set(index, guess.as("time", "its values are dates"));
+          break;
+        }
+      }
+    }
+    return guesses;
+  }
+
+  boolean isMostlyNumbers() {
+    long numbers = values.stream().filter(GridShape::isNumber).count();
+    return !values.isEmpty() && numbers * 2 >= values.size();
+  }
+
+  boolean is(String name) {
+    return canonical.equals(Optional.of(name));
+  }
+
+  private ColumnGuess as(String name, String why) {
+    return new ColumnGuess(
+        header, position, Optional.of(name), Optional.of("by its values: " + why), values);
+  }
+
+  private static ColumnGuess guess(
+      RawTable.Header header,
+      int position,
+      Optional<String> found,
+      Set<String> taken,
+      List<RawRow> body) {
+    List<String> values =
+        body.stream()
+            .map(row -> row.cell(position))
+            .filter(cell -> !Texts.isMissing(cell))
+            .toList();
+    if (found.isPresent() && !taken.add(found.get())) {
+      return new ColumnGuess(
+          header,
+          position,
+          Optional.empty(),
+          Optional.of("it could be " + found.get() + " too, which a column before it is taken for"),
+          values);
+    }
+    return new ColumnGuess(header, position, found, Optional.empty(), values);
+  }
+
+  /** Gives the required columns that no header names to columns whose values fit. */
+  private static List<ColumnGuess> byValues(List<ColumnGuess> guesses, Set<String> taken) {
+    for (int index = 0; index < guesses.size(); index++) {
+      ColumnGuess guess = guesses.get(index);
+      if (guess.canonical().isPresent() || guess.values().isEmpty()) {
+        continue;
+      }
+      if (!taken.contains("sampled_at") && DateGuess.of(guess.values()).isPresent()) {
+        taken.add("sampled_at");
+        guesses.set(index, guess.as("sampled_at", "they are dates"));
+      } else if (!taken.contains("iso_4406")
+          && guess.values().stream().allMatch(value -> value.matches(CODE))) {
+        taken.add("iso_4406");
+        guesses.set(index, guess.as("iso_4406", "they are cleanliness codes"));
+      }
+    }
+    for (int index = 0; index < guesses.size() && !taken.contains("sample"); index++) {
+      ColumnGuess guess = guesses.get(index);
+      boolean distinct = new HashSet<>(guess.values()).size() == guess.values().size();
+      String name = guess.header().name().toLowerCase(Locale.ROOT);
+      boolean called = name.contains("no") || name.contains("nr") || name.contains("id");
+      if (guess.canonical().isEmpty() && distinct && called && guess.values().size() > 1) {
+        taken.add("sample");
+        guesses.set(index, guess.as("sample", "no two are alike"));
+      }
+    }
+    return guesses;
+  }
+}
