@@ -1,4 +1,6 @@
-/** Reads the history folder's settings, register, samples and events into {@code history} records. */
+/**
+ * Reads the history folder's settings, register, samples and events into {@code history} records.
+ */
 @NullMarked
 package org.kappatrail.intake;
 

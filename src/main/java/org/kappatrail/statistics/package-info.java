@@ -1,4 +1,7 @@
-/** Statistics of short, serially correlated, censored series: one file per published method, pure functions. */
+/**
+ * Statistics of short, serially correlated, censored series: one file per published method, pure
+ * functions.
+ */
 @NullMarked
 package org.kappatrail.statistics;
 
