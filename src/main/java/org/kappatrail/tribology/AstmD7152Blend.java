@@ -33,7 +33,8 @@ public final class AstmD7152Blend {
     if (w1 == w2) {
       return OptionalDouble.empty();
     }
-    double fraction = (w - w1) / (w2 - w1);
+    // The sum turns the −0.0 of a blend that equals a thicker base oil into 0.
+    double fraction = (w - w1) / (w2 - w1) + 0.0;
     return fraction < 0 || fraction > 1 ? OptionalDouble.empty() : OptionalDouble.of(fraction);
   }
 }

@@ -10,8 +10,9 @@ import java.util.OptionalDouble;
  * lubricant, cleanliness and load.
  *
  * <p>No unit; loads in kN. Range: 0.1 ≤ κ ≤ 4; above it κ counts as 4, below it there is no factor.
- * Never above 50; where the bracket falls to 0 or below it is 50. The published coefficients leave
- * steps of less than 0.1 % in their κ terms at κ = 0.4.
+ * Never above 50; where the bracket falls to 0 or below it is 50. The published coefficients do not
+ * quite meet at κ = 0.4: for ball bearings the factor falls there by up to 0.1 % where e_C Cu/(d P)
+ * is at most 1, and by more above; for roller bearings by about 0.001 %.
  *
  * <p>Source: ISO 281:2007, 9.3.3.3, equations for the four bearing families; the rule for effective
  * EP additives from memory.

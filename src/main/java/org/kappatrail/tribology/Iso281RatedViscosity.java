@@ -5,8 +5,8 @@ package org.kappatrail.tribology;
  * for an adequate film.
  *
  * <p>ν1 = 45000 n^−0.83 Dpw^−0.5 below 1000 r/min, 4500 n^−0.5 Dpw^−0.5 from there up. Units:
- * mm²/s, r/min, mm. Range: any speed and diameter above 0; others are refused. At 1000 r/min the
- * upper branch lies 2.33 % below the lower one, as published.
+ * mm²/s, r/min, mm. Range: any speed and diameter above 0; others are refused. The published
+ * branches do not quite meet: at 1000 r/min the slow one lies 2.33 % above the fast one.
  *
  * <p>Source: ISO 281:2007, 9.3.3.3.
  */
