@@ -3,112 +3,108 @@ package org.kappatrail.tribology;
 import java.util.Arrays;
 import java.util.List;
 import java.util.OptionalDouble;
+import org.apache.commons.math3.analysis.UnivariateFunction;
 import org.apache.commons.math3.analysis.solvers.BrentSolver;
 
 /**
- * Viscosity index from kinematic viscosity at 40 and 100 °C, ASTM D2270-10(2016) (ISO 2909), and
- * back. L and H come from Table 1 by linear interpolation from 2 to 70 mm²/s at 100 °C and from the
- * standard's formulas (last row of Table X2.1) above. Procedure A up to an index of 100, procedure
- * B above it. The result is not rounded; the standard rounds it to a whole number.
+ * Viscosity index from the kinematic viscosities at 40 and 100 °C, and the way back.
+ *
+ * <p>Units: mm²/s; the index has none and is not rounded. Range: 2 mm²/s at 100 °C up; below it
+ * there is no index. Procedure A, 100 (L − U)/(L − H), up to an index of 100; Procedure B, 100 +
+ * (10^N − 1)/0.00715 with N = (log H − log U)/log Y, above. The two meet at U = H, where both give
+ * 100.
+ *
+ * <p>Source: ASTM D2270 / ISO 2909, Table 1 by linear interpolation from 2 to 70 mm²/s, above that
+ * the equations for L and H in Y (last row of Table X2.1).
  */
 public final class AstmD2270 {
-  /** Least kinematic viscosity at 100 °C for which the index is defined, mm²/s. */
-  public static final double LEAST_VISCOSITY_100_CST = 2.0;
+  /** Lowest viscosity at 100 °C for which an index is defined, mm²/s. */
+  public static final double LOWEST_100_CST = 2;
 
-  private static final double TABLE_START = 2.0;
-  private static final double TABLE_END = 70.0;
-  private static final double[] KV;
+  private static final double ACCURACY_CST = 1e-11;
+  private static final int MOST_STEPS = 200;
+  private static final double[] Y;
   private static final double[] L;
   private static final double[] H;
 
   static {
-    List<String[]> rows = PublishedTable.rows("d2270-table-1.csv");
-    KV = rows.stream().mapToDouble(row -> Double.parseDouble(row[0])).toArray();
-    L = rows.stream().mapToDouble(row -> Double.parseDouble(row[1])).toArray();
-    H = rows.stream().mapToDouble(row -> Double.parseDouble(row[2])).toArray();
+    List<List<String>> rows = PublishedTable.rows("astm-d2270-table-1.csv");
+    Y = rows.stream().mapToDouble(row -> PublishedTable.number(row, 0)).toArray();
+    L = rows.stream().mapToDouble(row -> PublishedTable.number(row, 1)).toArray();
+    H = rows.stream().mapToDouble(row -> PublishedTable.number(row, 2)).toArray();
   }
 
   private AstmD2270() {}
 
-  /**
-   * Viscosity index.
-   *
-   * @param viscosity40Cst kinematic viscosity at 40 °C, mm²/s
-   * @param viscosity100Cst kinematic viscosity at 100 °C, mm²/s, at least 2
-   * @throws IllegalArgumentException below 2 mm²/s at 100 °C, or where the oil would not thin with
-   *     heat
-   */
-  public static double viscosityIndex(double viscosity40Cst, double viscosity100Cst) {
-    Require.within("viscosity at 100 °C", viscosity100Cst, "mm²/s", LEAST_VISCOSITY_100_CST, 1e5);
-    Require.positive("viscosity at 40 °C", viscosity40Cst, "mm²/s");
-    if (viscosity40Cst <= viscosity100Cst) {
+  /** The viscosity index; below 0 for an oil thinner when hot than the lower reference oil. */
+  public static double viscosityIndex(double v40, double v100) {
+    Require.atLeast("viscosity at 100 °C", v100, LOWEST_100_CST, "mm²/s");
+    Require.finite("viscosity at 40 °C", v40, "mm²/s");
+    if (v40 <= v100) {
       throw new IllegalArgumentException(
-          "viscosity at 40 °C ("
-              + viscosity40Cst
-              + " mm²/s) must be above the one at 100 °C ("
-              + viscosity100Cst
-              + " mm²/s)");
+          "viscosity at 40 °C "
+              + v40
+              + " mm²/s: must be above the one at 100 °C, "
+              + v100
+              + " mm²/s");
     }
-    double h = h(viscosity100Cst);
-    if (viscosity40Cst < h) {
-      double n = (Math.log10(h) - Math.log10(viscosity40Cst)) / Math.log10(viscosity100Cst);
-      return (Math.pow(10, n) - 1) / 0.00715 + 100;
-    }
-    double l = l(viscosity100Cst);
-    return (l - viscosity40Cst) / (l - h) * 100;
+    return index(v40, v100);
   }
 
   /**
-   * Viscosity at 100 °C of the oil that has a given index, by Brent's method.
-   *
-   * @param viscosity40Cst kinematic viscosity at 40 °C, mm²/s
-   * @param viscosityIndex viscosity index
-   * @return mm²/s; empty where no value from 2 mm²/s up has that index
+   * The viscosity at 100 °C at which an oil of a given viscosity at 40 °C has a given index; empty
+   * where no viscosity from 2 mm²/s up to {@code v40} has it.
    */
-  public static OptionalDouble viscosity100Cst(double viscosity40Cst, double viscosityIndex) {
-    double low = LEAST_VISCOSITY_100_CST;
-    double high = viscosity40Cst * (1 - 1e-9);
-    if (!(high > low) || viscosityIndex(viscosity40Cst, low) > viscosityIndex) {
+  public static OptionalDouble viscosity100Cst(double v40, double viscosityIndex) {
+    Require.positive("viscosity at 40 °C", v40, "mm²/s");
+    Require.finite("viscosity index", viscosityIndex, "");
+    if (v40 <= LOWEST_100_CST) {
       return OptionalDouble.empty();
     }
-    if (viscosityIndex(viscosity40Cst, high) < viscosityIndex) {
+    double missAtLowest = index(v40, LOWEST_100_CST) - viscosityIndex;
+    double missAtHighest = index(v40, v40) - viscosityIndex;
+    if (missAtLowest > 0 || missAtHighest <= 0) {
       return OptionalDouble.empty();
     }
-    double top = low;
-    while (viscosityIndex(viscosity40Cst, top) < viscosityIndex) {
-      low = top;
-      top = Math.min(top * 1.1, high);
+    if (missAtLowest == 0) {
+      return OptionalDouble.of(LOWEST_100_CST);
     }
-    if (top == low) {
-      return OptionalDouble.of(low);
-    }
-    BrentSolver solver = new BrentSolver(1e-13, 1e-12);
-    return OptionalDouble.of(
-        solver.solve(200, v100 -> viscosityIndex(viscosity40Cst, v100) - viscosityIndex, low, top));
+    UnivariateFunction miss = v100 -> index(v40, v100) - viscosityIndex;
+    BrentSolver solver = new BrentSolver(ACCURACY_CST, ACCURACY_CST);
+    return OptionalDouble.of(solver.solve(MOST_STEPS, miss, LOWEST_100_CST, v40));
   }
 
-  /** L: viscosity at 40 °C of the oil of index 0 with the same viscosity at 100 °C, mm²/s. */
-  static double l(double viscosity100Cst) {
-    return viscosity100Cst <= TABLE_END
-        ? interpolate(L, viscosity100Cst)
-        : (0.83531 * viscosity100Cst + 14.6731) * viscosity100Cst - 216.246;
+  /** L of Table 1: viscosity at 40 °C of the oil of index 0 that has {@code v100}. */
+  static double lowReferenceCst(double v100) {
+    return v100 > Y[Y.length - 1]
+        ? 0.83531 * v100 * v100 + 14.6731 * v100 - 216.246
+        : interpolated(L, v100);
   }
 
-  /** H: viscosity at 40 °C of the oil of index 100 with the same viscosity at 100 °C, mm²/s. */
-  static double h(double viscosity100Cst) {
-    return viscosity100Cst <= TABLE_END
-        ? interpolate(H, viscosity100Cst)
-        : (0.16841 * viscosity100Cst + 11.8493) * viscosity100Cst - 96.947;
+  /** H of Table 1: viscosity at 40 °C of the oil of index 100 that has {@code v100}. */
+  static double highReferenceCst(double v100) {
+    return v100 > Y[Y.length - 1]
+        ? 0.16841 * v100 * v100 + 11.8493 * v100 - 96.947
+        : interpolated(H, v100);
   }
 
-  private static double interpolate(double[] column, double viscosity100Cst) {
-    double at = Math.max(TABLE_START, viscosity100Cst);
-    int i = Arrays.binarySearch(KV, at);
-    if (i >= 0) {
-      return column[i];
+  private static double index(double v40, double v100) {
+    double high = highReferenceCst(v100);
+    if (v40 >= high) {
+      double low = lowReferenceCst(v100);
+      return 100 * (low - v40) / (low - high);
     }
-    int above = -i - 1;
-    double share = (at - KV[above - 1]) / (KV[above] - KV[above - 1]);
+    double n = Math.log(high / v40) / Math.log(v100);
+    return 100 + (Math.pow(10, n) - 1) / 0.00715;
+  }
+
+  private static double interpolated(double[] column, double v100) {
+    int found = Arrays.binarySearch(Y, v100);
+    if (found >= 0) {
+      return column[found];
+    }
+    int above = -found - 1;
+    double share = (v100 - Y[above - 1]) / (Y[above] - Y[above - 1]);
     return column[above - 1] + share * (column[above] - column[above - 1]);
   }
 }

@@ -1,45 +1,35 @@
 package org.kappatrail.tribology;
 
 /**
- * Precision of kinematic viscosity at 40 °C of in-service formulated oils, ASTM D445, precision
- * clause: reproducibility R = 0.000594 ν^1.722, repeatability r = 0.000233 ν^1.722, 95 % limits of
- * the difference of two results. Known between 25 and 150 mm²/s; outside, the relative value of the
- * nearer end is held (tool convention).
+ * Reproducibility of the kinematic viscosity at 40 °C of used, in-service formulated oils: R =
+ * 0.000594 ν^1.722 mm²/s at 95 %.
+ *
+ * <p>Units: mm²/s in, percent of the value out. Range: 25…150 mm²/s; outside, the relative value of
+ * the nearer end is held (convention of this tool).
+ *
+ * <p>Source: ASTM D445, precision clause, in-service formulated oils at 40 °C.
  */
 public final class AstmD445Precision {
-  /** Least viscosity of the precision study, mm²/s. */
-  public static final double LEAST_CST = 25;
-
-  /** Highest viscosity of the precision study, mm²/s. */
-  public static final double MOST_CST = 150;
-
-  private static final double REPRODUCIBILITY = 0.000594;
-  private static final double REPEATABILITY = 0.000233;
+  private static final double COEFFICIENT = 0.000594;
   private static final double EXPONENT = 1.722;
+  private static final double LOWEST_CST = 25;
+  private static final double HIGHEST_CST = 150;
 
-  /** 1.96 √2: a 95 % limit of a difference over the standard deviation of one result. */
-  private static final double LIMIT_OVER_SIGMA = 2.77;
+  /** Ratio of a 95 % limit for the difference of two results to their standard deviation. */
+  private static final double LIMIT_PER_SIGMA = 2.77;
 
   private AstmD445Precision() {}
 
-  /** Reproducibility over the value, as a fraction. */
-  public static double relativeReproducibility(double viscosity40Cst) {
-    return relative(REPRODUCIBILITY, viscosity40Cst);
+  /** Reproducibility R in percent of the viscosity. */
+  public static double reproducibilityPercent(double v40) {
+    Require.positive("viscosity at 40 °C", v40, "mm²/s");
+    double within = Math.min(HIGHEST_CST, Math.max(LOWEST_CST, v40));
+    return 100 * COEFFICIENT * Math.pow(within, EXPONENT - 1);
   }
 
-  /** Repeatability over the value, as a fraction. */
-  public static double relativeRepeatability(double viscosity40Cst) {
-    return relative(REPEATABILITY, viscosity40Cst);
-  }
-
-  /** Standard uncertainty of ln ν from a relative 95 % limit of a difference. */
-  public static double sigmaLn(double relativeLimit) {
-    return relativeLimit / LIMIT_OVER_SIGMA;
-  }
-
-  private static double relative(double coefficient, double viscosity40Cst) {
-    Require.positive("viscosity at 40 °C", viscosity40Cst, "mm²/s");
-    double held = Math.max(LEAST_CST, Math.min(MOST_CST, viscosity40Cst));
-    return coefficient * Math.pow(held, EXPONENT - 1);
+  /** σ(ln ν) of a reproducibility that is given as a fraction (not percent) of the viscosity. */
+  public static double sigmaLn(double reproducibilityRelative) {
+    return Require.notNegative("relative reproducibility", reproducibilityRelative, "")
+        / LIMIT_PER_SIGMA;
   }
 }

@@ -1,102 +1,135 @@
 package org.kappatrail.tribology;
 
-import java.util.Locale;
+import java.util.List;
+import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 
 /**
- * A cleanliness code of ISO 4406 for particles from 4, 6 and 14 µm(c), as in {@code 18/16/13}.
+ * A cleanliness code of three scale numbers, for particles of at least 4, 6 and 14 µm(c).
  *
- * @param c4 part for particles from 4 µm(c)
- * @param c6 part for particles from 6 µm(c)
- * @param c14 part for particles from 14 µm(c)
+ * <p>Counts are cumulative, so no part may be above the one before it. The older code of two parts
+ * has no part for 4 µm; it is read as one that does not require it.
+ *
+ * <p>Source: ISO 4406, clause on the code and its notation.
+ *
+ * @param c4 particles ≥ 4 µm(c)
+ * @param c6 particles ≥ 6 µm(c)
+ * @param c14 particles ≥ 14 µm(c)
  */
 public record CleanlinessCode(Part c4, Part c6, Part c14) {
-  private static final Pattern PART = Pattern.compile("(?<bound>>=|>|≥)?\\s*(?<number>\\d{1,2})");
+  private static final Pattern NUMBER = Pattern.compile("(>=|>|≥)?\\s*(\\d{1,3})");
+
+  public CleanlinessCode {
+    requireCumulative("≥4 µm", c4, "≥6 µm", c6);
+    requireCumulative("≥6 µm", c6, "≥14 µm", c14);
+    requireCumulative("≥4 µm", c4, "≥14 µm", c14);
+  }
 
   /**
    * One part of a code.
    *
-   * @param number scale number; empty where the part was not measured or not asked for
-   * @param atLeast true where the count is known only to be at least of this class
-   * @param above true where the count lies above the class
+   * @param number the scale number, 0…28; empty where there is none
+   * @param atLeast whether the number is a lower bound, written {@code >28} or {@code ≥18}
+   * @param stated whether the code asks for this part: {@code false} for {@code -}; a {@code *} is
+   *     stated and has no number
    */
-  public record Part(OptionalInt number, boolean atLeast, boolean above) {
-    /** Written {@code *}: too many particles to count, or not reported. */
-    public static final Part NOT_REPORTED = new Part(OptionalInt.empty(), false, false);
+  public record Part(OptionalInt number, boolean atLeast, boolean stated) {
+    /** Counted, but not reported: {@code *}. */
+    public static final Part NOT_MEASURED = new Part(OptionalInt.empty(), false, true);
+
+    /** Not asked for: {@code -}. */
+    public static final Part NOT_REQUIRED = new Part(OptionalInt.empty(), false, false);
 
     public Part {
       if (number.isPresent()) {
-        Require.within("scale number", number.getAsInt(), "", 0, 30);
+        int value = number.getAsInt();
+        if (value < 0 || value > Iso4406.HIGHEST) {
+          throw new IllegalArgumentException(
+              "scale number "
+                  + value
+                  + ": must lie within 0 and "
+                  + Iso4406.HIGHEST
+                  + "; beyond it is written >28");
+        }
+        if (!stated) {
+          throw new IllegalArgumentException(
+              "scale number " + value + ": a part that is not required has no number");
+        }
+      } else if (atLeast) {
+        throw new IllegalArgumentException("a part without a number cannot be a lower bound");
       }
     }
 
     public static Part of(int number) {
-      return new Part(OptionalInt.of(number), false, false);
-    }
-
-    static Part atLeast(int number) {
-      return new Part(OptionalInt.of(number), true, false);
-    }
-
-    static Part above(int number) {
       return new Part(OptionalInt.of(number), false, true);
     }
 
-    /** The number to compare with a limit: one more where the count lies above the class. */
-    public OptionalInt effective() {
-      return number.isPresent() && above ? OptionalInt.of(number.getAsInt() + 1) : number;
+    public static Part atLeast(int number) {
+      return new Part(OptionalInt.of(number), true, true);
     }
 
-    /** True where the number is a lower bound only. */
-    public boolean bound() {
-      return atLeast || above;
+    /** The number to reckon with: one dirtier than the number of a lower bound. */
+    public OptionalInt effectiveNumber() {
+      return number.isPresent()
+          ? OptionalInt.of(number.getAsInt() + (atLeast ? 1 : 0))
+          : OptionalInt.empty();
     }
 
-    Part cleanerBy(int codes) {
-      return number.isPresent() ? of(Math.max(0, effective().getAsInt() - codes)) : this;
+    private Part cleanerBy(int codes) {
+      return number.isPresent()
+          ? new Part(OptionalInt.of(Math.max(0, number.getAsInt() - codes)), atLeast, true)
+          : this;
     }
 
     @Override
     public String toString() {
       if (number.isEmpty()) {
-        return "*";
+        return stated ? "*" : "-";
       }
-      return (above ? ">" : atLeast ? "≥" : "") + number.getAsInt();
+      int value = number.getAsInt();
+      return atLeast ? (value == Iso4406.HIGHEST ? ">" : "≥") + value : Integer.toString(value);
     }
   }
 
   /**
-   * Reads a code: three parts, or two for 6 and 14 µm(c) as older reports give them. A part is a
-   * number, with {@code >} or {@code ≥} where it is a lower bound, or {@code *} or {@code -} where
-   * there is none.
+   * Reads a code: {@code 18/16/13}, {@code 16/13} (6 and 14 µm), a part as {@code >28}, {@code
+   * ≥18}, {@code >18}, {@code *} or {@code -}, with blanks around parts allowed.
    *
-   * @throws IllegalArgumentException where the text is no code
+   * @throws IllegalArgumentException where the text is no code; the message says why
    */
   public static CleanlinessCode parse(String text) {
-    String bare = text.strip();
-    if (bare.toUpperCase(Locale.ROOT).startsWith("ISO")) {
-      bare = bare.substring(3).strip();
+    List<String> cells = List.of(text.strip().split("/", -1));
+    if (cells.size() != 2 && cells.size() != 3) {
+      throw new IllegalArgumentException(
+          "cleanliness code '" + text + "': must have three parts as in 18/16/13, or two");
     }
-    String[] parts = bare.split("[/\\\\]", -1);
-    return switch (parts.length) {
-      case 3 -> new CleanlinessCode(part(parts[0]), part(parts[1]), part(parts[2]));
-      case 2 -> new CleanlinessCode(Part.NOT_REPORTED, part(parts[0]), part(parts[1]));
-      default ->
-          throw new IllegalArgumentException(
-              "a cleanliness code has two or three parts, as in 18/16/13");
-    };
+    try {
+      List<Part> parts = cells.stream().map(CleanlinessCode::parsePart).toList();
+      return parts.size() == 2
+          ? new CleanlinessCode(Part.NOT_REQUIRED, parts.get(0), parts.get(1))
+          : new CleanlinessCode(parts.get(0), parts.get(1), parts.get(2));
+    } catch (IllegalArgumentException e) {
+      throw new IllegalArgumentException("cleanliness code '" + text + "': " + e.getMessage(), e);
+    }
   }
 
-  /** The same code a number of classes cleaner in every part, not below 0. */
+  /** Reads a code as {@link #parse} does; empty where the text is none. */
+  public static Optional<CleanlinessCode> find(String text) {
+    try {
+      return Optional.of(parse(text));
+    } catch (IllegalArgumentException e) {
+      return Optional.empty();
+    }
+  }
+
+  /** The same code with every number lower by some codes, 0 at the lowest. */
   public CleanlinessCode cleanerBy(int codes) {
+    if (codes < 0) {
+      throw new IllegalArgumentException("cleaner by " + codes + " codes: must not be below 0");
+    }
     return new CleanlinessCode(c4.cleanerBy(codes), c6.cleanerBy(codes), c14.cleanerBy(codes));
-  }
-
-  /** True where any part that both have is dirtier than the limit's. */
-  public boolean dirtierThan(CleanlinessCode limit) {
-    return dirtier(c4, limit.c4) || dirtier(c6, limit.c6) || dirtier(c14, limit.c14);
   }
 
   @Override
@@ -104,27 +137,38 @@ public record CleanlinessCode(Part c4, Part c6, Part c14) {
     return c4 + "/" + c6 + "/" + c14;
   }
 
-  private static boolean dirtier(Part part, Part limit) {
-    return part.number().isPresent()
-        && limit.number().isPresent()
-        && part.effective().getAsInt() > limit.effective().getAsInt();
-  }
-
-  private static Part part(String text) {
-    String bare = text.strip();
-    if (bare.equals("*") || bare.equals("-") || bare.equals("–")) {
-      return Part.NOT_REPORTED;
+  private static Part parsePart(String cell) {
+    String text = cell.strip();
+    if (text.equals("*")) {
+      return Part.NOT_MEASURED;
     }
-    Matcher matcher = PART.matcher(bare);
+    if (text.equals("-")) {
+      return Part.NOT_REQUIRED;
+    }
+    Matcher matcher = NUMBER.matcher(text);
     if (!matcher.matches()) {
       throw new IllegalArgumentException(
-          "'" + bare + "' is no part of a cleanliness code; give a number, >number, * or -");
+          "part '" + text + "' is no scale number, nor >, ≥ with one, nor * or -");
     }
-    int number = Integer.parseInt(matcher.group("number"));
-    String bound = matcher.group("bound");
-    if (bound == null) {
-      return Part.of(number);
+    int number = Integer.parseInt(matcher.group(2));
+    return matcher.group(1) == null ? Part.of(number) : Part.atLeast(number);
+  }
+
+  private static void requireCumulative(String fine, Part smaller, String coarse, Part larger) {
+    if (smaller.number().isPresent()
+        && larger.number().isPresent()
+        && !smaller.atLeast()
+        && larger.number().getAsInt() > smaller.number().getAsInt()) {
+      throw new IllegalArgumentException(
+          "scale number "
+              + larger
+              + " for "
+              + coarse
+              + " is above "
+              + smaller
+              + " for "
+              + fine
+              + ", but every larger particle counts as a smaller one too");
     }
-    return bound.equals(">") ? Part.above(number) : Part.atLeast(number);
   }
 }

@@ -1,15 +1,14 @@
 package org.kappatrail.tribology;
 
 /**
- * Contamination factor e_C and where it comes from.
+ * The contamination factor e_C of ISO 281 and what it rests on.
  *
- * @param value e_C, 0 to 1
- * @param upperBound true where the oil is dirtier than the formula's class, so that e_C is at most
- *     this
- * @param basis what it was taken from, in words
+ * @param value 0 (heavily contaminated) to 1 (clean)
+ * @param upperBound whether the oil is dirtier than every class, so that the true factor is lower
+ * @param basis the class that gave the value, for the reader
  */
 public record ContaminationFactor(double value, boolean upperBound, String basis) {
   public ContaminationFactor {
-    Require.within("contamination factor", value, "", 0, 1);
+    Require.within("contamination factor", value, 0, 1, "");
   }
 }

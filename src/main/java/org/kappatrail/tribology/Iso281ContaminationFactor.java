@@ -1,78 +1,82 @@
 package org.kappatrail.tribology;
 
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalInt;
 
 /**
- * Contamination factor e_C for oil lubrication, ISO 281:2007 Annex A (coefficients from memory):
- * e_C = min(1, c1 κ^0.68 Dpw^0.55) (1 − c2/Dpw^(1/3)), kept within 0…1, by the cleanest class whose
- * two limits cover the code's numbers for 6 and 14 µm(c). Dirtier than all classes: the last class,
- * as an upper bound. κ as the life formulas use it, at most 4.
+ * Contamination factor e_C from the cleanliness code of the oil: min(1, c1 κ^0.68 Dpw^0.55) (1 −
+ * c2/Dpw^(1/3)) with c1 and c2 of the cleanest class whose limits cover the numbers for 6 and 14
+ * µm.
+ *
+ * <p>Units: Dpw in mm, κ and e_C none. κ is clipped to 0.1…4 and the result to 0…1. Without numbers
+ * for 6 and 14 µm there is no factor; oil dirtier than every class gets the dirtiest one and is
+ * marked as an upper bound. A number that is itself a lower bound counts as the next dirtier one.
+ *
+ * <p>Source: ISO 281:2007, Annex A (equations for oil with inline filter and for oil bath), from
+ * memory.
  */
 public final class Iso281ContaminationFactor {
-  private static final List<CleanlinessClass> CLASSES =
-      PublishedTable.rows("iso281-contamination.csv").stream()
-          .map(
-              row ->
-                  new CleanlinessClass(
-                      OilSupply.parse(row[0]).orElseThrow(),
-                      Integer.parseInt(row[1]),
-                      Integer.parseInt(row[2]),
-                      Double.parseDouble(row[4]),
-                      Double.parseDouble(row[5])))
+  private static final List<OilClass> CLASSES =
+      PublishedTable.rows("iso-281-contamination-factor.csv").stream()
+          .map(Iso281ContaminationFactor::oilClass)
           .toList();
 
   private Iso281ContaminationFactor() {}
 
-  private record CleanlinessClass(
-      OilSupply supply, int most6um, int most14um, double c1, double c2) {
-    boolean covers(int number6um, int number14um) {
-      return number6um <= most6um && number14um <= most14um;
+  private record OilClass(OilSupply supply, int highest6, int highest14, double c1, double c2) {
+    boolean covers(int number6, int number14) {
+      return number6 <= highest6 && number14 <= highest14;
+    }
+
+    double factor(double kappa, double pitchMm) {
+      double film = Math.min(1, c1 * Math.pow(kappa, 0.68) * Math.pow(pitchMm, 0.55));
+      return Math.min(1, Math.max(0, film * (1 - c2 / Math.cbrt(pitchMm))));
     }
   }
 
-  /**
-   * Contamination factor.
-   *
-   * @param code cleanliness code
-   * @param supply oil supply
-   * @param kappa κ, above 0
-   * @param pitchMm pitch diameter, mm
-   * @return empty where the code lacks its 6 or 14 µm(c) number
-   */
   public static Optional<ContaminationFactor> factor(
       CleanlinessCode code, OilSupply supply, double kappa, double pitchMm) {
-    OptionalInt number6um = code.c6().effective();
-    OptionalInt number14um = code.c14().effective();
-    if (number6um.isEmpty() || number14um.isEmpty()) {
+    Require.positive("viscosity ratio", kappa, "");
+    Require.positive("pitch diameter", pitchMm, "mm");
+    OptionalInt number6 = code.c6().effectiveNumber();
+    OptionalInt number14 = code.c14().effectiveNumber();
+    if (number6.isEmpty() || number14.isEmpty()) {
       return Optional.empty();
     }
-    List<CleanlinessClass> classes =
-        CLASSES.stream().filter(item -> item.supply() == supply).toList();
-    Optional<CleanlinessClass> covering =
+    List<OilClass> classes =
+        CLASSES.stream().filter(candidate -> candidate.supply() == supply).toList();
+    Optional<OilClass> covering =
         classes.stream()
-            .filter(item -> item.covers(number6um.getAsInt(), number14um.getAsInt()))
+            .filter(candidate -> candidate.covers(number6.getAsInt(), number14.getAsInt()))
             .findFirst();
-    CleanlinessClass chosen = covering.orElse(classes.get(classes.size() - 1));
-    boolean bound = covering.isEmpty() || code.c6().bound() || code.c14().bound();
-    String basis =
-        String.format(
-            Locale.ROOT,
-            "%s, code -/%d/%d%s",
-            supply.label(),
-            chosen.most6um(),
-            chosen.most14um(),
-            covering.isEmpty() ? ", dirtier than every class" : "");
-    return Optional.of(new ContaminationFactor(value(chosen, kappa, pitchMm), bound, basis));
+    OilClass used = covering.orElseGet(() -> classes.get(classes.size() - 1));
+    double clipped =
+        Math.min(ViscosityRatio.HIGHEST_FOR_LIFE, Math.max(ViscosityRatio.LOWEST_FOR_LIFE, kappa));
+    return Optional.of(
+        new ContaminationFactor(
+            used.factor(clipped, pitchMm), covering.isEmpty(), basis(used, covering.isEmpty())));
   }
 
-  private static double value(CleanlinessClass item, double kappa, double pitchMm) {
-    Require.positive("pitch diameter", pitchMm, "mm");
-    double growing =
-        item.c1() * Math.pow(ViscosityRatio.clipped(kappa), 0.68) * Math.pow(pitchMm, 0.55);
-    double factor = Math.min(1, growing) * (1 - item.c2() / Math.cbrt(pitchMm));
-    return Math.max(0, Math.min(1, factor));
+  private static String basis(OilClass used, boolean dirtier) {
+    return supplyName(used.supply())
+        + ", "
+        + (dirtier ? "dirtier than -/" : "up to -/")
+        + used.highest6()
+        + "/"
+        + used.highest14();
+  }
+
+  private static String supplyName(OilSupply supply) {
+    return supply == OilSupply.BATH ? "oil bath" : "inline filter";
+  }
+
+  private static OilClass oilClass(List<String> row) {
+    return new OilClass(
+        OilSupply.parse(row.get(0)).orElseThrow(),
+        PublishedTable.whole(row, 1),
+        PublishedTable.whole(row, 2),
+        PublishedTable.number(row, 4),
+        PublishedTable.number(row, 5));
   }
 }

@@ -2,38 +2,45 @@ package org.kappatrail.tribology;
 
 import java.util.List;
 import java.util.Optional;
-import java.util.stream.IntStream;
 
 /**
- * Viscosity grades of industrial liquid lubricants, ISO 3448:1992: kinematic viscosity at 40 °C,
- * midpoint ±10 %. Grades 2200 and 3200 from memory.
+ * Viscosity grades of industrial liquid lubricants.
+ *
+ * <p>Units: mm²/s at 40 °C. Each grade reaches 10 % below and above its midpoint; viscosities
+ * between two grades belong to none.
+ *
+ * <p>Source: ISO 3448, Table 1 (grades 2200 and 3200 from memory).
  */
 public final class Iso3448 {
   private static final List<Grade> GRADES =
-      PublishedTable.rows("iso3448-grades.csv").stream()
+      PublishedTable.rows("iso-3448-grades.csv").stream()
           .map(
               row ->
                   new Grade(
-                      Integer.parseInt(row[0]),
-                      Double.parseDouble(row[1]),
-                      Double.parseDouble(row[2]),
-                      Double.parseDouble(row[3])))
+                      PublishedTable.whole(row, 0),
+                      PublishedTable.number(row, 1),
+                      PublishedTable.number(row, 2),
+                      PublishedTable.number(row, 3)))
           .toList();
 
   private Iso3448() {}
 
-  /**
-   * One viscosity grade.
-   *
-   * @param vg the number after "ISO VG"
-   * @param midpointCst midpoint at 40 °C, mm²/s
-   * @param minCst least viscosity at 40 °C, mm²/s
-   * @param maxCst highest viscosity at 40 °C, mm²/s
-   */
+  /** A grade and its limits, both of which belong to it. */
   public record Grade(int vg, double midpointCst, double minCst, double maxCst) {
-    /** True where a viscosity at 40 °C lies within the grade, limits included. */
-    public boolean contains(double viscosity40Cst) {
-      return viscosity40Cst >= minCst && viscosity40Cst <= maxCst;
+    public Grade {
+      Require.positive("lower limit of VG " + vg, minCst, "mm²/s");
+      Require.atLeast("midpoint of VG " + vg, midpointCst, minCst, "mm²/s");
+      Require.atLeast("upper limit of VG " + vg, maxCst, midpointCst, "mm²/s");
+    }
+
+    /** Whether a viscosity at 40 °C lies within the grade. */
+    public boolean contains(double v40) {
+      return v40 >= minCst && v40 <= maxCst;
+    }
+
+    @Override
+    public String toString() {
+      return "ISO VG " + vg;
     }
   }
 
@@ -42,29 +49,30 @@ public final class Iso3448 {
     return GRADES;
   }
 
+  /** The grade that holds a viscosity at 40 °C. */
+  public static Optional<Grade> gradeOf(double v40) {
+    return GRADES.stream().filter(grade -> grade.contains(v40)).findFirst();
+  }
+
+  /** The grade of a number. */
   public static Optional<Grade> find(int vg) {
     return GRADES.stream().filter(grade -> grade.vg() == vg).findFirst();
   }
 
-  /** Grade that holds a viscosity at 40 °C; empty between grades. */
-  public static Optional<Grade> gradeOf(double viscosity40Cst) {
-    return GRADES.stream().filter(grade -> grade.contains(viscosity40Cst)).findFirst();
-  }
-
+  /** The next thicker grade; empty for the last one and for a number that is no grade. */
   public static Optional<Grade> oneUp(int vg) {
     return neighbour(vg, 1);
   }
 
+  /** The next thinner grade; empty for the first one and for a number that is no grade. */
   public static Optional<Grade> oneDown(int vg) {
     return neighbour(vg, -1);
   }
 
   private static Optional<Grade> neighbour(int vg, int step) {
-    return IntStream.range(0, GRADES.size())
-        .filter(i -> GRADES.get(i).vg() == vg)
-        .map(i -> i + step)
-        .filter(i -> i >= 0 && i < GRADES.size())
-        .mapToObj(GRADES::get)
-        .findFirst();
+    return find(vg)
+        .map(grade -> GRADES.indexOf(grade) + step)
+        .filter(index -> index >= 0 && index < GRADES.size())
+        .map(GRADES::get);
   }
 }

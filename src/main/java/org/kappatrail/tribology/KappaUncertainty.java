@@ -1,59 +1,57 @@
 package org.kappatrail.tribology;
 
-import org.apache.commons.math3.distribution.NormalDistribution;
+import org.apache.commons.math3.special.Erf;
 
 /**
- * First-order uncertainty of κ in ln κ, from the laboratory's viscosity and the temperature: σ² =
- * (s40 σ(ln ν40))² + (sT σ(T))². The interval is κ·exp(±1.96 σ).
+ * Uncertainty of a viscosity ratio from that of the viscosity at 40 °C and of the temperature, by
+ * first-order propagation in ln κ.
  *
- * @param kappa κ, above 0
- * @param sigmaLn standard uncertainty of ln κ, at least 0
+ * <p>Units: κ and σ(ln κ) none. Source: GUM (JCGM 100:2008), 5.1.2, uncorrelated inputs; ln κ taken
+ * as normal.
+ *
+ * @param kappa the viscosity ratio, above 0
+ * @param sigmaLn standard deviation of ln κ, 0 or above
  */
 public record KappaUncertainty(double kappa, double sigmaLn) {
-  private static final double TWO_SIDED_95 = 1.96;
-  private static final NormalDistribution STANDARD = new NormalDistribution(null, 0, 1);
+  private static final double NORMAL_95 = 1.96;
 
   public KappaUncertainty {
-    Require.positive("κ", kappa, "");
-    Require.within("standard uncertainty of ln κ", sigmaLn, "", 0, Double.MAX_VALUE);
+    Require.positive("viscosity ratio", kappa, "");
+    Require.notNegative("σ of ln κ", sigmaLn, "");
   }
 
   /**
-   * Uncertainty from its two sources.
+   * Propagates both inputs.
    *
-   * @param kappa κ
-   * @param sigmaLnV40 standard uncertainty of ln ν40
-   * @param sensitivityToV40 ∂ln ν/∂ln ν40
-   * @param sensitivityToTemperature ∂ln ν/∂T, 1/°C
-   * @param sigmaTemperatureC standard uncertainty of the temperature, °C
+   * @param sensV40 ∂lnν/∂lnν40 at the operating temperature
+   * @param sensT ∂lnν/∂T at the operating temperature, per °C
    */
   public static KappaUncertainty of(
-      double kappa,
-      double sigmaLnV40,
-      double sensitivityToV40,
-      double sensitivityToTemperature,
-      double sigmaTemperatureC) {
-    return new KappaUncertainty(
-        kappa,
-        Math.hypot(sensitivityToV40 * sigmaLnV40, sensitivityToTemperature * sigmaTemperatureC));
+      double kappa, double sigmaLnV40, double sensV40, double sensT, double sigmaTemperatureC) {
+    Require.notNegative("σ of ln ν40", sigmaLnV40, "");
+    Require.notNegative("σ of temperature", sigmaTemperatureC, "°C");
+    Require.finite("∂lnν/∂lnν40", sensV40, "");
+    Require.finite("∂lnν/∂T", sensT, "per °C");
+    return new KappaUncertainty(kappa, Math.hypot(sensV40 * sigmaLnV40, sensT * sigmaTemperatureC));
   }
 
   /** Lower end of the 95 % interval. */
   public double low() {
-    return kappa * Math.exp(-TWO_SIDED_95 * sigmaLn);
+    return kappa * Math.exp(-NORMAL_95 * sigmaLn);
   }
 
   /** Upper end of the 95 % interval. */
   public double high() {
-    return kappa * Math.exp(TWO_SIDED_95 * sigmaLn);
+    return kappa * Math.exp(NORMAL_95 * sigmaLn);
   }
 
-  /** Probability that κ lies below a floor: Φ((ln floor − ln κ)/σ); 0 or 1 without uncertainty. */
+  /** Probability that the true ratio lies below a floor; 0 or 1 where nothing is uncertain. */
   public double probabilityBelow(double floor) {
-    Require.positive("κ floor", floor, "");
+    Require.positive("floor", floor, "");
+    double distance = Math.log(floor) - Math.log(kappa);
     if (sigmaLn == 0) {
-      return kappa < floor ? 1 : 0;
+      return distance > 0 ? 1 : 0;
     }
-    return STANDARD.cumulativeProbability(Math.log(floor / kappa) / sigmaLn);
+    return Erf.erfc(-distance / (sigmaLn * Math.sqrt(2))) / 2;
   }
 }

@@ -3,11 +3,11 @@ package org.kappatrail.tribology;
 import java.util.Arrays;
 import java.util.Optional;
 
-/** How oil reaches the bearings, which decides the formula of the contamination factor. */
+/** How a bearing gets its oil, as far as contamination is concerned. */
 public enum OilSupply {
-  /** Oil bath, or circulation without a filter of known ratio in line. */
+  /** Oil bath, or circulation without a filter in the feed line. */
   BATH("bath"),
-  /** Circulation through a filter in line before the bearings. */
+  /** Circulation with a filter in the line just before the bearing. */
   INLINE_FILTER("inline-filter");
 
   private final String label;
@@ -16,12 +16,14 @@ public enum OilSupply {
     this.label = label;
   }
 
-  /** The word used in files. */
-  public String label() {
-    return label;
+  /** The supply of a label; case and blanks at the ends do not matter. */
+  public static Optional<OilSupply> parse(String text) {
+    return Arrays.stream(values())
+        .filter(supply -> supply.label.equalsIgnoreCase(text.strip()))
+        .findFirst();
   }
 
-  public static Optional<OilSupply> parse(String label) {
-    return Arrays.stream(values()).filter(supply -> supply.label.equals(label)).findFirst();
+  public String label() {
+    return label;
   }
 }

@@ -1,149 +1,163 @@
 package org.kappatrail.tribology;
 
-import java.util.Locale;
 import java.util.OptionalDouble;
 
 /**
- * Viscosity of an oil at 40 and 100 °C and the law through both.
+ * The viscosity of an oil, registered or sampled, at every temperature.
  *
- * @param viscosity40Cst kinematic viscosity at 40 °C, mm²/s
- * @param viscosity100Cst kinematic viscosity at 100 °C, mm²/s
- * @param source where the second value comes from
- * @param law ASTM D341 through both points
+ * <p>Units: mm²/s and °C. The law is that of ASTM D341 through the viscosities at 40 and 100 °C.
+ * Where the laboratory gives no viscosity at 100 °C, it is the one at which the index equals that
+ * of the registered oil (ASTM D2270); where none from 2 mm²/s up does, the slope of the registered
+ * oil is kept.
+ *
+ * @param viscosity40Cst kinematic viscosity at 40 °C
+ * @param viscosity100Cst kinematic viscosity at 100 °C
+ * @param source where the viscosity at 100 °C comes from
+ * @param law the viscosity-temperature law
  */
 public record OilViscosity(
     double viscosity40Cst, double viscosity100Cst, Source source, AstmD341 law) {
+  private static final double COOL_C = 40;
+  private static final double HOT_C = 100;
 
-  private static final double STEP = 1e-4;
+  /**
+   * Half the step in ln ν40 over which the sensitivity is taken, about one σ of a laboratory. The
+   * linear interpolation in the table of ASTM D2270 has kinks; a far smaller step would show them.
+   */
+  private static final double HALF_STEP_LN = 0.005;
 
-  /** Where the viscosity at 100 °C comes from. */
+  /** Where a viscosity at 100 °C comes from, most direct first. */
   public enum Source {
-    /** The laboratory measured it. */
-    MEASURED,
-    /** It is where the oil has the viscosity index of the registered oil. */
-    INDEX,
-    /** The slope of the registered oil was kept. */
-    SLOPE;
+    MEASURED("measured"),
+    INDEX("index"),
+    SLOPE("slope");
 
-    /** The word used in files. */
+    private final String label;
+
+    Source(String label) {
+      this.label = label;
+    }
+
     public String label() {
-      return name().toLowerCase(Locale.ROOT);
+      return label;
     }
   }
 
-  /**
-   * An oil measured at both temperatures.
-   *
-   * @throws IllegalArgumentException where it does not thin with heat
-   */
-  public static OilViscosity measured(double viscosity40Cst, double viscosity100Cst) {
-    return of(viscosity40Cst, viscosity100Cst, Source.MEASURED);
-  }
-
-  /**
-   * An oil of the register, by its viscosity at 100 °C where given, else by its index.
-   *
-   * @throws IllegalArgumentException where both are missing, or no viscosity at 100 °C from 2 mm²/s
-   *     up has that index
-   */
-  public static OilViscosity register(
-      double viscosity40Cst, OptionalDouble viscosity100Cst, OptionalDouble viscosityIndex) {
-    if (viscosity100Cst.isPresent()) {
-      return measured(viscosity40Cst, viscosity100Cst.getAsDouble());
+  public OilViscosity {
+    Require.atLeast("viscosity at 100 °C", viscosity100Cst, AstmD341.LOWEST_CST, "mm²/s");
+    Require.finite("viscosity at 40 °C", viscosity40Cst, "mm²/s");
+    if (viscosity40Cst <= viscosity100Cst) {
+      throw new IllegalArgumentException(
+          "viscosity at 40 °C "
+              + viscosity40Cst
+              + " mm²/s: must be above the one at 100 °C, "
+              + viscosity100Cst
+              + " mm²/s");
     }
-    double index =
-        viscosityIndex.orElseThrow(
-            () ->
-                new IllegalArgumentException(
-                    "an oil needs its viscosity at 100 °C or its viscosity index"));
-    double solved =
-        AstmD2270.viscosity100Cst(viscosity40Cst, index)
-            .orElseThrow(
-                () ->
-                    new IllegalArgumentException(
-                        "no viscosity at 100 °C from 2 mm²/s up gives "
-                            + viscosity40Cst
-                            + " mm²/s at 40 °C the viscosity index "
-                            + index));
-    return of(viscosity40Cst, solved, Source.INDEX);
   }
 
-  /**
-   * An oil of which only the viscosity at 40 °C is known: with the viscosity index of the
-   * registered oil, or with its slope where that has no solution.
-   */
-  public static OilViscosity withIndexOf(double viscosity40Cst, OilViscosity registered) {
+  /** An oil with both viscosities given. */
+  public static OilViscosity measured(double v40, double v100) {
+    return through(v40, v100, Source.MEASURED);
+  }
+
+  /** A sample without a viscosity at 100 °C, of a registered oil. */
+  public static OilViscosity withIndexOf(double v40, OilViscosity registered) {
     OptionalDouble index = registered.viscosityIndex();
-    if (index.isPresent()) {
-      OptionalDouble solved = AstmD2270.viscosity100Cst(viscosity40Cst, index.getAsDouble());
-      if (solved.isPresent()) {
-        return of(viscosity40Cst, solved.getAsDouble(), Source.INDEX);
-      }
+    OptionalDouble v100 =
+        index.isPresent()
+            ? AstmD2270.viscosity100Cst(v40, index.getAsDouble())
+            : OptionalDouble.empty();
+    return v100.isPresent()
+        ? through(v40, v100.getAsDouble(), Source.INDEX)
+        : withSlope(v40, registered.law().b());
+  }
+
+  /**
+   * An oil as the register gives it: by its viscosity at 100 °C, or else by its index.
+   *
+   * @throws IllegalArgumentException where both are absent, or no viscosity at 100 °C has the index
+   */
+  public static OilViscosity register(double v40, OptionalDouble v100, OptionalDouble vi) {
+    if (v100.isPresent()) {
+      return measured(v40, v100.getAsDouble());
     }
-    AstmD341 law = AstmD341.withSlope(registered.law().b(), 40, viscosity40Cst);
-    return new OilViscosity(viscosity40Cst, law.viscosityCst(100), Source.SLOPE, law);
+    if (vi.isEmpty()) {
+      throw new IllegalArgumentException(
+          "oil of " + v40 + " mm²/s at 40 °C: give its viscosity at 100 °C or its viscosity index");
+    }
+    OptionalDouble solved = AstmD2270.viscosity100Cst(v40, vi.getAsDouble());
+    if (solved.isEmpty()) {
+      throw new IllegalArgumentException(
+          String.join(
+              " ",
+              "viscosity index " + vi.getAsDouble() + ":",
+              "no viscosity at 100 °C from 2 mm²/s up has it with",
+              v40 + " mm²/s at 40 °C; give the viscosity at 100 °C instead"));
+    }
+    return through(v40, solved.getAsDouble(), Source.INDEX);
   }
 
   /**
    * An oil between two, linear in both viscosities.
    *
-   * @param weight share of the second, 0 to 1
+   * @param weight 0 for the first oil, 1 for the second
    */
-  public static OilViscosity interpolate(OilViscosity first, OilViscosity second, double weight) {
-    Require.within("weight", weight, "", 0, 1);
+  public static OilViscosity interpolate(OilViscosity a, OilViscosity b, double weight) {
+    Require.within("weight", weight, 0, 1, "");
     if (weight == 0) {
-      return first;
+      return a;
     }
     if (weight == 1) {
-      return second;
+      return b;
     }
-    return of(
-        first.viscosity40Cst + weight * (second.viscosity40Cst - first.viscosity40Cst),
-        first.viscosity100Cst + weight * (second.viscosity100Cst - first.viscosity100Cst),
-        first.source.compareTo(second.source) >= 0 ? first.source : second.source);
+    Source source = a.source.compareTo(b.source) >= 0 ? a.source : b.source;
+    return through(
+        a.viscosity40Cst + weight * (b.viscosity40Cst - a.viscosity40Cst),
+        a.viscosity100Cst + weight * (b.viscosity100Cst - a.viscosity100Cst),
+        source);
   }
 
-  /** Viscosity index; empty below 2 mm²/s at 100 °C. */
-  public OptionalDouble viscosityIndex() {
-    return viscosity100Cst >= AstmD2270.LEAST_VISCOSITY_100_CST
-        ? OptionalDouble.of(AstmD2270.viscosityIndex(viscosity40Cst, viscosity100Cst))
-        : OptionalDouble.empty();
-  }
-
+  /** Kinematic viscosity at a temperature. */
   public double viscosityCst(double temperatureC) {
     return law.viscosityCst(temperatureC);
   }
 
+  /** The viscosity index; empty where the viscosity at 100 °C is below 2 mm²/s. */
+  public OptionalDouble viscosityIndex() {
+    return viscosity100Cst < AstmD2270.LOWEST_100_CST
+        ? OptionalDouble.empty()
+        : OptionalDouble.of(AstmD2270.viscosityIndex(viscosity40Cst, viscosity100Cst));
+  }
+
   /**
-   * ∂ln ν/∂ln ν40 at a temperature, the viscosity index held; the slope held where there is no
-   * index. Central difference over ±0.01 %.
+   * ∂lnν/∂lnν40 at a temperature with the oil's viscosity index held, or its slope where the index
+   * is undefined.
    */
   public double sensitivityToV40(double temperatureC) {
-    double up = withIndexOf(viscosity40Cst * Math.exp(STEP), this).viscosityCst(temperatureC);
-    double down = withIndexOf(viscosity40Cst * Math.exp(-STEP), this).viscosityCst(temperatureC);
-    return Math.log(up / down) / (2 * STEP);
-  }
-
-  /** ∂ln ν/∂T at a temperature, 1/°C. Central difference over ±0.01 °C. */
-  public double sensitivityToTemperature(double temperatureC) {
-    double step = 0.01;
-    return Math.log(law.viscosityCst(temperatureC + step) / law.viscosityCst(temperatureC - step))
-        / (2 * step);
-  }
-
-  private static OilViscosity of(double viscosity40Cst, double viscosity100Cst, Source source) {
-    if (!(viscosity100Cst < viscosity40Cst)) {
-      throw new IllegalArgumentException(
-          "viscosity at 100 °C ("
-              + viscosity100Cst
-              + " mm²/s) must be below the one at 40 °C ("
-              + viscosity40Cst
-              + " mm²/s)");
+    double thickerV40 = viscosity40Cst * Math.exp(HALF_STEP_LN);
+    double thinnerV40 = viscosity40Cst * Math.exp(-HALF_STEP_LN);
+    OilViscosity thicker = withIndexOf(thickerV40, this);
+    OilViscosity thinner = withIndexOf(thinnerV40, this);
+    if (thicker.source != thinner.source) {
+      thicker = withSlope(thickerV40, law.b());
+      thinner = withSlope(thinnerV40, law.b());
     }
-    return new OilViscosity(
-        viscosity40Cst,
-        viscosity100Cst,
-        source,
-        AstmD341.through(40, viscosity40Cst, 100, viscosity100Cst));
+    return Math.log(thicker.viscosityCst(temperatureC) / thinner.viscosityCst(temperatureC))
+        / (2 * HALF_STEP_LN);
+  }
+
+  /** ∂lnν/∂T at a temperature, per °C, below 0. */
+  public double sensitivityToTemperature(double temperatureC) {
+    return law.relativeSlopePerC(temperatureC);
+  }
+
+  private static OilViscosity through(double v40, double v100, Source source) {
+    return new OilViscosity(v40, v100, source, AstmD341.through(COOL_C, v40, HOT_C, v100));
+  }
+
+  private static OilViscosity withSlope(double v40, double b) {
+    AstmD341 law = AstmD341.withSlope(b, COOL_C, v40);
+    return new OilViscosity(v40, law.viscosityCst(HOT_C), Source.SLOPE, law);
   }
 }

@@ -6,44 +6,38 @@ import java.io.InputStream;
 import java.io.InputStreamReader;
 import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
-import java.util.ArrayList;
 import java.util.List;
 
-/** Reads a published table from the program's own resources: {@code #} lines, a header, rows. */
+/**
+ * A published table kept beside the classes: one {@code #} line with the source, a header line,
+ * then plain comma-separated rows.
+ */
 final class PublishedTable {
   private PublishedTable() {}
 
-  /** Rows of a resource beside this class, split at commas; comments and header left out. */
-  static List<String[]> rows(String resource) {
+  /** The rows below the header, cell by cell; an empty cell is an empty string. */
+  static List<List<String>> rows(String resource) {
     try (InputStream in = PublishedTable.class.getResourceAsStream(resource)) {
       if (in == null) {
-        throw new IllegalStateException("the program lacks its table " + resource);
+        throw new IllegalStateException("table " + resource + " is missing from the program");
       }
-      BufferedReader lines = new BufferedReader(new InputStreamReader(in, StandardCharsets.UTF_8));
-      List<String[]> rows = new ArrayList<>();
-      boolean header = true;
-      for (String line = lines.readLine(); line != null; line = lines.readLine()) {
-        if (line.startsWith("#") || line.isBlank()) {
-          continue;
-        }
-        if (header) {
-          header = false;
-        } else {
-          rows.add(line.split(",", -1));
-        }
-      }
-      return rows;
+      BufferedReader reader = new BufferedReader(new InputStreamReader(in, StandardCharsets.UTF_8));
+      return reader
+          .lines()
+          .filter(line -> !line.isBlank() && !line.startsWith("#"))
+          .skip(1)
+          .map(line -> List.of(line.split(",", -1)))
+          .toList();
     } catch (IOException e) {
-      throw new UncheckedIOException(e);
+      throw new UncheckedIOException("table " + resource + " cannot be read", e);
     }
   }
 
-  /** A number, or a fraction such as {@code 1/3}. */
-  static double number(String cell) {
-    int slash = cell.indexOf('/');
-    return slash < 0
-        ? Double.parseDouble(cell)
-        : Double.parseDouble(cell.substring(0, slash))
-            / Double.parseDouble(cell.substring(slash + 1));
+  static double number(List<String> row, int column) {
+    return Double.parseDouble(row.get(column));
+  }
+
+  static int whole(List<String> row, int column) {
+    return Integer.parseInt(row.get(column));
   }
 }

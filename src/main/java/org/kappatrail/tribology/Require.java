@@ -1,25 +1,51 @@
 package org.kappatrail.tribology;
 
-import java.util.Locale;
-
-/** Range checks; each message carries name, value, unit and limit. */
+/** Refusals in one wording: what, value, limit, unit. */
 final class Require {
   private Require() {}
 
-  static double within(String name, double value, String unit, double low, double high) {
-    if (!(value >= low && value <= high)) {
-      throw new IllegalArgumentException(
-          String.format(
-              Locale.ROOT, "%s is %s %s, must be from %s to %s", name, value, unit, low, high));
+  static double finite(String what, double value, String unit) {
+    if (!Double.isFinite(value)) {
+      throw refused(what, value, "must be a finite number", unit);
     }
     return value;
   }
 
-  static double positive(String name, double value, String unit) {
-    if (!(value > 0) || Double.isInfinite(value)) {
-      throw new IllegalArgumentException(
-          String.format(Locale.ROOT, "%s is %s %s, must be a number above 0", name, value, unit));
+  static double positive(String what, double value, String unit) {
+    finite(what, value, unit);
+    if (value <= 0) {
+      throw refused(what, value, "must be above 0", unit);
     }
     return value;
+  }
+
+  static double notNegative(String what, double value, String unit) {
+    finite(what, value, unit);
+    if (value < 0) {
+      throw refused(what, value, "must not be below 0", unit);
+    }
+    return value;
+  }
+
+  static double atLeast(String what, double value, double limit, String unit) {
+    finite(what, value, unit);
+    if (value < limit) {
+      throw refused(what, value, "must not be below " + limit, unit);
+    }
+    return value;
+  }
+
+  static double within(String what, double value, double low, double high, String unit) {
+    finite(what, value, unit);
+    if (value < low || value > high) {
+      throw refused(what, value, "must lie within " + low + " and " + high, unit);
+    }
+    return value;
+  }
+
+  private static IllegalArgumentException refused(
+      String what, double value, String rule, String unit) {
+    String suffix = unit.isEmpty() ? "" : " " + unit;
+    return new IllegalArgumentException(what + " " + value + suffix + ": " + rule + suffix);
   }
 }
