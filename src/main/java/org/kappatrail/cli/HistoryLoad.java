@@ -1,7 +1,9 @@
 package org.kappatrail.cli;
 
 import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.Clock;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
@@ -11,12 +13,15 @@ import org.kappatrail.duty.DutyLog;
 import org.kappatrail.duty.DutyLogs;
 import org.kappatrail.duty.DutyOptions;
 import org.kappatrail.history.FileAccount;
+import org.kappatrail.history.NearestName;
 import org.kappatrail.history.PlantHistory;
 import org.kappatrail.history.Problem;
 import org.kappatrail.history.Sample;
 import org.kappatrail.history.UnusableInputException;
+import org.kappatrail.intake.Fingerprint;
 import org.kappatrail.intake.HistoryReader;
 import org.kappatrail.intake.Intake;
+import org.kappatrail.report.Manifest;
 import org.kappatrail.review.AssetReview;
 import org.kappatrail.review.Progress;
 import org.kappatrail.review.Review;
@@ -24,14 +29,18 @@ import org.kappatrail.review.Reviewer;
 
 /** Reads a history folder and reviews it: what the commands share. */
 final class HistoryLoad {
+  /** East of the clock's zone it may already be the next day. */
+  private static final int ZONE_MARGIN_DAYS = 1;
+
   private final Path folder;
   private final Intake intake;
   private final PlantHistory chosen;
   private final LocalDate asOf;
 
-  HistoryLoad(HistoryOptions options) throws IOException {
+  HistoryLoad(HistoryOptions options, Clock clock) {
     folder = options.folder();
-    intake = HistoryReader.read(folder);
+    intake =
+        HistoryReader.read(folder, Optional.of(LocalDate.now(clock).plusDays(ZONE_MARGIN_DAYS)));
     chosen = choose(intake.history(), options.assets());
     LocalDate given = options.asOf();
     asOf =
@@ -57,8 +66,7 @@ final class HistoryLoad {
 
   /** Reviews the chosen assets. */
   Review review(Progress progress) {
-    try (DutyLog log =
-        DutyLogs.open(folder, intake.settings(), chosen, asOf, DutyOptions.defaults())) {
+    try (DutyLog log = openLog()) {
       List<AssetReview> assets =
           new Reviewer(chosen, intake.settings(), asOf, progress).review(log);
       List<Problem> problems = new ArrayList<>(intake.problems());
@@ -69,6 +77,27 @@ final class HistoryLoad {
     }
   }
 
+  /** The logs of the whole history, so that no log counts as unknown for not being chosen. */
+  DutyLog openLog() {
+    return DutyLogs.open(folder, intake.settings(), intake.history(), asOf, DutyOptions.defaults());
+  }
+
+  /** What the review was made from. */
+  Manifest manifest(Review review) throws IOException {
+    List<Path> files = new ArrayList<>(intake.inputFiles());
+    for (FileAccount account : review.files()) {
+      Path file = folder.resolve(account.file());
+      if (account.kind() == FileAccount.Kind.TEMPERATURES && Files.isRegularFile(file)) {
+        files.add(file);
+      }
+    }
+    List<Manifest.Input> inputs =
+        Fingerprint.of(folder, files).stream()
+            .map(print -> new Manifest.Input(print.file(), print.bytes(), print.sha256()))
+            .toList();
+    return new Manifest(ProgramVersion.number(), inputs);
+  }
+
   private static PlantHistory choose(PlantHistory history, List<String> assets) {
     if (assets.isEmpty()) {
       return history;
@@ -76,7 +105,8 @@ final class HistoryLoad {
     TreeSet<String> wanted = new TreeSet<>(assets);
     for (String asset : wanted) {
       if (history.findAsset(asset).isEmpty()) {
-        Optional<String> nearest = Nearest.to(asset, history.assets().stream().map(a -> a.id()).toList());
+        Optional<String> nearest =
+            NearestName.of(asset, history.assets().stream().map(a -> a.id()).toList());
         throw new UnusableInputException(
             "no asset '"
                 + asset

@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.io.PrintWriter;
 import java.nio.file.AccessDeniedException;
 import java.nio.file.FileSystemException;
+import java.time.Clock;
 import org.kappatrail.history.UnusableInputException;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
@@ -48,12 +49,13 @@ public final class Kappatrail implements Runnable {
    * @param out results
    * @param err progress and diagnostics
    * @param interactive true on a terminal
+   * @param clock tells which sampling dates lie in the future
    */
   @SuppressWarnings("NullAway.Init") // picocli fills the spec
-  public Kappatrail(PrintWriter out, PrintWriter err, boolean interactive) {
+  public Kappatrail(PrintWriter out, PrintWriter err, boolean interactive, Clock clock) {
     this.out = out;
     this.err = err;
-    this.terminal = new Terminal(out, err, interactive);
+    this.terminal = new Terminal(out, err, interactive, clock);
   }
 
   /** Runs a command line and gives the exit code. */
@@ -84,8 +86,7 @@ public final class Kappatrail implements Runnable {
     CommandLine line = problem.getCommandLine();
     line.getErr().println("kappatrail: " + problem.getMessage());
     if (!CommandLine.UnmatchedArgumentException.printSuggestions(problem, line.getErr())) {
-      line.getErr()
-          .println("Try '" + line.getCommandSpec().qualifiedName() + " --help'.");
+      line.getErr().println("Try '" + line.getCommandSpec().qualifiedName() + " --help'.");
     }
     return ExitCodes.USAGE;
   }
@@ -95,8 +96,8 @@ public final class Kappatrail implements Runnable {
       err.println("kappatrail: " + problem.getMessage());
       return ExitCodes.UNUSABLE_INPUT;
     }
-    if (problem instanceof IOException) {
-      err.println("kappatrail: " + reason((IOException) problem));
+    if (problem instanceof IOException failure) {
+      err.println("kappatrail: " + reason(failure));
       return ExitCodes.UNUSABLE_INPUT;
     }
     err.println(
@@ -120,5 +121,4 @@ public final class Kappatrail implements Runnable {
     }
     return String.valueOf(problem.getMessage());
   }
-
 }

@@ -1,7 +1,9 @@
 package org.kappatrail.cli;
 
+import java.io.Console;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
+import java.time.Clock;
 
 /** Program entry: runs a command and exits with its code. */
 public final class Main {
@@ -9,11 +11,30 @@ public final class Main {
 
   public static void main(String[] args) {
     System.setProperty("java.awt.headless", "true");
+    // the workbook library's logging interface would otherwise complain on stderr
+    System.setProperty(
+        "log4j2.loggerContextFactory",
+        "org.apache.logging.log4j.simple.SimpleLoggerContextFactory");
+    System.setProperty("org.apache.logging.log4j.simplelog.level", "OFF");
     PrintWriter out = new PrintWriter(System.out, false, StandardCharsets.UTF_8);
     PrintWriter err = new PrintWriter(System.err, true, StandardCharsets.UTF_8);
-    int code = new Kappatrail(out, err, System.console() != null).run(args);
+    int code = new Kappatrail(out, err, onTerminal(), Clock.systemUTC()).run(args);
     out.flush();
     err.flush();
     System.exit(code);
+  }
+
+  /** From Java 22 on there is a console also where there is no terminal. */
+  @SuppressWarnings("SystemConsoleNull")
+  private static boolean onTerminal() {
+    Console console = System.console();
+    if (console == null) {
+      return false;
+    }
+    try {
+      return (boolean) Console.class.getMethod("isTerminal").invoke(console);
+    } catch (ReflectiveOperationException olderJava) {
+      return true;
+    }
   }
 }

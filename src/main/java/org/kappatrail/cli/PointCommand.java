@@ -41,11 +41,7 @@ final class PointCommand implements Callable<Integer> {
       description = "Operating temperature, °C.")
   private double temperatureC;
 
-  @Option(
-      names = "--speed",
-      required = true,
-      paramLabel = "RPM",
-      description = "Speed, r/min.")
+  @Option(names = "--speed", required = true, paramLabel = "RPM", description = "Speed, r/min.")
   private double speedRpm;
 
   @ArgGroup(exclusive = true, multiplicity = "1")
@@ -114,8 +110,7 @@ final class PointCommand implements Callable<Integer> {
       for (Working.Line line : Working.of(point)) {
         terminal
             .out()
-            .printf(
-                Locale.ROOT, "%-14s %-22s %s%n", line.quantity(), line.value(), line.from());
+            .printf(Locale.ROOT, "%-14s %-22s %s%n", line.quantity(), line.value(), line.from());
       }
       return ExitCodes.DONE;
     } catch (IllegalArgumentException e) {

@@ -1,7 +1,8 @@
 package org.kappatrail.cli;
 
+import java.io.IOException;
 import java.io.PrintWriter;
-import java.util.function.Consumer;
+import java.time.Clock;
 import me.tongfei.progressbar.ConsoleProgressBarConsumer;
 import me.tongfei.progressbar.ProgressBar;
 import me.tongfei.progressbar.ProgressBarBuilder;
@@ -15,17 +16,23 @@ import org.kappatrail.review.Progress;
  * @param out results
  * @param err progress and diagnostics
  * @param interactive true on a terminal: only there a progress bar is drawn
+ * @param clock tells which sampling dates lie in the future; nothing else depends on it
  */
-record Terminal(PrintWriter out, PrintWriter err, boolean interactive) {
+record Terminal(PrintWriter out, PrintWriter err, boolean interactive, Clock clock) {
+
+  /** Work that reports its progress. */
+  interface Work {
+    void run(Progress progress) throws IOException;
+  }
 
   /** Runs something with a progress bar on a terminal, silently elsewhere. */
-  void withProgress(Consumer<Progress> work) {
+  void withProgress(Work work) throws IOException {
     if (!interactive) {
-      work.accept(Progress.SILENT);
+      work.run(Progress.SILENT);
       return;
     }
     try (Bars bars = new Bars()) {
-      work.accept(bars);
+      work.run(bars);
     }
   }
 

@@ -10,6 +10,7 @@ import org.kappatrail.history.Bearing;
 import org.kappatrail.history.BearingKey;
 import org.kappatrail.history.ExportMapping;
 import org.kappatrail.history.ExportMapping.Tag;
+import org.kappatrail.history.NearestName;
 import org.kappatrail.history.Settings;
 import org.kappatrail.history.UnusableInputException;
 

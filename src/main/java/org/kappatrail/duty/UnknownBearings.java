@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Map;
 import org.kappatrail.history.BearingKey;
 import org.kappatrail.history.ExportMapping;
+import org.kappatrail.history.NearestName;
 import org.kappatrail.history.Problem;
 import org.kappatrail.history.SourceLine;
 

@@ -72,14 +72,35 @@ public record Sample(
     return value == null ? OptionalDouble.empty() : OptionalDouble.of(value.forArithmetic());
   }
 
-  /** Cleanliness code: from the particle counts where any is given, else as stated. */
+  /**
+   * Cleanliness code: from the particle counts where those for 6 and 14 µm are given, else as
+   * stated, else from what counts there are. Counts that grow with the size, which no sample can
+   * have, give none.
+   */
   public Optional<CleanlinessCode> cleanliness() {
     OptionalDouble count4 = arithmetic(SampleColumns.PARTICLES_4UM);
     OptionalDouble count6 = arithmetic(SampleColumns.PARTICLES_6UM);
     OptionalDouble count14 = arithmetic(SampleColumns.PARTICLES_14UM);
-    if (count4.isEmpty() && count6.isEmpty() && count14.isEmpty()) {
+    boolean counted = count6.isPresent() && count14.isPresent();
+    boolean any = counted || count4.isPresent() || count6.isPresent() || count14.isPresent();
+    if (!any || (!counted && statedCode.isPresent())) {
       return statedCode;
     }
-    return Optional.of(Iso4406.code(count4, count6, count14));
+    return countsFallWithSize() ? Optional.of(Iso4406.code(count4, count6, count14)) : statedCode;
+  }
+
+  /** False where a count for larger particles is above one for smaller ones. */
+  public boolean countsFallWithSize() {
+    double above = Double.POSITIVE_INFINITY;
+    for (String column : SampleColumns.PARTICLES) {
+      OptionalDouble count = arithmetic(column);
+      if (count.isPresent()) {
+        if (count.getAsDouble() > above) {
+          return false;
+        }
+        above = count.getAsDouble();
+      }
+    }
+    return true;
   }
 }

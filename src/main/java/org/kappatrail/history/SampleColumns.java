@@ -24,6 +24,10 @@ public final class SampleColumns {
   public static final String TEMPERATURE = "temperature_c";
   public static final String IRON = "iron_ppm";
 
+  /** Particle counts, smallest size first. */
+  public static final List<String> PARTICLES =
+      List.of(PARTICLES_4UM, PARTICLES_6UM, PARTICLES_14UM);
+
   /** Ending of every element column, in mg/kg. */
   public static final String ELEMENT_SUFFIX = "_ppm";
 

@@ -51,7 +51,7 @@ final class FilmFindings {
               FindingKind.NEAR_FLOOR,
               where + " reaches below the floor " + floor + "; probability " + chance + " %"));
     }
-    if (film.kappa() > ViscosityRatio.MOST_FOR_LIFE) {
+    if (film.kappa() > ViscosityRatio.HIGHEST_FOR_LIFE) {
       findings.add(
           finding(
               review,

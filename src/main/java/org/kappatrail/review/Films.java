@@ -93,6 +93,6 @@ final class Films {
     return AstmD445Precision.sigmaLn(
         percent.isPresent()
             ? percent.getAsDouble() / 100
-            : AstmD445Precision.relativeReproducibility(viscosity40Cst));
+            : AstmD445Precision.reproducibilityPercent(viscosity40Cst) / 100);
   }
 }

@@ -67,14 +67,16 @@ public final class Reviewer {
     return history.samples().stream().map(Sample::day).max(LocalDate::compareTo);
   }
 
-  /** Reads the logs once and reviews every asset of the history. */
+  /** Reads the logs once and reviews every asset of the history; logs of others are passed over. */
   public List<AssetReview> review(DutyLog log) {
     Map<BearingKey, BearingReview> bearings = new HashMap<>();
     Map<BearingKey, List<Finding>> logFindings = new HashMap<>();
     int total = history.bearings().size();
     log.forEachBearing(
         duty -> {
-          review(duty, bearings, logFindings);
+          if (inputs.containsKey(duty.bearing().asset())) {
+            review(duty, bearings, logFindings);
+          }
           progress.at("bearings", bearings.size(), total);
         });
     for (Bearing bearing : history.bearings()) {

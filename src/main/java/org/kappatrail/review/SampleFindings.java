@@ -134,7 +134,7 @@ final class SampleFindings {
   }
 
   private void outsidePrecision(Sample latest, double v40) {
-    boolean inside = v40 >= AstmD445Precision.LEAST_CST && v40 <= AstmD445Precision.MOST_CST;
+    boolean inside = v40 >= AstmD445Precision.LOWEST_CST && v40 <= AstmD445Precision.HIGHEST_CST;
     if (inside || settings.laboratory().reproducibilityPercent().isPresent()) {
       return;
     }
@@ -146,8 +146,7 @@ final class SampleFindings {
             "%s mm²/s at 40 °C is outside 25 to 150, where ASTM D445 states its precision for used"
                 + " oil; %s %% is assumed, set laboratory.viscosity-reproducibility-percent if the"
                 + " laboratory's is known",
-            Say.viscosity(v40),
-            Say.significant(AstmD445Precision.relativeReproducibility(v40) * 100, 2)));
+            Say.viscosity(v40), Say.significant(AstmD445Precision.reproducibilityPercent(v40), 2)));
   }
 
   private void water(Sample latest) {

@@ -32,7 +32,7 @@ final class UnrecordedChange {
       double steady = i >= 2 ? shift(samples.get(i - 2), fresh) : before;
       double after = shift(samples.get(i), fresh);
       double confirmed = i + 1 < samples.size() ? shift(samples.get(i + 1), fresh) : after;
-      double real = AstmD445Precision.relativeReproducibility(fresh) * fresh;
+      double real = AstmD445Precision.reproducibilityPercent(fresh) / 100 * fresh;
       boolean stood = Math.abs(before) > real && before * steady > 0 && Math.abs(steady) > real;
       boolean jumped = Math.abs(after) < Math.abs(before) / 2 && Math.abs(before - after) > real;
       if (stood

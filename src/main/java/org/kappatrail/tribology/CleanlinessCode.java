@@ -132,9 +132,20 @@ public record CleanlinessCode(Part c4, Part c6, Part c14) {
     return new CleanlinessCode(c4.cleanerBy(codes), c6.cleanerBy(codes), c14.cleanerBy(codes));
   }
 
+  /** True where any part that both have is dirtier than the limit's. */
+  public boolean dirtierThan(CleanlinessCode limit) {
+    return dirtier(c4, limit.c4) || dirtier(c6, limit.c6) || dirtier(c14, limit.c14);
+  }
+
   @Override
   public String toString() {
     return c4 + "/" + c6 + "/" + c14;
+  }
+
+  private static boolean dirtier(Part part, Part limit) {
+    return part.number().isPresent()
+        && limit.number().isPresent()
+        && part.effectiveNumber().getAsInt() > limit.effectiveNumber().getAsInt();
   }
 
   private static Part parsePart(String cell) {

@@ -11,8 +11,11 @@ public enum LubricationRegime {
   MIXED("mixed"),
   FULL_FILM("full film");
 
-  private static final double MIXED_FROM = 0.1;
-  private static final double FULL_FILM_FROM = 1;
+  /** κ from which the regime is mixed. */
+  public static final double MIXED_FROM = 0.1;
+
+  /** κ from which the film is full. */
+  public static final double FULL_FILM_FROM = 1;
 
   private final String label;
 

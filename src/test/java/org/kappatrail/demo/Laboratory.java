@@ -20,8 +20,8 @@ record Laboratory(String label, double bias, int leastWaterPpm, String missing) 
 
   /** ν40 as reported: this laboratory's bias, and the repeatability of a single result. */
   String viscosity40(double trueCst, Noise noise) {
-    double reproducibility = AstmD445Precision.relativeReproducibility(trueCst) / 2.77;
-    double repeatability = AstmD445Precision.relativeRepeatability(trueCst) / 2.77;
+    double reproducibility = AstmD445Precision.reproducibilityPercent(trueCst) / 277;
+    double repeatability = AstmD445Precision.repeatabilityPercent(trueCst) / 277;
     double between = Math.sqrt(reproducibility * reproducibility - repeatability * repeatability);
     double value = trueCst * Math.exp(bias * between + repeatability * noise.gaussian());
     return decimals(value, value >= 100 ? 1 : 2);

@@ -88,8 +88,8 @@ final class ParticlePanel {
     return sample
         .cleanliness()
         .map(part)
-        .filter(found -> found.effective().isPresent())
-        .map(found -> OptionalDouble.of(found.effective().getAsInt()))
+        .filter(found -> found.effectiveNumber().isPresent())
+        .map(found -> OptionalDouble.of(found.effectiveNumber().getAsInt()))
         .orElse(OptionalDouble.empty());
   }
 }

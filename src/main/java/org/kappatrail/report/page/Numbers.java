@@ -7,11 +7,11 @@ import java.util.Locale;
 import java.util.OptionalDouble;
 
 /** Numbers as people read them; unknown is empty. */
-final class Numbers {
+public final class Numbers {
   private Numbers() {}
 
   /** A number with a number of significant digits and no exponent. */
-  static String significant(double value, int digits) {
+  public static String significant(double value, int digits) {
     if (value == 0) {
       return "0";
     }
@@ -20,28 +20,28 @@ final class Numbers {
     return rounded.scale() < 0 ? rounded.setScale(0).toPlainString() : rounded.toPlainString();
   }
 
-  static String significant(OptionalDouble value, int digits) {
+  public static String significant(OptionalDouble value, int digits) {
     return value.isPresent() ? significant(value.getAsDouble(), digits) : "";
   }
 
   /** A number with a number of decimals. */
-  static String fixed(double value, int decimals) {
+  public static String fixed(double value, int decimals) {
     return String.format(Locale.ROOT, "%." + decimals + "f", value);
   }
 
-  static String fixed(OptionalDouble value, int decimals) {
+  public static String fixed(OptionalDouble value, int decimals) {
     return value.isPresent() ? fixed(value.getAsDouble(), decimals) : "";
   }
 
   /** A relative change in percent with its sign; the minus is U+2212. */
-  static String percent(double fraction) {
+  public static String percent(double fraction) {
     String number = fixed(Math.abs(fraction) * 100, 0);
     String sign = number.equals("0") ? "" : fraction < 0 ? "−" : "+";
     return sign + number + " %";
   }
 
   /** A whole number with thin spaces between thousands. */
-  static String grouped(double value) {
+  public static String grouped(double value) {
     String digits = fixed(value, 0);
     StringBuilder text = new StringBuilder();
     for (int i = 0; i < digits.length(); i++) {
@@ -54,7 +54,7 @@ final class Numbers {
     return text.toString();
   }
 
-  static String grouped(OptionalDouble value) {
+  public static String grouped(OptionalDouble value) {
     return value.isPresent() ? grouped(value.getAsDouble()) : "";
   }
 }

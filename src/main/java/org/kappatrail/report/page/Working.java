@@ -94,8 +94,7 @@ public final class Working {
                 + ", "
                 + Numbers.significant(in.oil().law().b(), 6),
             "ASTM D341: log log (ν + 0.7) = A − B log T through both points"));
-    lines.add(
-        new Line("T", Numbers.fixed(in.temperatureC(), 2) + " °C", in.temperatureFrom()));
+    lines.add(new Line("T", Numbers.fixed(in.temperatureC(), 2) + " °C", in.temperatureFrom()));
     lines.add(new Line("n", Numbers.significant(in.speedRpm(), 5) + " r/min", in.speedFrom()));
     lines.add(new Line("ν", cst(film.operatingCst(), 5), "ASTM D341 at T"));
     lines.add(new Line("Dpw", Numbers.significant(in.pitchMm(), 5) + " mm", in.pitchFrom()));

@@ -1,0 +1,90 @@
+package org.kappatrail.cli;
+
+import java.io.PrintWriter;
+import java.util.List;
+import java.util.Locale;
+import java.util.Map;
+import java.util.Optional;
+import java.util.TreeMap;
+import org.kappatrail.history.Problem;
+import org.kappatrail.report.page.Numbers;
+import org.kappatrail.review.AssetReview;
+import org.kappatrail.review.BearingReview;
+import org.kappatrail.review.Film;
+import org.kappatrail.review.KappaPoint;
+import org.kappatrail.review.Level;
+import org.kappatrail.review.Review;
+
+/** The review in a few lines for the terminal. */
+final class ReviewSummary {
+  private static final int MOST_ASSETS = 20;
+
+  private final Review review;
+
+  ReviewSummary(Review review) {
+    this.review = review;
+  }
+
+  void print(PrintWriter out) {
+    String site = review.settings().site();
+    out.println(
+        (site.isEmpty() ? "Review" : site)
+            + ", state of "
+            + review.asOf()
+            + ": "
+            + review.assets().size()
+            + " assets, "
+            + review.assets().stream().mapToInt(asset -> asset.bearings().size()).sum()
+            + " bearings, "
+            + review.assets().stream().mapToInt(asset -> asset.samples().size()).sum()
+            + " samples");
+    List<AssetReview> troubled =
+        review.worstFirst().stream()
+            .filter(asset -> asset.level().filter(level -> level != Level.CLEAR).isPresent())
+            .toList();
+    for (AssetReview asset : troubled.subList(0, Math.min(MOST_ASSETS, troubled.size()))) {
+      asset.governing().ifPresent(bearing -> line(out, asset, bearing));
+    }
+    if (troubled.size() > MOST_ASSETS) {
+      out.println("  and " + (troubled.size() - MOST_ASSETS) + " more");
+    }
+    long clear =
+        review.assets().stream()
+            .filter(asset -> asset.level().filter(level -> level == Level.CLEAR).isPresent())
+            .count();
+    long unknown = review.assets().stream().filter(asset -> asset.level().isEmpty()).count();
+    out.println("  " + clear + " clear" + (unknown == 0 ? "" : ", " + unknown + " without a κ"));
+    problems(out);
+  }
+
+  private static void line(PrintWriter out, AssetReview asset, BearingReview bearing) {
+    Optional<Film> film = bearing.latestFilm().flatMap(KappaPoint::film);
+    film.ifPresent(
+        known ->
+            out.printf(
+                Locale.ROOT,
+                "  %-6s %s %s: κ %s (%s to %s), %s%n",
+                known.level().label(),
+                asset.asset().id(),
+                bearing.bearing().id(),
+                Numbers.significant(known.kappa(), 3),
+                Numbers.significant(known.uncertainty().low(), 3),
+                Numbers.significant(known.uncertainty().high(), 3),
+                known.regime().label()));
+  }
+
+  private void problems(PrintWriter out) {
+    if (review.problems().isEmpty()) {
+      return;
+    }
+    Map<String, Long> byFile = new TreeMap<>();
+    for (Problem problem : review.problems()) {
+      byFile.merge(problem.source().file(), 1L, Long::sum);
+    }
+    out.println(
+        review.problems().size()
+            + (review.problems().size() == 1 ? " problem" : " problems")
+            + " in the inputs, left out (problems.csv has each):");
+    byFile.forEach((file, count) -> out.println("  " + file + ": " + count));
+  }
+}
