@@ -13,6 +13,7 @@ import java.util.stream.Stream;
 import org.kappatrail.report.chart.AssetChart;
 import org.kappatrail.report.chart.ChartFiles;
 import org.kappatrail.report.chart.Drawing;
+import org.kappatrail.report.page.FileNames;
 import org.kappatrail.report.page.Page;
 import org.kappatrail.report.table.CsvFile;
 import org.kappatrail.report.table.ReviewTables;

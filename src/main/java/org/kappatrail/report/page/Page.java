@@ -7,7 +7,6 @@ import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Map;
 import org.kappatrail.history.Problem;
-import org.kappatrail.report.FileNames;
 import org.kappatrail.review.AssetReview;
 import org.kappatrail.review.Level;
 import org.kappatrail.review.Review;

@@ -1,4 +1,4 @@
-package org.kappatrail.report;
+package org.kappatrail.report.page;
 
 import java.util.Collections;
 import java.util.HashSet;
