@@ -19,6 +19,9 @@ import org.kappatrail.tribology.Iso3448;
 
 /** Findings about the samples of one asset: what is odd in them, and the site's own limits. */
 final class SampleFindings {
+  /** So near to the range of the precision study its figures still serve (tool convention). */
+  private static final double NEAR = 1.1;
+
   private final Asset asset;
   private final List<Charge> charges;
   private final PlantHistory history;
@@ -134,7 +137,8 @@ final class SampleFindings {
   }
 
   private void outsidePrecision(Sample latest, double v40) {
-    boolean inside = v40 >= AstmD445Precision.LOWEST_CST && v40 <= AstmD445Precision.HIGHEST_CST;
+    boolean inside =
+        v40 >= AstmD445Precision.LOWEST_CST / NEAR && v40 <= AstmD445Precision.HIGHEST_CST * NEAR;
     if (inside || settings.laboratory().reproducibilityPercent().isPresent()) {
       return;
     }

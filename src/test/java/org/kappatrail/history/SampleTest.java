@@ -34,7 +34,7 @@ class SampleTest {
   }
 
   @Test
-  void countsGiveTheCodeEvenWhereOneIsStated() {
+  void countsOfBothDecidingSizesGiveTheCodeEvenWhereOneIsStated() {
     CleanlinessCode stated = CleanlinessCode.parse("22/21/18");
     Sample withCounts =
         new Sample(
@@ -44,11 +44,15 @@ class SampleTest {
             true,
             Optional.empty(),
             "",
-            Samples.value(SampleColumns.PARTICLES_6UM, 500),
+            Map.of(
+                SampleColumns.PARTICLES_6UM,
+                Measurement.of(500),
+                SampleColumns.PARTICLES_14UM,
+                Measurement.of(70)),
             Optional.of(stated),
             new SourceLine("a.csv", 2));
-    // ISO 4406: more than 320 up to 640 per ml is scale number 16.
-    assertThat(withCounts.cleanliness()).hasToString("Optional[*/16/*]");
+    // ISO 4406: more than 320 up to 640 per ml is scale number 16, more than 40 up to 80 is 13.
+    assertThat(withCounts.cleanliness()).hasToString("Optional[*/16/13]");
     assertThat(withCounts.sampledAtText()).isEqualTo("2024-03-05T08:30");
     assertThat(Samples.of("B", DAY, Map.of()).cleanliness()).isEmpty();
     assertThat(Samples.of("B", DAY, Map.of()).sampledAtText()).isEqualTo("2024-03-05");

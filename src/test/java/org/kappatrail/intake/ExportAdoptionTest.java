@@ -53,7 +53,7 @@ class ExportAdoptionTest {
         .containsEntry("water_ppm", Measurement.of(200))
         .containsEntry("iron_ppm", new Measurement.Below(5));
     assertThat(Folder.sample(intake, "10236").exact("iron_ppm")).hasValue(1012);
-    assertThat(Folder.sample(intake, "10236").statedCode()).hasToString("Optional[>20/18/15]");
+    assertThat(Folder.sample(intake, "10236").statedCode()).hasToString("Optional[≥20/18/15]");
     assertThat(block)
         .contains("decimal: comma", "thousands: \".\"", "skip-lines: 3", "encoding: windows-1252")
         .contains("water_ppm: percent", "date-format: \"dd.MM.yyyy\"", "missing: [\"k.A.\"]")

@@ -16,6 +16,8 @@ import java.util.List;
  */
 record Axis(double low, double high, boolean logarithmic, List<Double> ticks) {
   private static final double[] LOG_STEPS = {1, 2, 5};
+  private static final double[] CLOSE_LOG_STEPS = {1, 1.2, 1.5, 2, 2.5, 3, 4, 5, 6, 7, 8, 9};
+  private static final double SHORT_LOG = 4;
 
   Axis {
     ticks = List.copyOf(ticks);
@@ -38,13 +40,16 @@ record Axis(double low, double high, boolean logarithmic, List<Double> ticks) {
     return new Axis(low, high, false, ticks);
   }
 
-  /** A log axis that holds all values, with ticks at 1, 2 and 5 of every decade. */
+  /**
+   * A log axis that holds all values, with ticks at 1, 2 and 5 of every decade, closer on a short
+   * one.
+   */
   static Axis log(double least, double most) {
     double low = least / 1.12;
     double high = most * 1.12;
     List<Double> ticks = new ArrayList<>();
     for (int decade = -4; decade <= 7; decade++) {
-      for (double step : LOG_STEPS) {
+      for (double step : high / low < SHORT_LOG ? CLOSE_LOG_STEPS : LOG_STEPS) {
         double tick = step * Math.pow(10, decade);
         if (tick >= low && tick <= high) {
           ticks.add(tick);
@@ -62,6 +67,13 @@ record Axis(double low, double high, boolean logarithmic, List<Double> ticks) {
       ticks.add((double) tick);
     }
     return new Axis(least - 0.6, most + 0.6, false, ticks);
+  }
+
+  /** Share of the axis below a value: 0 at the lowest, 1 at the highest. */
+  double share(double value) {
+    return logarithmic
+        ? Math.log(value / low) / Math.log(high / low)
+        : (value - low) / (high - low);
   }
 
   String text(double tick) {

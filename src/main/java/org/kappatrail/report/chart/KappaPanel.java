@@ -24,6 +24,27 @@ final class KappaPanel {
   /** More lines than this cannot be told apart; the table has them all. */
   private static final int MOST_OTHERS = 3;
 
+  private static final List<Regime> REGIMES =
+      List.of(
+          new Regime(
+              1e-3,
+              LubricationRegime.MIXED_FROM,
+              Palette.BOUNDARY_WASH,
+              LubricationRegime.BOUNDARY.label()),
+          new Regime(
+              LubricationRegime.MIXED_FROM,
+              LubricationRegime.FULL_FILM_FROM,
+              Palette.MIXED_WASH,
+              LubricationRegime.MIXED.label()),
+          new Regime(
+              LubricationRegime.FULL_FILM_FROM,
+              1e3,
+              Palette.FILM_WASH,
+              LubricationRegime.FULL_FILM.label()));
+
+  /** A regime's band on the axis. */
+  private record Regime(double low, double high, Color wash, String name) {}
+
   private final AssetReview asset;
   private final BearingReview shown;
 
@@ -55,6 +76,7 @@ final class KappaPanel {
                 axis(others))
             .under(this::washes)
             .under(canvas -> daily(canvas))
+            .over(this::regimeNames)
             .over(this::floor)
             .over(this::whiskers);
     Color thin = Palette.wash(Palette.KAPPA, 0.55);
@@ -86,8 +108,7 @@ final class KappaPanel {
         .filter(day -> day.kappa().isPresent())
         .forEach(
             day -> {
-              values.add(day.kappaP05().getAsDouble());
-              values.add(day.kappaP95().getAsDouble());
+              values.add(day.kappa().getAsDouble());
             });
     double least = values.stream().mapToDouble(v -> v).min().orElseThrow();
     double most = values.stream().mapToDouble(v -> v).max().orElseThrow();
@@ -99,23 +120,18 @@ final class KappaPanel {
   }
 
   private void washes(Canvas canvas) {
-    regime(canvas, 1e-3, LubricationRegime.MIXED_FROM, Palette.BOUNDARY_WASH, "boundary");
-    regime(
-        canvas,
-        LubricationRegime.MIXED_FROM,
-        LubricationRegime.FULL_FILM_FROM,
-        Palette.MIXED_WASH,
-        LubricationRegime.MIXED.label());
-    regime(
-        canvas,
-        LubricationRegime.FULL_FILM_FROM,
-        1e3,
-        Palette.FILM_WASH,
-        LubricationRegime.FULL_FILM.label());
+    for (Regime regime : REGIMES) {
+      canvas.band(regime.low(), regime.high(), regime.wash());
+    }
   }
 
-  private static void regime(Canvas canvas, double low, double high, Color colour, String name) {
-    canvas.band(low, high, colour);
+  private void regimeNames(Canvas canvas) {
+    for (Regime regime : REGIMES) {
+      name(canvas, regime.low(), regime.high(), regime.name());
+    }
+  }
+
+  private static void name(Canvas canvas, double low, double high, String name) {
     Rectangle2D plot = canvas.plot();
     double top = Math.max(plot.getMinY(), canvas.y(high));
     double bottom = Math.min(plot.getMaxY(), canvas.y(low));

@@ -22,8 +22,8 @@ public final class Palette {
   /** Washes behind κ, from the boundary regime to the full film. */
   public static final Color BOUNDARY_WASH = new Color(0xD6, 0xDF, 0xEA);
 
-  public static final Color MIXED_WASH = new Color(0xE9, 0xEF, 0xF5);
-  public static final Color FILM_WASH = new Color(0xF8, 0xFA, 0xFC);
+  public static final Color MIXED_WASH = new Color(0xE3, 0xEA, 0xF2);
+  public static final Color FILM_WASH = new Color(0xF6, 0xF8, 0xFA);
 
   private Palette() {}
 

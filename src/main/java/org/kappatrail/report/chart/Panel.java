@@ -121,20 +121,27 @@ final class Panel {
   void paint(Graphics2D g, int width, List<TimeSpan.Tick> ticks) {
     int plotWidth = width - LEFT - RIGHT;
     int plotHeight = height - TOP - BOTTOM;
-    Graphics2D inner = (Graphics2D) g.create();
-    inner.translate(LEFT, TOP);
+    // the vector writer does not undo a copied graphics' transform, so it is put back by hand
+    AffineTransform before = g.getTransform();
+    g.translate(LEFT, TOP);
     Rectangle2D plot = layOut(plotWidth, plotHeight);
-    Canvas canvas = new Canvas(inner, plot, chart::getScreenXFromChart, chart::getScreenYFromChart);
+    Canvas canvas =
+        new Canvas(
+            g,
+            plot,
+            day ->
+                plot.getMinX()
+                    + (day - span.fromX()) / (span.toX() - span.fromX()) * plot.getWidth(),
+            value -> plot.getMaxY() - axis.share(value) * plot.getHeight());
     under.accept(canvas);
     rules(canvas, ticks);
-    AffineTransform before = inner.getTransform();
-    Graphics2D clipped = (Graphics2D) inner.create();
-    chart.paint(clipped, plotWidth, plotHeight);
-    clipped.dispose();
-    inner.setTransform(before);
+    AffineTransform placed = g.getTransform();
+    chart.paint(g, plotWidth, plotHeight);
+    g.setTransform(placed);
+    g.setClip(null);
     over.accept(canvas);
     labels(canvas);
-    inner.dispose();
+    g.setTransform(before);
   }
 
   /** Paints once onto nothing, so that the plot's place is known before anything is drawn. */
@@ -180,10 +187,16 @@ final class Panel {
         plot.getMaxY(),
         Palette.QUIET_INK,
         new BasicStroke(0.8f));
-    Graphics2D g = canvas.graphics();
-    g.setColor(colour);
+  }
+
+  /** Writes the panel's title on paper, over whatever runs through; the origin as for painting. */
+  void paintTitle(Graphics2D g) {
     g.setFont(ChartFont.bold(12.5f));
-    g.drawString(label, (float) plot.getMinX(), (float) plot.getMinY() - 6);
+    double width = g.getFontMetrics().stringWidth(label);
+    g.setColor(Palette.PAPER);
+    g.fill(new Rectangle2D.Double(LEFT, 1, width + 4, TOP - 3));
+    g.setColor(colour);
+    g.drawString(label, LEFT, TOP - 6);
   }
 
   /** No marker. */

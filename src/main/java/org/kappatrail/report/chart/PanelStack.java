@@ -74,17 +74,27 @@ final class PanelStack implements Drawing {
     head(g);
     int top = HEAD;
     for (Panel panel : panels) {
-      Graphics2D place = (Graphics2D) g.create();
-      place.translate(0, top);
-      panel.paint(place, WIDTH, span.ticks());
-      place.dispose();
+      g.translate(0, top);
+      panel.paint(g, WIDTH, span.ticks());
+      g.translate(0, -top);
       top += panel.height();
     }
     calendar(g, top);
     events(g, top);
+    titles(g);
     g.setFont(ChartFont.of(11));
     g.setColor(Palette.QUIET_INK);
     g.drawString(source, Panel.LEFT, height() - 12);
+  }
+
+  private void titles(Graphics2D g) {
+    int top = HEAD;
+    for (Panel panel : panels) {
+      g.translate(0, top);
+      panel.paintTitle(g);
+      g.translate(0, -top);
+      top += panel.height();
+    }
   }
 
   private void head(Graphics2D g) {

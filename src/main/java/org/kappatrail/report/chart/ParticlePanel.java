@@ -29,12 +29,12 @@ final class ParticlePanel {
             new Size(
                 "4 µm",
                 CleanlinessCode::c4,
-                Palette.wash(Palette.PARTICLES, 0.55),
+                Palette.wash(Palette.PARTICLES, 0.68),
                 SeriesMarkers.TRIANGLE_UP),
             new Size(
                 "6 µm",
                 CleanlinessCode::c6,
-                Palette.wash(Palette.PARTICLES, 0.8),
+                Palette.wash(Palette.PARTICLES, 0.85),
                 SeriesMarkers.DIAMOND),
             new Size("14 µm", CleanlinessCode::c14, Palette.PARTICLES, SeriesMarkers.CIRCLE));
     List<Points> lines =

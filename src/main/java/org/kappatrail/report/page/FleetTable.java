@@ -62,7 +62,7 @@ final class FleetTable {
             "td class=\"n deciding\"",
             film.map(known -> Numbers.significant(known.kappa(), 3)).orElse(""))
         .element("td class=\"n\"", film.map(FleetTable::interval).orElse(""))
-        .element("td", film.map(known -> known.regime().label()).orElse(""))
+        .element("td class=\"word\"", film.map(known -> known.regime().label()).orElse(""))
         .raw("<td>" + film.map(known -> LevelMark.of(known.level())).orElse("no κ") + "</td>")
         .element("td class=\"n\"", governing.map(FleetTable::change).orElse(""))
         .element(

@@ -33,6 +33,14 @@ public final class Numbers {
     return value.isPresent() ? fixed(value.getAsDouble(), decimals) : "";
   }
 
+  /** A probability: two digits, and "below 0.001" or "above 0.999" at the ends. */
+  public static String probability(double probability) {
+    if (probability < 0.001) {
+      return "below 0.001";
+    }
+    return probability > 0.999 ? "above 0.999" : significant(probability, 2);
+  }
+
   /** A relative change in percent with its sign; the minus is U+2212. */
   public static String percent(double fraction) {
     String number = fixed(Math.abs(fraction) * 100, 0);

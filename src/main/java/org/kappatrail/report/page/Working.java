@@ -131,7 +131,7 @@ public final class Working {
     lines.add(
         new Line(
             "P(κ < " + Numbers.significant(in.floor(), 3) + ")",
-            Numbers.significant(film.uncertainty().probabilityBelow(in.floor()), 3),
+            Numbers.probability(film.uncertainty().probabilityBelow(in.floor())),
             "Φ((ln floor − ln κ)/σ)"));
     return lines;
   }
