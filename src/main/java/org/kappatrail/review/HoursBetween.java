@@ -10,7 +10,7 @@ final class HoursBetween {
   private final boolean logged;
   private int next;
 
-  /** Hours of one stretch; empty for a bearing without a log. */
+  /** Hours of one stretch; empty for a bearing without a log, mixed where a day has no κ. */
   record Hours(OptionalDouble running, OptionalDouble mixed) {}
 
   HoursBetween(List<DayKappa> days, boolean logged) {
@@ -25,11 +25,15 @@ final class HoursBetween {
     }
     double running = 0;
     double mixed = 0;
+    boolean known = true;
     while (next < days.size() && !days.get(next).date().isAfter(day)) {
       running += days.get(next).runningHours();
-      mixed += days.get(next).mixedHours().orElse(0);
+      OptionalDouble ofDay = days.get(next).mixedHours();
+      known &= ofDay.isPresent();
+      mixed += ofDay.orElse(0);
       next++;
     }
-    return new Hours(OptionalDouble.of(running), OptionalDouble.of(mixed));
+    return new Hours(
+        OptionalDouble.of(running), known ? OptionalDouble.of(mixed) : OptionalDouble.empty());
   }
 }

@@ -66,13 +66,11 @@ final class OperatingPoints {
         (logged + unloggedMillis) / MS_PER_HOUR);
   }
 
+  /** The form's temperature is the oil's already: the sensor's offset has no part in it. */
   private OperatingPoint fromForm(OptionalDouble formTemperatureC) {
-    boolean known = formTemperatureC.isPresent();
     return new OperatingPoint(
-        known
-            ? OptionalDouble.of(formTemperatureC.getAsDouble() + bearing.temperatureOffsetC())
-            : OptionalDouble.empty(),
-        known ? TemperatureSource.SAMPLE : TemperatureSource.NONE,
+        formTemperatureC,
+        formTemperatureC.isPresent() ? TemperatureSource.SAMPLE : TemperatureSource.NONE,
         bearing.speedRpm(),
         SpeedSource.REGISTER,
         0);
