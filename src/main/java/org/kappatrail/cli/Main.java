@@ -11,11 +11,6 @@ public final class Main {
 
   public static void main(String[] args) {
     System.setProperty("java.awt.headless", "true");
-    // the workbook library's logging interface would otherwise complain on stderr
-    System.setProperty(
-        "log4j2.loggerContextFactory",
-        "org.apache.logging.log4j.simple.SimpleLoggerContextFactory");
-    System.setProperty("org.apache.logging.log4j.simplelog.level", "OFF");
     PrintWriter out = new PrintWriter(System.out, false, StandardCharsets.UTF_8);
     PrintWriter err = new PrintWriter(System.err, true, StandardCharsets.UTF_8);
     int code = new Kappatrail(out, err, onTerminal(), Clock.systemUTC()).run(args);

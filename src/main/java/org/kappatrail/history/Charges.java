@@ -2,10 +2,10 @@ package org.kappatrail.history;
 
 import java.time.LocalDate;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import org.jspecify.annotations.Nullable;
 
 /**
  * Splits an asset's history into oil charges: at every recorded oil change, and where oil hours
@@ -27,25 +27,25 @@ public final class Charges {
     List<Event> changes =
         events.stream()
             .filter(event -> event.kind() == EventKind.OIL_CHANGE)
-            .sorted(java.util.Comparator.comparing(Event::date))
+            .sorted(Comparator.comparing(Event::date))
             .toList();
     List<Draft> drafts = new ArrayList<>();
     int nextChange = 0;
-    @Nullable Sample previous = null;
+    OptionalDouble hours = OptionalDouble.empty();
     for (Sample sample : inTime) {
-      while (nextChange < changes.size()
-          && startsBefore(changes.get(nextChange), sample, previous)) {
+      while (nextChange < changes.size() && startsBefore(changes.get(nextChange), sample, hours)) {
         drafts.add(Draft.recorded(asset, changes.get(nextChange++), drafts));
-        previous = null;
+        hours = OptionalDouble.empty();
       }
       if (drafts.isEmpty()) {
         drafts.add(new Draft(asset.oil(), Charge.Origin.BEFORE_HISTORY, Optional.empty()));
-      } else if (hoursFellBack(previous, sample)) {
+      } else if (hoursFellBack(hours, sample)) {
         String oil = drafts.get(drafts.size() - 1).oil;
         drafts.add(new Draft(oil, Charge.Origin.INFERRED, Optional.of(sample.day())));
       }
       drafts.get(drafts.size() - 1).samples.add(sample);
-      previous = sample;
+      OptionalDouble now = sample.exact(SampleColumns.OIL_HOURS);
+      hours = now.isPresent() ? now : hours;
     }
     while (nextChange < changes.size()) {
       drafts.add(Draft.recorded(asset, changes.get(nextChange++), drafts));
@@ -53,16 +53,13 @@ public final class Charges {
     return finish(asset, drafts);
   }
 
-  private static boolean startsBefore(Event change, Sample sample, @Nullable Sample previous) {
+  private static boolean startsBefore(Event change, Sample sample, OptionalDouble hours) {
     int order = change.date().compareTo(sample.day());
-    return order < 0 || (order == 0 && hoursFellBack(previous, sample));
+    return order < 0 || (order == 0 && hoursFellBack(hours, sample));
   }
 
-  private static boolean hoursFellBack(@Nullable Sample previous, Sample sample) {
-    if (previous == null) {
-      return false;
-    }
-    OptionalDouble before = previous.exact(SampleColumns.OIL_HOURS);
+  /** True where a sample's hours are below the last known ones of its charge. */
+  private static boolean hoursFellBack(OptionalDouble before, Sample sample) {
     OptionalDouble now = sample.exact(SampleColumns.OIL_HOURS);
     return before.isPresent() && now.isPresent() && now.getAsDouble() < before.getAsDouble();
   }

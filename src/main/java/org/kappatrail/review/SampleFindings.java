@@ -210,7 +210,6 @@ final class SampleFindings {
       List<Sample> before = charges.get(i - 1).samples();
       if (charge.origin() == Charge.Origin.INFERRED) {
         Sample first = charge.samples().get(0);
-        Sample last = before.get(before.size() - 1);
         add(
             first,
             Level.CLEAR,
@@ -218,11 +217,20 @@ final class SampleFindings {
             Say.text(
                 "oil hours fell from %s to %s without a recorded oil change; a new charge is"
                     + " assumed from %s, record the change in events.csv",
-                Say.whole(last.exact(SampleColumns.OIL_HOURS).getAsDouble()),
+                Say.whole(lastHours(before)),
                 Say.whole(first.exact(SampleColumns.OIL_HOURS).getAsDouble()),
                 first.day()));
       }
     }
+  }
+
+  private static double lastHours(List<Sample> samples) {
+    return samples.stream()
+        .map(sample -> sample.exact(SampleColumns.OIL_HOURS))
+        .filter(OptionalDouble::isPresent)
+        .reduce((earlier, later) -> later)
+        .orElseThrow()
+        .getAsDouble();
   }
 
   private void add(Sample sample, Level level, FindingKind kind, String message) {

@@ -84,6 +84,18 @@ class ChargesTest {
   }
 
   @Test
+  void hoursThatFellBackAreSeenAcrossASampleWithoutHours() {
+    List<Charge> charges =
+        Charges.of(
+            PRESS,
+            List.of(sample("A", 5, 900), sample("B", 9, -1), sample("C", 12, 20)),
+            List.of());
+    assertThat(charges).hasSize(2);
+    assertThat(charges.get(1).start()).contains(day(12));
+    assertThat(charges.get(1).samples()).extracting(Sample::id).containsExactly("C");
+  }
+
+  @Test
   void hoursThatAreEqualOrMissingStartNoCharge() {
     List<Charge> charges =
         Charges.of(
