@@ -37,7 +37,12 @@ final class DailyKappa {
     for (int row = from; row < to; row++) {
       if (cells.running(row)) {
         double weight = cells.millis(row);
-        temperatures.add(cells.lowestC(row), cells.temperatureC(row), cells.highestC(row), weight);
+        temperatures.add(
+            cells.lowestC(row),
+            cells.temperatureC(row),
+            cells.highestC(row),
+            cells.readings(row),
+            weight);
         millis += weight;
         speedMillis += weight * speedRpm(bearing, cells, row);
       }
@@ -69,8 +74,13 @@ final class DailyKappa {
     try {
       for (int row = from; row < to; row++) {
         if (cells.running(row)) {
-          double kappa = kappa(bearing, cells, row, oil);
-          values.add(kappa, (double) cells.millis(row));
+          double kappa = kappa(bearing, cells, row, cells.temperatureC(row), oil);
+          values.add(
+              kappa(bearing, cells, row, cells.highestC(row), oil),
+              kappa,
+              kappa(bearing, cells, row, cells.lowestC(row), oil),
+              cells.readings(row),
+              (double) cells.millis(row));
           if (kappa < LubricationRegime.FULL_FILM_FROM) {
             mixedMillis += cells.millis(row);
           }
@@ -82,11 +92,11 @@ final class DailyKappa {
     return Optional.of(new Kappas(values, mixedMillis));
   }
 
-  /** κ of one cell. */
-  static double kappa(Bearing bearing, DutyCells cells, int row, OilViscosity oil) {
-    double temperatureC = cells.temperatureC(row) + bearing.temperatureOffsetC();
+  /** κ of one cell at a logged temperature of it. */
+  private static double kappa(
+      Bearing bearing, DutyCells cells, int row, double loggedC, OilViscosity oil) {
     return ViscosityRatio.kappa(
-        oil.viscosityCst(temperatureC),
+        oil.viscosityCst(loggedC + bearing.temperatureOffsetC()),
         Iso281RatedViscosity.ratedViscosityCst(speedRpm(bearing, cells, row), bearing.pitchMm()));
   }
 

@@ -43,7 +43,12 @@ final class OperatingPoints {
     for (int row = from; row < to; row++) {
       if (cells.running(row)) {
         double millis = cells.millis(row);
-        temperatures.add(cells.lowestC(row), cells.temperatureC(row), cells.highestC(row), millis);
+        temperatures.add(
+            cells.lowestC(row),
+            cells.temperatureC(row),
+            cells.highestC(row),
+            cells.readings(row),
+            millis);
         if (cells.speedLogged(row)) {
           logged += millis;
           loggedSpeed += millis * cells.speedRpm(row);

@@ -5,15 +5,21 @@ import java.util.Comparator;
 import java.util.OptionalDouble;
 
 /**
- * Weighted quantiles of grouped values: cells are ordered by their mean, and within the cell that
- * holds the quantile the value runs evenly from its lowest to its highest reading. For cells of one
- * value this is the weighted quantile of the values themselves.
+ * Weighted quantiles of grouped values. Cells are ordered by their mean; within the cell that holds
+ * the quantile the readings are put back as well as its lowest, mean and highest value allow: one
+ * and two readings exactly, three by taking their weights as equal, more by a line from the lowest
+ * over a bend to the highest that keeps the mean. For cells of one reading this is the weighted
+ * quantile of the readings themselves; where it falls between two readings, the lower one.
  */
 final class WeightedCells {
+  /** Shares are quotients of whole milliseconds; this is far below one of them. */
+  private static final double ROUNDING = 1e-9;
+
   private double[] lowest;
   private double[] means;
   private double[] highest;
   private double[] weights;
+  private long[] readings;
   private int size;
   private boolean sorted;
 
@@ -23,13 +29,14 @@ final class WeightedCells {
     means = new double[room];
     highest = new double[room];
     weights = new double[room];
+    readings = new long[room];
   }
 
   void add(double value, double weight) {
-    add(value, value, value, weight);
+    add(value, value, value, 1, weight);
   }
 
-  void add(double low, double mean, double high, double weight) {
+  void add(double low, double mean, double high, long count, double weight) {
     if (weight <= 0) {
       return;
     }
@@ -38,11 +45,13 @@ final class WeightedCells {
       means = Arrays.copyOf(means, size * 2);
       highest = Arrays.copyOf(highest, size * 2);
       weights = Arrays.copyOf(weights, size * 2);
+      readings = Arrays.copyOf(readings, size * 2);
     }
     lowest[size] = low;
     means[size] = mean;
     highest[size] = high;
     weights[size] = weight;
+    readings[size] = count;
     size++;
     sorted = false;
   }
@@ -65,12 +74,30 @@ final class WeightedCells {
     double below = 0;
     for (int i = 0; i < size; i++) {
       if (below + weights[i] >= target) {
-        double within = Math.max(0, (target - below) / weights[i]);
-        return OptionalDouble.of(lowest[i] + within * (highest[i] - lowest[i]));
+        return OptionalDouble.of(within(i, Math.max(0, (target - below) / weights[i])));
       }
       below += weights[i];
     }
     return OptionalDouble.of(highest[size - 1]);
+  }
+
+  /** The value up to which a share of a cell's weight lies. */
+  private double within(int cell, double share) {
+    double low = lowest[cell];
+    double high = highest[cell];
+    double mean = means[cell];
+    if (readings[cell] == 1 || high <= low) {
+      return mean;
+    }
+    if (readings[cell] == 2) {
+      return share <= (high - mean) / (high - low) + ROUNDING ? low : high;
+    }
+    if (readings[cell] == 3) {
+      double middle = Math.min(high, Math.max(low, 3 * mean - low - high));
+      return share <= 1.0 / 3 + ROUNDING ? low : share <= 2.0 / 3 + ROUNDING ? middle : high;
+    }
+    double bend = Math.min(high, Math.max(low, 2 * mean - (low + high) / 2));
+    return share <= 0.5 ? low + 2 * share * (bend - low) : bend + (2 * share - 1) * (high - bend);
   }
 
   private void sort() {
@@ -83,6 +110,8 @@ final class WeightedCells {
     lowest = pick(lowest, order);
     highest = pick(highest, order);
     weights = pick(weights, order);
+    long[] counts = readings.clone();
+    Arrays.setAll(readings, i -> i < order.length ? counts[order[i]] : 0);
     means = pick(means, order);
     sorted = true;
   }
