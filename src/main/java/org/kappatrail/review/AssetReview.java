@@ -8,6 +8,7 @@ import org.kappatrail.history.Charge;
 import org.kappatrail.history.Event;
 import org.kappatrail.history.Oil;
 import org.kappatrail.history.Sample;
+import org.kappatrail.review.trend.ViscosityChange;
 
 /**
  * What the review found for one asset.
@@ -18,6 +19,7 @@ import org.kappatrail.history.Sample;
  * @param samples its samples in time
  * @param events its events in time
  * @param bearings its bearings in the order of the register
+ * @param lastChange last change of viscosity within the present charge
  * @param findings what was found, worst first
  */
 public record AssetReview(
@@ -27,6 +29,7 @@ public record AssetReview(
     List<Sample> samples,
     List<Event> events,
     List<BearingReview> bearings,
+    Optional<ViscosityChange> lastChange,
     List<Finding> findings) {
 
   private static final Comparator<BearingReview> WORST_FIRST =

@@ -3,6 +3,7 @@ package org.kappatrail.review;
 import java.time.LocalDate;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 import org.kappatrail.history.FileAccount;
 import org.kappatrail.history.Problem;
 import org.kappatrail.history.Settings;
@@ -13,6 +14,7 @@ import org.kappatrail.history.Settings;
  * @param asOf last day that counts
  * @param settings settings in force
  * @param assets assets in the order of the register
+ * @param since what changed since an earlier day, where that was asked for
  * @param problems inputs that could not be used
  * @param files what became of every input file
  */
@@ -20,6 +22,7 @@ public record Review(
     LocalDate asOf,
     Settings settings,
     List<AssetReview> assets,
+    Optional<Since> since,
     List<Problem> problems,
     List<FileAccount> files) {
 
