@@ -172,6 +172,10 @@ public final class Reviewer {
         asset.events(),
         own,
         LastChange.of(asset.charges(), settings.laboratory()),
+        Optional.empty(),
+        List.of(),
+        List.of(),
+        List.of(),
         findings);
   }
 
