@@ -29,6 +29,8 @@ public final class ReviewTables {
         kappaDaily(review),
         TrendTables.attribution(review),
         TrendTables.drift(review),
+        DecisionTables.verdicts(review),
+        DecisionTables.remedies(review),
         findings(review),
         problems(review));
   }
