@@ -26,6 +26,7 @@ import org.kappatrail.history.Sample;
 import org.kappatrail.history.SampleColumns;
 import org.kappatrail.history.Settings;
 import org.kappatrail.history.SourceLine;
+import org.kappatrail.review.decision.Cleanliness;
 import org.kappatrail.tribology.BearingType;
 import org.kappatrail.tribology.CleanlinessCode;
 import org.kappatrail.tribology.OilSupply;
@@ -106,6 +107,7 @@ public final class OneBearing {
   }
 
   public OneBearing otherOil(Oil oil) {
+    oils.removeIf(known -> known.id().equals(oil.id()));
     oils.add(oil);
     return this;
   }
@@ -144,6 +146,32 @@ public final class OneBearing {
     return this;
   }
 
+  /** The register of this asset again, without samples, days and events. */
+  public OneBearing copy() {
+    OneBearing other = new OneBearing(id);
+    other.asset = asset;
+    other.bearing = bearing;
+    other.oils.clear();
+    other.oils.addAll(oils);
+    return other;
+  }
+
+  public OneBearing withoutCosts() {
+    asset =
+        asset(asset.oil(), OptionalDouble.empty(), OptionalDouble.empty(), OptionalDouble.empty());
+    return this;
+  }
+
+  public Bearing bearing() {
+    return bearing;
+  }
+
+  /** What the contamination factor rests on: the code that every sample here carries. */
+  public Cleanliness cleanliness() {
+    return new Cleanliness(
+        OptionalDouble.empty(), CleanlinessCode.find("18/16/13"), asset.supply());
+  }
+
   /** A day of 24 running hours at one temperature and the nominal speed. */
   public OneBearing day(LocalDate date, double temperatureC) {
     days.put(date, new double[] {temperatureC, bearing.speedRpm()});
@@ -174,12 +202,16 @@ public final class OneBearing {
   }
 
   public OneBearing oilChange(LocalDate date) {
+    return oilChange(date, asset.oil());
+  }
+
+  public OneBearing oilChange(LocalDate date, String oil) {
     events.add(
         new Event(
             id,
             date,
             EventKind.OIL_CHANGE,
-            Optional.empty(),
+            Optional.of(oil),
             OptionalDouble.empty(),
             Optional.empty(),
             ""));
