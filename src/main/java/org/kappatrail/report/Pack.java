@@ -70,6 +70,7 @@ public final class Pack {
     for (Table table : ReviewTables.all(review)) {
       CsvFile.write(table, folder.resolve(table.name() + ".csv"));
     }
+    CsvFile.write(ReviewTables.kappaDaily(review), folder.resolve("kappa-daily.csv"));
     manifest.write(folder.resolve("manifest.json"), review);
     Map<String, String> pictures = charts ? writeCharts(folder) : Map.of();
     Files.writeString(folder.resolve("index.html"), new Page(review, pictures).html());

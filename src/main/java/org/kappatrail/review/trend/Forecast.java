@@ -11,6 +11,7 @@ import java.util.TreeMap;
 import org.apache.commons.math3.stat.descriptive.rank.Median;
 import org.jspecify.annotations.Nullable;
 import org.kappatrail.statistics.TheilSen;
+import org.kappatrail.tribology.OilSensitivity;
 import org.kappatrail.tribology.OilViscosity;
 
 /**
@@ -46,6 +47,24 @@ public final class Forecast {
   private final double sigmaC;
   private final TreeMap<Long, FilmState> lastYear = new TreeMap<>();
   private final OptionalDouble yearAgoC;
+  private final OilSensitivity sensitivity;
+  private final double start;
+
+  /** By day of last year; 0 is the present point. */
+  private final @Nullable Pull[] pulls = new Pull[YEAR_DAYS + 1];
+
+  /**
+   * What the oil's drift does at an operating point.
+   *
+   * @param lnKappa ln κ of the oil as it is
+   * @param weight how much a drift at reference conditions counts there
+   */
+  private record Pull(double lnKappa, double weight) {
+    /** ln κ some days after the latest sample, the oil drifting on from a start by a slope. */
+    double lnKappaAfter(double days, double start, double slope) {
+      return lnKappa + (start + slope * days) * weight;
+    }
+  }
 
   /**
    * Prepares a forecast.
@@ -79,6 +98,11 @@ public final class Forecast {
     this.fresh = fresh;
     this.sigmaC = sigmaC;
     this.yearAgoC = readLastYear(days);
+    this.sensitivity = OilSensitivity.of(present.oil());
+    this.start =
+        drift.line().isPresent()
+            ? drift.line().get().at((double) lastSample.toEpochDay()) - reference.lnKappa(pitchMm)
+            : 0;
   }
 
   /**
@@ -131,11 +155,12 @@ public final class Forecast {
   }
 
   private Optional<LocalDate> reachedAtPresentPoint(double slope) {
-    double above = lnKappaOn(present, 0, slope) - lnFloor;
+    Pull pull = pullAtPresent();
+    double above = pull.lnKappaAfter(0, start, slope) - lnFloor;
     if (above <= 0) {
       return Optional.of(lastSample);
     }
-    double perDay = slope * weight(present);
+    double perDay = slope * pull.weight();
     if (perDay >= 0 || above / -perDay > FARTHEST_DAYS) {
       return Optional.empty();
     }
@@ -144,28 +169,34 @@ public final class Forecast {
 
   private Optional<LocalDate> reachedWithLastYear(double slope) {
     for (int ahead = 0; ahead <= FARTHEST_DAYS; ahead++) {
-      FilmState then = ahead == 0 ? present : ofLastYear(ahead);
-      if (then != null && lnKappaOn(then, ahead, slope) <= lnFloor) {
+      Pull then = ahead == 0 ? pullAtPresent() : pullOfLastYear(ahead);
+      if (then != null && then.lnKappaAfter(ahead, start, slope) <= lnFloor) {
         return Optional.of(lastSample.plusDays(ahead));
       }
     }
     return Optional.empty();
   }
 
-  /** ln κ of a state some days after the latest sample, the oil drifting on by a slope. */
-  private double lnKappaOn(FilmState state, double ahead, double slope) {
-    double start = 0;
-    if (drift.line().isPresent()) {
-      double onLine = drift.line().get().at((double) lastSample.toEpochDay());
-      start = onLine - reference.lnKappa(pitchMm);
-    }
-    return state.lnKappa(pitchMm) + (start + slope * ahead) * weight(state);
+  private Pull pullAtPresent() {
+    return pull(0, present);
   }
 
-  /** How much a drift at reference conditions counts at another temperature. */
-  private double weight(FilmState state) {
-    return state.oil().sensitivityToV40(state.temperatureC())
-        / reference.oil().sensitivityToV40(reference.temperatureC());
+  private @Nullable Pull pullOfLastYear(int ahead) {
+    FilmState then = ofLastYear(ahead);
+    return then == null ? null : pull(back(ahead), then);
+  }
+
+  /** Every state comes up again for every year ahead and every slope. */
+  private Pull pull(int place, FilmState state) {
+    Pull known = pulls[place];
+    if (known == null) {
+      known =
+          new Pull(
+              state.lnKappa(pitchMm),
+              sensitivity.at(state.temperatureC()) / sensitivity.at(reference.temperatureC()));
+      pulls[place] = known;
+    }
+    return known;
   }
 
   private List<FanPoint> fan(int horizonDays) {
@@ -179,7 +210,7 @@ public final class Forecast {
           new FanPoint(
               lastSample.plusDays(ahead),
               fan(ahead, line.slopeLow()),
-              Math.exp(lnKappaOn(present, ahead, line.slope())),
+              Math.exp(pullAtPresent().lnKappaAfter(ahead, start, line.slope())),
               fan(ahead, line.slopeHigh())));
     }
     return fan;
@@ -187,7 +218,8 @@ public final class Forecast {
 
   private OptionalDouble fan(int ahead, OptionalDouble slope) {
     return slope.isPresent()
-        ? OptionalDouble.of(Math.exp(lnKappaOn(present, ahead, slope.getAsDouble())))
+        ? OptionalDouble.of(
+            Math.exp(pullAtPresent().lnKappaAfter(ahead, start, slope.getAsDouble())))
         : OptionalDouble.empty();
   }
 
@@ -226,8 +258,12 @@ public final class Forecast {
   }
 
   private @Nullable FilmState ofLastYear(int ahead) {
-    int back = Math.floorMod(ahead - 1, YEAR_DAYS) + 1;
-    return lastYear.get(lastSample.toEpochDay() - YEAR_DAYS + back);
+    return lastYear.get(lastSample.toEpochDay() - YEAR_DAYS + back(ahead));
+  }
+
+  /** Day of last year that stands for a day ahead, from 1. */
+  private static int back(int ahead) {
+    return Math.floorMod(ahead - 1, YEAR_DAYS) + 1;
   }
 
   private OptionalDouble readLastYear(List<DayPoint> days) {
