@@ -1,7 +1,5 @@
 package org.kappatrail.report.page;
 
-import java.nio.charset.StandardCharsets;
-import java.util.Base64;
 import java.util.List;
 import java.util.Optional;
 import org.kappatrail.history.Sample;
@@ -34,10 +32,16 @@ final class AssetSection {
         .text(asset.asset().name().equals(asset.asset().id()) ? "" : asset.asset().name())
         .raw("</span></h2>\n");
     html.element("p class=\"note\"", facts());
-    picture(html);
+    if (!asset.story().isEmpty()) {
+      html.element("p class=\"story\"", String.join(" ", asset.story())).raw("\n");
+    }
+    new ChartFigure(asset, picture).write(html);
     findings(html);
+    new DecisionSection(asset).write(html);
+    TrendSection.lastChange(html, asset);
     for (BearingReview bearing : asset.bearings()) {
       samples(html, bearing);
+      TrendSection.write(html, bearing);
       working(html, bearing);
     }
     html.raw("</section>\n");
@@ -53,22 +57,6 @@ final class AssetSection {
         + "; "
         + asset.samples().size()
         + (asset.samples().size() == 1 ? " sample" : " samples");
-  }
-
-  private void picture(Html html) {
-    if (picture.isEmpty()) {
-      return;
-    }
-    String data = Base64.getEncoder().encodeToString(picture.getBytes(StandardCharsets.UTF_8));
-    html.raw("<figure><img loading=\"lazy\" alt=\"")
-        .text(
-            "κ of "
-                + asset.asset().id()
-                + " against time, with viscosity, temperature and"
-                + " contamination; the numbers are in the tables below")
-        .raw("\" src=\"data:image/svg+xml;base64,")
-        .raw(data)
-        .raw("\"></figure>\n");
   }
 
   private void findings(Html html) {
@@ -107,7 +95,8 @@ final class AssetSection {
   }
 
   private static void table(Html html, List<KappaPoint> points) {
-    html.raw("<div class=\"scroll\"><table class=\"samples\">\n<thead><tr><th>sample</th>")
+    html.raw(
+            "<div class=\"scroll\"><table class=\"samples\" data-name=\"samples\">\n<thead><tr><th>sample</th>")
         .raw("<th>drawn</th><th class=\"n\">charge</th><th class=\"n\">oil hours</th>")
         .raw("<th class=\"n\">ν40, mm²/s</th><th class=\"n\">T, °C</th>")
         .raw("<th class=\"n\">n, r/min</th><th class=\"n\">ν, mm²/s</th>")

@@ -6,6 +6,7 @@ import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Map;
+import java.util.TreeMap;
 import org.kappatrail.history.Problem;
 import org.kappatrail.review.AssetReview;
 import org.kappatrail.review.Level;
@@ -49,6 +50,7 @@ public final class Page {
     html.around(
         "main",
         () -> {
+          review.since().ifPresent(since -> new SinceSection(since, links()).write(html));
           new FleetTable(review, anchors).write(html);
           for (AssetReview asset : review.worstFirst()) {
             new AssetSection(asset, anchorOf(asset), pictures.getOrDefault(asset.asset().id(), ""))
@@ -58,6 +60,12 @@ public final class Page {
           html.raw(resource("method.html"));
         });
     return html.raw("</body>\n</html>\n").toString();
+  }
+
+  private Map<String, String> links() {
+    Map<String, String> links = new TreeMap<>();
+    anchors.forEach((asset, anchor) -> links.put(asset, "#" + anchor));
+    return links;
   }
 
   private String anchorOf(AssetReview asset) {
