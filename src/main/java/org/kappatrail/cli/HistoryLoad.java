@@ -23,6 +23,7 @@ import org.kappatrail.intake.HistoryReader;
 import org.kappatrail.intake.Intake;
 import org.kappatrail.report.Manifest;
 import org.kappatrail.review.AssetReview;
+import org.kappatrail.review.CorrelationVariables;
 import org.kappatrail.review.Progress;
 import org.kappatrail.review.Review;
 import org.kappatrail.review.Reviewer;
@@ -73,7 +74,8 @@ final class HistoryLoad {
       problems.addAll(log.problems());
       List<FileAccount> files = new ArrayList<>(intake.files());
       files.addAll(log.accounts());
-      return new Review(asOf, intake.settings(), assets, problems, files);
+      return new Review(
+          asOf, intake.settings(), assets, CorrelationVariables.correlate(assets), problems, files);
     }
   }
 

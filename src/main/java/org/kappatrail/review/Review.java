@@ -6,6 +6,7 @@ import java.util.List;
 import org.kappatrail.history.FileAccount;
 import org.kappatrail.history.Problem;
 import org.kappatrail.history.Settings;
+import org.kappatrail.review.correlation.CorrelationResults;
 
 /**
  * The whole review of a site; everything that is reported is in it.
@@ -13,6 +14,7 @@ import org.kappatrail.history.Settings;
  * @param asOf last day that counts
  * @param settings settings in force
  * @param assets assets in the order of the register
+ * @param correlations what goes with what in their samples
  * @param problems inputs that could not be used
  * @param files what became of every input file
  */
@@ -20,6 +22,7 @@ public record Review(
     LocalDate asOf,
     Settings settings,
     List<AssetReview> assets,
+    CorrelationResults correlations,
     List<Problem> problems,
     List<FileAccount> files) {
 

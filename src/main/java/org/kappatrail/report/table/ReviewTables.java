@@ -24,7 +24,12 @@ public final class ReviewTables {
 
   /** Every table of the pack; a table's name is its file's. */
   public static List<Table> all(Review review) {
-    return List.of(kappaHistory(review), kappaDaily(review), findings(review), problems(review));
+    return List.of(
+        kappaHistory(review),
+        kappaDaily(review),
+        CorrelationTable.of(review),
+        findings(review),
+        problems(review));
   }
 
   /** A sample seen from a bearing. */
