@@ -71,7 +71,7 @@ final class AssetTests {
             form,
             pairs.size(),
             1,
-            judged,
+            judged.withLeastP(StandingOut.leastP(ranksX, ranksY, rho.getAsDouble())),
             OptionalDouble.empty(),
             ByConstruction.tied(x.name(), y.name())));
   }

@@ -8,12 +8,19 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
+import org.kappatrail.statistics.AverageRanks;
 import org.kappatrail.statistics.CorrelationTest;
 import org.kappatrail.statistics.RepeatedMeasuresCorrelation;
 
 /**
- * Repeated-measures correlation of all pairs of variables, the asset as subject. An asset in which
- * one of the two never changes says nothing of them and is left out.
+ * Repeated-measures correlation of all pairs of variables, the asset as subject, judged at the
+ * effective sample size ({@link FleetSampleSize}). An asset in which one of the two never changes
+ * says nothing of them and is left out.
+ *
+ * <p>The coefficient is of the numbers themselves, so that one wild sample, such as a bottle filled
+ * at the wrong machine, can make it alone. p is therefore the larger one of two: of the numbers,
+ * and of their ranks within each asset; 1 where the two disagree in sign (this tool's convention;
+ * seeded study in the tests).
  */
 final class FleetTests {
   private static final int LEAST_ASSETS = 2;
@@ -44,37 +51,62 @@ final class FleetTests {
 
   private static Optional<PairCorrelation> test(
       List<Map<String, Column>> assets, String x, String y, Form form) {
-    List<double[]> xs = new ArrayList<>();
-    List<double[]> ys = new ArrayList<>();
-    FleetSampleSize size = new FleetSampleSize(form);
+    Stack numbers = new Stack(form);
+    Stack ranks = new Stack(form);
     for (Map<String, Column> asset : assets) {
       Column columnX = asset.get(x);
       Column columnY = asset.get(y);
       if (columnX != null && columnY != null) {
-        Paired pairs = Column.numbers(columnX, columnY, form);
-        if (size.add(pairs.x(), pairs.y())) {
-          xs.add(pairs.x());
-          ys.add(pairs.y());
-        }
+        Paired values = Column.numbers(columnX, columnY, form);
+        Paired ranked = Column.ranked(columnX, columnY, 0, form);
+        numbers.add(values.x(), values.y());
+        ranks.add(AverageRanks.rank(ranked.x()), AverageRanks.rank(ranked.y()));
       }
     }
-    if (size.assets() < LEAST_ASSETS || size.pairs() < Correlations.LEAST_PAIRS) {
+    Optional<RepeatedMeasuresCorrelation> found = numbers.correlation();
+    Optional<RepeatedMeasuresCorrelation> ofRanks = ranks.correlation();
+    if (found.isEmpty() || ofRanks.isEmpty()) {
       return Optional.empty();
     }
-    return RepeatedMeasuresCorrelation.of(xs, ys)
-        .map(
-            found ->
-                new PairCorrelation(
-                    Scope.FLEET,
-                    Optional.empty(),
-                    x,
-                    y,
-                    0,
-                    form,
-                    found.n(),
-                    found.subjects(),
-                    CorrelationTest.of(found.r(), size.effective()),
-                    OptionalDouble.empty(),
-                    ByConstruction.tied(x, y)));
+    boolean agree = found.get().r() * ofRanks.get().r() > 0;
+    CorrelationTest judged = CorrelationTest.of(found.get().r(), numbers.size.effective());
+    CorrelationTest byRank = CorrelationTest.of(ofRanks.get().r(), ranks.size.effective());
+    return Optional.of(
+        new PairCorrelation(
+            Scope.FLEET,
+            Optional.empty(),
+            x,
+            y,
+            0,
+            form,
+            found.get().n(),
+            found.get().subjects(),
+            judged.withLeastP(agree ? byRank.p() : 1),
+            OptionalDouble.empty(),
+            ByConstruction.tied(x, y)));
+  }
+
+  /** The pairs of all assets that say something. */
+  private static final class Stack {
+    private final List<double[]> xs = new ArrayList<>();
+    private final List<double[]> ys = new ArrayList<>();
+    private final FleetSampleSize size;
+
+    Stack(Form form) {
+      size = new FleetSampleSize(form);
+    }
+
+    void add(double[] x, double[] y) {
+      if (size.add(x, y)) {
+        xs.add(x);
+        ys.add(y);
+      }
+    }
+
+    Optional<RepeatedMeasuresCorrelation> correlation() {
+      return size.assets() < LEAST_ASSETS || size.pairs() < Correlations.LEAST_PAIRS
+          ? Optional.empty()
+          : RepeatedMeasuresCorrelation.of(xs, ys);
+    }
   }
 }
