@@ -7,6 +7,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Set;
+import org.kappatrail.statistics.CorrelationTest;
 
 /**
  * Says which variables go with which: a sentence per pair that is called, those of κ first, then
@@ -84,21 +85,24 @@ public final class CorrelationSentences {
         + probability(test.q().orElseThrow());
   }
 
-  /** Half of the coefficient gone tells that the drift made it; else there is too little left. */
   private static String drift(Link link) {
-    double measured = Math.abs(link.measured().test().coefficient());
+    double measured = link.measured().test().coefficient();
     return link.detrended()
         .map(PairCorrelation::test)
-        .map(
-            test ->
-                Math.abs(test.coefficient()) < measured / 2
-                    ? "but both drift with age (detrended " + coefficient(test.coefficient()) + ")"
-                    : "but without the drift of both it could be chance (detrended "
-                        + coefficient(test.coefficient())
-                        + ", p "
-                        + probability(test.p())
-                        + ")")
+        .map(test -> drift(measured, test))
         .orElse("but without the drift of both nothing can be tested");
+  }
+
+  /** Half of the coefficient gone tells that the drift made it; else there is too little left. */
+  private static String drift(double measured, CorrelationTest left) {
+    String number = "detrended " + coefficient(left.coefficient());
+    if (Math.abs(left.coefficient()) < Math.abs(measured) / 2) {
+      return "but both drift with age (" + number + ")";
+    }
+    String ending = " (" + number + ", p " + probability(left.p()) + ")";
+    return "but without the drift of both "
+        + (left.p() <= Link.LIMIT ? "they go the other way" : "it could be chance")
+        + ending;
   }
 
   /** A coefficient with two decimals; the minus is U+2212. */
