@@ -27,6 +27,7 @@ import org.kappatrail.review.CorrelationVariables;
 import org.kappatrail.review.Progress;
 import org.kappatrail.review.Review;
 import org.kappatrail.review.Reviewer;
+import org.kappatrail.review.Since;
 
 /** Reads a history folder and reviews it: what the commands share. */
 final class HistoryLoad {
@@ -67,21 +68,47 @@ final class HistoryLoad {
 
   /** Reviews the chosen assets. */
   Review review(Progress progress) {
-    try (DutyLog log = openLog()) {
-      List<AssetReview> assets =
-          new Reviewer(chosen, intake.settings(), asOf, progress).review(log);
-      List<Problem> problems = new ArrayList<>(intake.problems());
+    return review(Optional.empty(), progress);
+  }
+
+  /** Reviews the chosen assets, and says what changed since an earlier day. */
+  Review review(Optional<LocalDate> earlier, Progress progress) {
+    List<AssetReview> assets;
+    List<Problem> problems = new ArrayList<>(intake.problems());
+    List<FileAccount> files = new ArrayList<>(intake.files());
+    try (DutyLog log = openLog(asOf)) {
+      assets = new Reviewer(chosen, intake.settings(), asOf, progress).review(log);
       problems.addAll(log.problems());
-      List<FileAccount> files = new ArrayList<>(intake.files());
       files.addAll(log.accounts());
-      return new Review(
-          asOf, intake.settings(), assets, CorrelationVariables.correlate(assets), problems, files);
+    }
+    Optional<Since> since = earlier.map(day -> since(day, assets, progress));
+    return new Review(
+        asOf,
+        intake.settings(),
+        assets,
+        since,
+        CorrelationVariables.correlate(assets),
+        problems,
+        files);
+  }
+
+  private Since since(LocalDate day, List<AssetReview> now, Progress progress) {
+    try (DutyLog log = openLog(day)) {
+      List<AssetReview> before =
+          new Reviewer(Reviewer.knownOn(chosen, day), intake.settings(), day, progress).review(log);
+      return Reviewer.compare(day, before, now);
     }
   }
 
   /** The logs of the whole history, so that no log counts as unknown for not being chosen. */
+  private DutyLog openLog(LocalDate lastDay) {
+    return DutyLogs.open(
+        folder, intake.settings(), intake.history(), lastDay, DutyOptions.defaults());
+  }
+
+  /** The logs up to the review's last day. */
   DutyLog openLog() {
-    return DutyLogs.open(folder, intake.settings(), intake.history(), asOf, DutyOptions.defaults());
+    return openLog(asOf);
   }
 
   /** What the review was made from. */

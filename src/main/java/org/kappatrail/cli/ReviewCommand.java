@@ -2,6 +2,8 @@ package org.kappatrail.cli;
 
 import java.io.IOException;
 import java.nio.file.Path;
+import java.time.LocalDate;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import org.jspecify.annotations.Nullable;
 import org.kappatrail.report.Pack;
@@ -9,7 +11,10 @@ import org.kappatrail.review.Level;
 import org.kappatrail.review.Review;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
+import picocli.CommandLine.Spec;
 
 /** {@code review}: the monthly review. */
 @Command(
@@ -23,12 +28,20 @@ final class ReviewCommand implements Callable<Integer> {
 
   @Mixin private HistoryOptions options;
 
+  @Spec private CommandSpec spec;
+
   @Option(
       names = "--out",
       paramLabel = "DIR",
       defaultValue = "reports",
       description = "Where the pack goes; default: ${DEFAULT-VALUE}.")
   private Path out;
+
+  @Option(
+      names = "--since",
+      paramLabel = "DATE",
+      description = "Say what is new, worse, better and settled since that day.")
+  private @Nullable LocalDate since;
 
   @Option(names = "--no-charts", description = "Leave the charts out.")
   private boolean noCharts;
@@ -54,11 +67,17 @@ final class ReviewCommand implements Callable<Integer> {
   @Override
   public Integer call() throws IOException {
     HistoryLoad load = new HistoryLoad(options, terminal.clock());
+    LocalDate earlier = since;
+    if (earlier != null && !earlier.isBefore(load.asOf())) {
+      throw new ParameterException(
+          spec.commandLine(),
+          "--since " + earlier + " is not before the state reviewed, " + load.asOf());
+    }
     Path[] place = new Path[1];
     Review[] made = new Review[1];
     terminal.withProgress(
         progress -> {
-          Review review = load.review(progress);
+          Review review = load.review(Optional.ofNullable(earlier), progress);
           made[0] = review;
           place[0] = new Pack(review, load.manifest(review), !noCharts, progress).writeTo(out);
         });

@@ -14,10 +14,12 @@ import org.kappatrail.review.Film;
 import org.kappatrail.review.KappaPoint;
 import org.kappatrail.review.Level;
 import org.kappatrail.review.Review;
+import org.kappatrail.review.Since;
 
 /** The review in a few lines for the terminal. */
 final class ReviewSummary {
   private static final int MOST_ASSETS = 20;
+  private static final int MOST_ITEMS = 30;
 
   private final Review review;
 
@@ -38,6 +40,7 @@ final class ReviewSummary {
             + " bearings, "
             + review.assets().stream().mapToInt(asset -> asset.samples().size()).sum()
             + " samples");
+    review.since().ifPresent(since -> since(out, since));
     List<AssetReview> troubled =
         review.worstFirst().stream()
             .filter(asset -> asset.level().filter(level -> level != Level.CLEAR).isPresent())
@@ -71,6 +74,27 @@ final class ReviewSummary {
                 Numbers.significant(known.uncertainty().low(), 3),
                 Numbers.significant(known.uncertainty().high(), 3),
                 known.regime().label()));
+  }
+
+  private static void since(PrintWriter out, Since since) {
+    out.println("Since " + since.date() + ":");
+    if (since.items().isEmpty()) {
+      out.println("  nothing changed");
+    }
+    for (Since.Item item : since.items().subList(0, Math.min(MOST_ITEMS, since.items().size()))) {
+      out.printf(
+          Locale.ROOT,
+          "  %-7s %-5s %s%s %s%n",
+          item.change().label(),
+          item.finding().level().label(),
+          item.finding().asset(),
+          item.finding().bearing().map(id -> " " + id).orElse(""),
+          item.finding().kind().label());
+    }
+    if (since.items().size() > MOST_ITEMS) {
+      out.println("  and " + (since.items().size() - MOST_ITEMS) + " more (on the page)");
+    }
+    out.println("State of the fleet:");
   }
 
   private void problems(PrintWriter out) {

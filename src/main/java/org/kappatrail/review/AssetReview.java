@@ -8,6 +8,10 @@ import org.kappatrail.history.Charge;
 import org.kappatrail.history.Event;
 import org.kappatrail.history.Oil;
 import org.kappatrail.history.Sample;
+import org.kappatrail.review.decision.Decision;
+import org.kappatrail.review.decision.FollowUp;
+import org.kappatrail.review.decision.OilCause;
+import org.kappatrail.review.trend.ViscosityChange;
 
 /**
  * What the review found for one asset.
@@ -18,6 +22,11 @@ import org.kappatrail.history.Sample;
  * @param samples its samples in time
  * @param events its events in time
  * @param bearings its bearings in the order of the register
+ * @param lastChange last change of viscosity within the present charge
+ * @param decision the five questions and the verdict; empty where no κ is known
+ * @param oilCauses what may have happened to the oil, likeliest first; empty without a real shift
+ * @param followUps what past acts did, latest first
+ * @param story where κ stands, what moved it, what is worth doing: a sentence each
  * @param findings what was found, worst first
  */
 public record AssetReview(
@@ -27,6 +36,11 @@ public record AssetReview(
     List<Sample> samples,
     List<Event> events,
     List<BearingReview> bearings,
+    Optional<ViscosityChange> lastChange,
+    Optional<Decision> decision,
+    List<OilCause> oilCauses,
+    List<FollowUp> followUps,
+    List<String> story,
     List<Finding> findings) {
 
   private static final Comparator<BearingReview> WORST_FIRST =
@@ -38,6 +52,9 @@ public record AssetReview(
     samples = List.copyOf(samples);
     events = List.copyOf(events);
     bearings = List.copyOf(bearings);
+    oilCauses = List.copyOf(oilCauses);
+    followUps = List.copyOf(followUps);
+    story = List.copyOf(story);
     findings = List.copyOf(findings);
   }
 

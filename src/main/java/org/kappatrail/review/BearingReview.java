@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.Optional;
 import org.kappatrail.duty.DroppedReadings;
 import org.kappatrail.history.Bearing;
+import org.kappatrail.review.trend.Trend;
 
 /**
  * What the review found for one bearing.
@@ -13,6 +14,7 @@ import org.kappatrail.history.Bearing;
  * @param reference conditions at which its oils are compared
  * @param trail its samples in time
  * @param days its days with running hours, in time
+ * @param trend drift, what moved κ, and the outlook
  * @param dropped readings left out of its log
  */
 public record BearingReview(
@@ -21,6 +23,7 @@ public record BearingReview(
     Optional<Reference> reference,
     List<KappaPoint> trail,
     List<DayKappa> days,
+    Trend trend,
     DroppedReadings dropped) {
 
   public BearingReview {

@@ -88,7 +88,7 @@ final class Films {
   }
 
   /** Standard uncertainty of ln ν40 by the site's setting, else by ASTM D445. */
-  private double sigmaLnV40(double viscosity40Cst) {
+  double sigmaLnV40(double viscosity40Cst) {
     OptionalDouble percent = settings.laboratory().reproducibilityPercent();
     return AstmD445Precision.sigmaLn(
         percent.isPresent()

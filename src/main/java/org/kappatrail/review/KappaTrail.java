@@ -14,6 +14,7 @@ import org.kappatrail.history.Oil;
 import org.kappatrail.history.PlantHistory;
 import org.kappatrail.history.Sample;
 import org.kappatrail.history.Settings;
+import org.kappatrail.review.trend.Trend;
 
 /** Builds the trail of κ of one bearing: a point per sample, and the days between. */
 final class KappaTrail {
@@ -25,6 +26,8 @@ final class KappaTrail {
   private final Lives lives;
   private final OperatingPoints points;
   private final BearingDuty duty;
+  private final Asset asset;
+  private final Settings settings;
 
   KappaTrail(
       Asset asset,
@@ -42,6 +45,8 @@ final class KappaTrail {
     this.lives = new Lives(asset, bearing);
     this.points = new OperatingPoints(bearing, duty.cells(), settings.duty());
     this.duty = duty;
+    this.asset = asset;
+    this.settings = settings;
   }
 
   private record Drawn(Sample sample, Charge charge, OperatingPoint point) {}
@@ -55,7 +60,10 @@ final class KappaTrail {
     List<DayKappa> days = DailyKappa.of(bearing, duty.cells(), oil);
     HoursBetween hours = new HoursBetween(days, duty.cells().size() > 0);
     List<KappaPoint> trail = drawn.stream().map(item -> point(item, reference, hours)).toList();
-    return new BearingReview(bearing, films.floor(), reference, trail, days, duty.dropped());
+    Trend trend =
+        new TrendOfTrail(bearing, films, reference, trail, days, history, settings)
+            .trend(asset.samplingDays());
+    return new BearingReview(bearing, films.floor(), reference, trail, days, trend, duty.dropped());
   }
 
   private KappaPoint point(Drawn drawn, Optional<Reference> reference, HoursBetween hours) {

@@ -3,6 +3,7 @@ package org.kappatrail.review;
 import java.time.LocalDate;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 import org.kappatrail.history.FileAccount;
 import org.kappatrail.history.Problem;
 import org.kappatrail.history.Settings;
@@ -14,6 +15,7 @@ import org.kappatrail.review.correlation.CorrelationResults;
  * @param asOf last day that counts
  * @param settings settings in force
  * @param assets assets in the order of the register
+ * @param since what changed since an earlier day, where that was asked for
  * @param correlations what goes with what in their samples
  * @param problems inputs that could not be used
  * @param files what became of every input file
@@ -22,6 +24,7 @@ public record Review(
     LocalDate asOf,
     Settings settings,
     List<AssetReview> assets,
+    Optional<Since> since,
     CorrelationResults correlations,
     List<Problem> problems,
     List<FileAccount> files) {

@@ -6,6 +6,8 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
+import java.util.stream.Collectors;
 import org.kappatrail.duty.BearingDuty;
 import org.kappatrail.duty.DutyLog;
 import org.kappatrail.history.Asset;
@@ -25,6 +27,7 @@ public final class Reviewer {
   private final LocalDate asOf;
   private final Progress progress;
   private final Map<String, AssetInputs> inputs = new HashMap<>();
+  private final Map<String, List<Finding>> swapped;
 
   private record AssetInputs(
       Asset asset,
@@ -60,11 +63,34 @@ public final class Reviewer {
           asset.id(),
           new AssetInputs(asset, charges, samples, events, new OilTimeline(charges, history)));
     }
+    swapped =
+        SwappedSamples.in(
+            history.assets().stream()
+                .flatMap(asset -> inputs(asset.id()).charges().stream())
+                .toList(),
+            history);
   }
 
   /** Latest sampling day of a history; empty where there is no sample. */
   public static Optional<LocalDate> latestSampling(PlantHistory history) {
     return history.samples().stream().map(Sample::day).max(LocalDate::compareTo);
+  }
+
+  /** The history as it was known on a day: results that came in later are left out. */
+  public static PlantHistory knownOn(PlantHistory history, LocalDate day) {
+    return new PlantHistory(
+        history.oils(),
+        history.assets(),
+        history.bearings(),
+        history.samples().stream()
+            .filter(sample -> !sample.receivedOn().orElse(sample.day()).isAfter(day))
+            .toList(),
+        history.assets().stream().flatMap(asset -> history.eventsOf(asset.id()).stream()).toList());
+  }
+
+  /** What changed from an earlier review to this one. */
+  public static Since compare(LocalDate day, List<AssetReview> before, List<AssetReview> now) {
+    return Since.of(day, before, now);
   }
 
   /** Reads the logs once and reviews every asset of the history; logs of others are passed over. */
@@ -125,8 +151,16 @@ public final class Reviewer {
     for (Charge charge : asset.charges()) {
       findings.addAll(UnrecordedChange.in(charge, history.getOil(charge.oil()), asset.events()));
     }
+    findings.addAll(swapped.getOrDefault(asset.asset().id(), List.of()));
+    Set<Integer> untrusted = chargesWithUnrecordedChange(asset, findings);
     for (BearingReview bearing : own) {
       findings.addAll(FilmFindings.of(bearing));
+      boolean trusted =
+          bearing
+              .latestFilm()
+              .filter(point -> !untrusted.contains(point.charge().number()))
+              .isPresent();
+      findings.addAll(TrendFindings.of(bearing, settings, trusted));
       findings.addAll(found(logFindings, bearing.bearing().key()));
     }
     findings.sort(Finding.ORDER);
@@ -137,7 +171,25 @@ public final class Reviewer {
         asset.samples(),
         asset.events(),
         own,
+        LastChange.of(asset.charges(), settings.laboratory()),
+        Optional.empty(),
+        List.of(),
+        List.of(),
+        List.of(),
         findings);
+  }
+
+  private static Set<Integer> chargesWithUnrecordedChange(
+      AssetInputs asset, List<Finding> findings) {
+    Set<String> samples =
+        findings.stream()
+            .filter(finding -> finding.kind() == FindingKind.UNRECORDED_OIL_CHANGE)
+            .flatMap(finding -> finding.sample().stream())
+            .collect(Collectors.toSet());
+    return asset.charges().stream()
+        .filter(charge -> charge.samples().stream().anyMatch(s -> samples.contains(s.id())))
+        .map(Charge::number)
+        .collect(Collectors.toSet());
   }
 
   private AssetInputs inputs(String asset) {

@@ -52,4 +52,11 @@ final class Say {
     }
     return (fraction < 0 ? "−" : "+") + text + " %";
   }
+
+  /** A relative change as a signed percentage with some decimals. */
+  static String signedPercent(double fraction, int decimals) {
+    String text = String.format(Locale.ROOT, "%." + decimals + "f", Math.abs(fraction) * 100);
+    boolean zero = text.chars().noneMatch(c -> c >= '1' && c <= '9');
+    return (zero ? "" : fraction < 0 ? "−" : "+") + text + " %";
+  }
 }

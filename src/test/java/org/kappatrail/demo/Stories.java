@@ -51,7 +51,7 @@ final class Stories {
       SP-AG4,LOW,55.0,0.20,0
       SP-AG1,LOW,50.0,0.20,0
       SP-PGB,OUT,51.5,0.20,0
-      UT-AG2,LOW,56.3,0.74,0
+      UT-AG2,LOW,57.4,0.74,0
       UT-SCR,DRIVE,55.0,0.40,0
       UT-WP1,THRUST,50.5,0.30,0
       UT-WP1,GUIDE,47.5,0.30,0

@@ -1,7 +1,5 @@
 package org.kappatrail.report.page;
 
-import java.nio.charset.StandardCharsets;
-import java.util.Base64;
 import java.util.List;
 import java.util.Optional;
 import org.kappatrail.history.Sample;
@@ -19,11 +17,13 @@ final class AssetSection {
   private final AssetReview asset;
   private final String anchor;
   private final String picture;
+  private final CorrelationSection correlations;
 
-  AssetSection(AssetReview asset, String anchor, String picture) {
+  AssetSection(AssetReview asset, String anchor, String picture, CorrelationSection correlations) {
     this.asset = asset;
     this.anchor = anchor;
     this.picture = picture;
+    this.correlations = correlations;
   }
 
   void write(Html html) {
@@ -34,12 +34,20 @@ final class AssetSection {
         .text(asset.asset().name().equals(asset.asset().id()) ? "" : asset.asset().name())
         .raw("</span></h2>\n");
     html.element("p class=\"note\"", facts());
-    picture(html);
+    Figure.write(
+        html,
+        picture,
+        "κ of "
+            + asset.asset().id()
+            + " against time, with viscosity, temperature and contamination; the numbers are in the"
+            + " tables below");
     findings(html);
     for (BearingReview bearing : asset.bearings()) {
       samples(html, bearing);
       working(html, bearing);
     }
+    html.element("h3", "What goes with what").raw("\n");
+    correlations.write(html, asset.asset().id());
     html.raw("</section>\n");
   }
 
@@ -53,22 +61,6 @@ final class AssetSection {
         + "; "
         + asset.samples().size()
         + (asset.samples().size() == 1 ? " sample" : " samples");
-  }
-
-  private void picture(Html html) {
-    if (picture.isEmpty()) {
-      return;
-    }
-    String data = Base64.getEncoder().encodeToString(picture.getBytes(StandardCharsets.UTF_8));
-    html.raw("<figure><img loading=\"lazy\" alt=\"")
-        .text(
-            "κ of "
-                + asset.asset().id()
-                + " against time, with viscosity, temperature and"
-                + " contamination; the numbers are in the tables below")
-        .raw("\" src=\"data:image/svg+xml;base64,")
-        .raw(data)
-        .raw("\"></figure>\n");
   }
 
   private void findings(Html html) {

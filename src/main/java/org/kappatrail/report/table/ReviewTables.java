@@ -27,6 +27,8 @@ public final class ReviewTables {
     return List.of(
         kappaHistory(review),
         kappaDaily(review),
+        TrendTables.attribution(review),
+        TrendTables.drift(review),
         CorrelationTable.of(review),
         findings(review),
         problems(review));
