@@ -2,7 +2,6 @@ package org.kappatrail.report.chart;
 
 import java.awt.BasicStroke;
 import java.awt.Color;
-import java.awt.Font;
 import java.awt.Graphics2D;
 import java.awt.geom.AffineTransform;
 import java.awt.geom.Line2D;
@@ -26,8 +25,8 @@ import org.kappatrail.review.correlation.PairCorrelation;
  */
 final class CorrelationMatrix {
   private static final int MOST_VARIABLES = 26;
-  private static final int NAMES = 122;
-  private static final int HEAD = 92;
+  private static final int NAMES = 130;
+  private static final int HEAD = 118;
   private static final int ROW = 22;
   private static final int LEGEND = 50;
   private static final double WIDEST = 62;
@@ -127,15 +126,20 @@ final class CorrelationMatrix {
       struck(g, cell);
     }
     String text = CorrelationSentences.coefficient(coefficient);
-    if (column < ROOMY) {
+    boolean narrow = column < ROOMY;
+    if (narrow) {
       text = text.replace("0.", ".").replace("1.00", "1");
     }
-    Font font =
-        sure ? ChartFont.bold(column < ROOMY ? 9f : 11f) : ChartFont.of(column < ROOMY ? 9f : 11f);
-    g.setFont(font);
-    g.setColor(sure ? inkOn(coefficient) : Palette.QUIET_INK);
+    float size = narrow ? 9f : 11f;
+    g.setFont(sure ? ChartFont.bold(size) : ChartFont.of(size));
     double width = g.getFontMetrics().stringWidth(text);
-    g.drawString(text, (float) (cell.getCenterX() - width / 2), (float) (cell.getCenterY() + 4));
+    double start = cell.getCenterX() - width / 2;
+    if (test.byConstruction()) {
+      g.setColor(Palette.PAPER);
+      g.fill(new Rectangle2D.Double(start - 2, cell.getMinY() + 2, width + 4, ROW - 4.0));
+    }
+    g.setColor(sure ? inkOn(coefficient) : Palette.QUIET_INK);
+    g.drawString(text, (float) start, (float) (cell.getCenterY() + 4));
   }
 
   private static boolean sure(PairCorrelation test) {
@@ -153,7 +157,7 @@ final class CorrelationMatrix {
   }
 
   private static void struck(Graphics2D g, Rectangle2D cell) {
-    g.setColor(Palette.RULE);
+    g.setColor(Palette.wash(Palette.QUIET_INK, 0.5));
     g.setStroke(new BasicStroke(0.9f));
     g.draw(
         new Line2D.Double(
@@ -161,7 +165,7 @@ final class CorrelationMatrix {
   }
 
   private void legend(Graphics2D g, double y) {
-    double x = NAMES;
+    double x = 0;
     x = swatch(g, x, y, colour(0.6, true), "move together, q ≤ 0.05");
     x = swatch(g, x, y, colour(-0.6, true), "move against each other, q ≤ 0.05");
     x = swatch(g, x, y, colour(0.9, false), "could be chance");
@@ -170,7 +174,7 @@ final class CorrelationMatrix {
     x = words(g, x + 28, y, "by construction: arithmetic, never called");
     words(g, x, y, "empty: too few, or one never changes");
     if (left > 0) {
-      words(g, NAMES, y + 18, left + " more variables are in correlations.csv");
+      words(g, 0, y + 18, left + " more variables are in correlations.csv");
     }
   }
 

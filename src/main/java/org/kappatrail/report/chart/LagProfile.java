@@ -3,6 +3,7 @@ package org.kappatrail.report.chart;
 import java.awt.BasicStroke;
 import java.util.List;
 import org.kappatrail.review.correlation.CorrelationSentences;
+import org.kappatrail.review.correlation.Judgement;
 import org.kappatrail.review.correlation.Link;
 import org.kappatrail.review.correlation.Names;
 import org.kappatrail.review.correlation.PairCorrelation;
@@ -32,7 +33,12 @@ final class LagProfile {
         links.stream().flatMap(link -> link.detrended().stream()).toList();
     Plot plot =
         new Plot(
-            "Coefficient of " + y + " with " + x + " by lag",
+            "Coefficient of "
+                + y
+                + " with "
+                + x
+                + " by lag"
+                + (strongest.judgement() == Judgement.CHANCE ? " (could be chance)" : ""),
             "samples by which " + y + " comes after " + x,
             width,
             height,

@@ -73,7 +73,7 @@ final class PairScatter {
             canvas.plot().getMinX() + half + 2,
             Math.min(canvas.x(point.x()), canvas.plot().getMaxX() - half));
     double y = Math.max(canvas.plot().getMinY() + 10, canvas.y(point.y()) + below);
-    canvas.textCentred(text, x, y, Palette.INK, 11f);
+    canvas.onPaper(text, x - half, y, Palette.INK, 11f);
   }
 
   private static List<Point> points(AssetSeries series, PairCorrelation pair) {

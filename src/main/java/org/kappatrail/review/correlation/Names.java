@@ -20,9 +20,13 @@ public final class Names {
           Map.entry("viscosity_100c_cst", new Words("viscosity at 100 °C", "ν at 100 °C", "mm²/s")),
           Map.entry(TEMPERATURE, new Words("operating temperature", "temperature", "°C")),
           Map.entry("water_ppm", new Words("water", "water", "mg/kg")),
-          Map.entry("particles_4um_per_ml", new Words("particles ≥ 4 µm", "≥ 4 µm", "per ml")),
-          Map.entry("particles_6um_per_ml", new Words("particles ≥ 6 µm", "≥ 6 µm", "per ml")),
-          Map.entry("particles_14um_per_ml", new Words("particles ≥ 14 µm", "≥ 14 µm", "per ml")),
+          Map.entry(
+              "particles_4um_per_ml", new Words("particles ≥ 4 µm", "particles ≥ 4 µm", "per ml")),
+          Map.entry(
+              "particles_6um_per_ml", new Words("particles ≥ 6 µm", "particles ≥ 6 µm", "per ml")),
+          Map.entry(
+              "particles_14um_per_ml",
+              new Words("particles ≥ 14 µm", "particles ≥ 14 µm", "per ml")),
           Map.entry("acid_number_mg_koh_g", new Words("acid number", "acid number", "mg KOH/g")),
           Map.entry("oil_hours", new Words("oil hours", "oil hours", "h")));
 
