@@ -25,17 +25,15 @@ import org.kappatrail.tribology.Iso4406;
 /**
  * The variables of an asset that correlations are looked for between: κ as achieved and at
  * reference conditions and the operating temperature, of the governing bearing, else of the first;
- * then what the laboratory measured, κ's own and the known columns first, every further numeric
- * column after them by name. Particle counts are logarithms to base 10.
+ * the oil's viscosities, hours, water, particles, elements and acid number; then every further
+ * numeric column by name. Particle counts are logarithms to base 10.
  *
  * <p>The temperature that a sample itself states is no variable of its own: where no log gives the
  * operating temperature, it is that already.
  */
 public final class CorrelationVariables {
-  private static final List<String> BEFORE_PARTICLES =
+  private static final List<String> VISCOSITIES =
       List.of(SampleColumns.VISCOSITY_40C, SampleColumns.VISCOSITY_100C);
-  private static final List<String> AFTER_PARTICLES =
-      List.of(SampleColumns.ACID_NUMBER, SampleColumns.OIL_HOURS);
 
   private CorrelationVariables() {}
 
@@ -53,19 +51,20 @@ public final class CorrelationVariables {
         quantity -> sample -> ofPoint(points, sample, quantity);
     add(variables, Names.KAPPA, samples, ofPoint.apply(CorrelationVariables::kappa));
     add(variables, Names.KAPPA_REFERENCE, samples, ofPoint.apply(KappaPoint::kappaReference));
-    BEFORE_PARTICLES.forEach(column -> addColumn(variables, column, samples));
+    VISCOSITIES.forEach(column -> addColumn(variables, column, samples));
     add(
         variables,
         Names.TEMPERATURE,
         samples,
         ofPoint.apply(point -> point.point().temperatureC()));
+    addColumn(variables, SampleColumns.OIL_HOURS, samples);
     addColumn(variables, SampleColumns.WATER, samples);
     particles(variables, samples);
     List<String> further = further(samples);
     further.stream()
         .filter(column -> column.endsWith(SampleColumns.ELEMENT_SUFFIX))
         .forEach(column -> addColumn(variables, column, samples));
-    AFTER_PARTICLES.forEach(column -> addColumn(variables, column, samples));
+    addColumn(variables, SampleColumns.ACID_NUMBER, samples);
     further.stream()
         .filter(column -> !column.endsWith(SampleColumns.ELEMENT_SUFFIX))
         .forEach(column -> addColumn(variables, column, samples));

@@ -111,14 +111,6 @@ final class Canvas {
     g.drawString(text, (float) x, (float) y);
   }
 
-  /** Text on a strip of paper, over whatever runs through. */
-  void onPaper(String text, double x, double y, Color colour, float size) {
-    double width = widthOf(text, size);
-    g.setColor(Palette.PAPER);
-    g.fill(new Rectangle2D.Double(x - 1, y - size + 1, width + 2, size + 1.0));
-    text(text, x, y, colour, size);
-  }
-
   /** Text that ends at x. */
   void textLeftOf(String text, double x, double y, Color colour, float size) {
     g.setFont(ChartFont.of(size));

@@ -26,7 +26,7 @@ import org.kappatrail.review.correlation.PairCorrelation;
 final class CorrelationMatrix {
   private static final int MOST_VARIABLES = 26;
   private static final int NAMES = 130;
-  private static final int HEAD = 118;
+  private static final int HEAD = 126;
   private static final int ROW = 22;
   private static final int LEGEND = 50;
   private static final double WIDEST = 62;

@@ -26,8 +26,8 @@ final class LagProfile {
    * @param strongest the one among them to point at
    */
   static Plot of(List<Link> links, Link strongest, int width, int height) {
-    String x = Names.of(strongest.measured().x());
-    String y = Names.of(strongest.measured().y());
+    String x = Names.brief(strongest.measured().x());
+    String y = Names.brief(strongest.measured().y());
     List<PairCorrelation> measured = links.stream().map(Link::measured).toList();
     List<PairCorrelation> detrended =
         links.stream().flatMap(link -> link.detrended().stream()).toList();
@@ -81,9 +81,10 @@ final class LagProfile {
               canvas.x(test.lag() - APART) - 6,
               canvas.y(test.test().coefficient()) + 4,
               Palette.INK,
-              12f);
-          double right = canvas.plot().getMaxX();
-          canvas.textLeftOf("● as measured  ◆ detrended", right, -8, Palette.QUIET_INK, 11f);
+              11.5f);
+          canvas.text(
+              "● as measured   ◆ detrended; whiskers: 95 % interval",
+              canvas.plot().getMinX(), -10, Palette.QUIET_INK, 11f);
         });
   }
 }

@@ -1,10 +1,13 @@
 package org.kappatrail.report.chart;
 
 import java.awt.Color;
+import java.awt.geom.Rectangle2D;
 import java.time.LocalDate;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
+import java.util.stream.Stream;
 import org.kappatrail.review.correlation.AssetSeries;
 import org.kappatrail.review.correlation.Names;
 import org.kappatrail.review.correlation.PairCorrelation;
@@ -13,6 +16,7 @@ import org.knowm.xchart.style.markers.SeriesMarkers;
 
 /** One pair of an asset at its lag, its samples joined in the order of time. */
 final class PairScatter {
+  private static final float DATE_SIZE = 11f;
   private static final String PARTICLES = "particles_";
   private static final List<String> AFTER =
       List.of("in the same sample", "one sample", "two samples", "three samples");
@@ -55,25 +59,46 @@ final class PairScatter {
           Point first = points.get(0);
           Point last = points.get(points.size() - 1);
           canvas.ring(first.x(), first.y(), ink);
-          date(canvas, first, -8);
-          date(canvas, last, crowded(canvas, first, last) ? 17 : -8);
+          List<Rectangle2D> taken = new ArrayList<>();
+          for (Point point : points) {
+            taken.add(around(canvas.x(point.x()), canvas.y(point.y()), 5, 5));
+          }
+          date(canvas, first, taken);
+          date(canvas, last, taken);
+          canvas.text(
+              "joined in the order of time, from the ring on",
+              canvas.plot().getMinX(),
+              -10,
+              Palette.QUIET_INK,
+              11f);
         });
   }
 
-  private static boolean crowded(Canvas canvas, Point first, Point last) {
-    return Math.abs(canvas.x(first.x()) - canvas.x(last.x())) < 70
-        && Math.abs(canvas.y(first.y()) - canvas.y(last.y())) < 26;
+  /** Writes the day of a point beside it, where the fewest points and words are. */
+  private static void date(Canvas canvas, Point point, List<Rectangle2D> taken) {
+    String text = point.day().toString();
+    double half = canvas.widthOf(text, DATE_SIZE) / 2;
+    double x = canvas.x(point.x());
+    double y = canvas.y(point.y());
+    Rectangle2D place =
+        Stream.of(
+                around(x, y - 13, half, 6),
+                around(x, y + 13, half, 6),
+                around(x + half + 9, y, half, 6),
+                around(x - half - 9, y, half, 6))
+            .min(Comparator.comparingLong(box -> cost(canvas, box, taken)))
+            .orElseThrow();
+    taken.add(place);
+    canvas.text(text, (float) place.getMinX(), place.getMaxY() - 2, Palette.INK, DATE_SIZE);
   }
 
-  private static void date(Canvas canvas, Point point, double below) {
-    String text = point.day().toString();
-    double half = canvas.widthOf(text, 11f) / 2;
-    double x =
-        Math.max(
-            canvas.plot().getMinX() + half + 2,
-            Math.min(canvas.x(point.x()), canvas.plot().getMaxX() - half));
-    double y = Math.max(canvas.plot().getMinY() + 10, canvas.y(point.y()) + below);
-    canvas.onPaper(text, x - half, y, Palette.INK, 11f);
+  private static long cost(Canvas canvas, Rectangle2D box, List<Rectangle2D> taken) {
+    long outside = canvas.plot().contains(box) ? 0 : taken.size();
+    return outside + taken.stream().filter(box::intersects).count();
+  }
+
+  private static Rectangle2D around(double x, double y, double halfWidth, double halfHeight) {
+    return new Rectangle2D.Double(x - halfWidth, y - halfHeight, 2 * halfWidth, 2 * halfHeight);
   }
 
   private static List<Point> points(AssetSeries series, PairCorrelation pair) {

@@ -19,7 +19,7 @@ import org.knowm.xchart.style.markers.Marker;
 final class Plot {
   static final int LEFT = 62;
 
-  private static final int TOP = 26;
+  private static final int TOP = 42;
   private static final int BOTTOM = 40;
   private static final int RIGHT = 14;
   private static final Color CLEAR = new Color(0, 0, 0, 0);
@@ -172,7 +172,7 @@ final class Plot {
       canvas.textCentred(
           minus(x.text(tick)), canvas.x(tick), area.getMaxY() + 16, Palette.QUIET_INK, 11.5f);
     }
-    canvas.textCentred(xLabel, area.getCenterX(), area.getMaxY() + 33, Palette.INK, 12f);
+    canvas.textCentred(xLabel, area.getCenterX(), area.getMaxY() + 33, Palette.INK, 11.5f);
     canvas.line(
         area.getMinX(),
         area.getMaxY(),

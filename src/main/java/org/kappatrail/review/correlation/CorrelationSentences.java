@@ -69,11 +69,22 @@ public final class CorrelationSentences {
     String x = Names.of(test.x());
     String y = Names.of(test.y());
     if (test.lag() == 0) {
-      return y + (test.test().coefficient() > 0 ? " moves with " : " moves against ") + x;
+      return y
+          + verb(" move", test.y())
+          + (test.test().coefficient() > 0 ? " with " : " against ")
+          + x;
     }
     String samples =
         NUMBERS.get(Math.abs(test.lag())) + (Math.abs(test.lag()) == 1 ? " sample" : " samples");
-    return (test.lag() > 0 ? y + " follows " + x : x + " follows " + y) + " by " + samples;
+    return (test.lag() > 0
+            ? y + verb(" follow", test.y()) + " " + x
+            : x + verb(" follow", test.x()) + " " + y)
+        + " by "
+        + samples;
+  }
+
+  private static String verb(String stem, String variable) {
+    return Names.plural(variable) ? stem : stem + "s";
   }
 
   private static String certainty(PairCorrelation test) {

@@ -1,12 +1,16 @@
 package org.kappatrail.review.correlation;
 
 import java.util.Map;
+import java.util.Set;
 
 /** Names of variables in files, and the words and units that people read. */
 public final class Names {
   public static final String KAPPA = "kappa";
   public static final String KAPPA_REFERENCE = "kappa_reference";
   public static final String TEMPERATURE = "temperature_c";
+
+  private static final Set<String> PLURAL =
+      Set.of("oil_hours", "particles_4um_per_ml", "particles_6um_per_ml", "particles_14um_per_ml");
 
   private static final String ELEMENT_SUFFIX = "_ppm";
 
@@ -35,6 +39,11 @@ public final class Names {
   /** Name in a sentence. */
   public static String of(String variable) {
     return words(variable).name();
+  }
+
+  /** True where the name takes a verb in the plural. */
+  static boolean plural(String variable) {
+    return PLURAL.contains(variable);
   }
 
   /** Name where there is little room. */
