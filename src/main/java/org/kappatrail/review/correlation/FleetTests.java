@@ -8,6 +8,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
+import java.util.stream.IntStream;
 import org.kappatrail.statistics.AverageRanks;
 import org.kappatrail.statistics.CorrelationTest;
 import org.kappatrail.statistics.RepeatedMeasuresCorrelation;
@@ -38,12 +39,19 @@ final class FleetTests {
       names.addAll(named.keySet());
     }
     List<String> order = List.copyOf(names);
+    return IntStream.range(0, order.size())
+        .parallel()
+        .mapToObj(first -> withRest(byName, order, first))
+        .flatMap(List::stream)
+        .toList();
+  }
+
+  private static List<PairCorrelation> withRest(
+      List<Map<String, Column>> assets, List<String> order, int first) {
     List<PairCorrelation> tests = new ArrayList<>();
-    for (int first = 0; first < order.size(); first++) {
-      for (int second = first + 1; second < order.size(); second++) {
-        for (Form form : Form.values()) {
-          test(byName, order.get(first), order.get(second), form).ifPresent(tests::add);
-        }
+    for (int second = first + 1; second < order.size(); second++) {
+      for (Form form : Form.values()) {
+        test(assets, order.get(first), order.get(second), form).ifPresent(tests::add);
       }
     }
     return tests;

@@ -1,7 +1,6 @@
 package org.kappatrail.review.correlation;
 
-import java.util.HashMap;
-import java.util.Map;
+import java.util.Arrays;
 import org.kappatrail.statistics.FisherExact;
 
 /**
@@ -42,13 +41,18 @@ final class StandingOut {
 
   private record Common(double value, int count) {
     static Common of(double[] values) {
-      Map<Double, Integer> counts = new HashMap<>();
+      double[] sorted = values.clone();
+      Arrays.sort(sorted);
       Common common = new Common(0, 0);
-      for (double value : values) {
-        int count = counts.merge(value, 1, Integer::sum);
-        if (count > common.count()) {
-          common = new Common(value, count);
+      for (int from = 0; from < sorted.length; ) {
+        int to = from;
+        while (to < sorted.length && sorted[to] == sorted[from]) {
+          to++;
         }
+        if (to - from > common.count()) {
+          common = new Common(sorted[from], to - from);
+        }
+        from = to;
       }
       return common;
     }
