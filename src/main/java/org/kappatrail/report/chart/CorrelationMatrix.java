@@ -117,7 +117,7 @@ final class CorrelationMatrix {
   }
 
   private void cell(Graphics2D g, Rectangle2D cell, PairCorrelation test) {
-    double coefficient = test.test().coefficient();
+    double coefficient = test.coefficient();
     boolean sure = sure(test);
     if (!test.byConstruction()) {
       g.setColor(colour(coefficient, sure));

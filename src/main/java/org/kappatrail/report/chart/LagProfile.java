@@ -48,28 +48,26 @@ final class LagProfile {
         canvas -> {
           canvas.horizontal(0, Palette.QUIET_INK, new BasicStroke(0.8f));
           measured.forEach(
-              test ->
-                  canvas.whisker(
-                      test.lag() - APART, test.test().low(), test.test().high(), Palette.INK));
+              test -> canvas.whisker(test.lag() - APART, test.low(), test.high(), Palette.INK));
           detrended.forEach(
               test ->
                   canvas.whisker(
                       test.lag() + APART,
-                      test.test().low(),
-                      test.test().high(),
+                      test.low(),
+                      test.high(),
                       Palette.wash(Palette.QUIET_INK, 0.7)));
         });
     plot.series(
         "as measured",
         measured.stream().mapToDouble(test -> test.lag() - APART).toArray(),
-        measured.stream().mapToDouble(test -> test.test().coefficient()).toArray(),
+        measured.stream().mapToDouble(test -> test.coefficient()).toArray(),
         Palette.INK,
         0,
         SeriesMarkers.CIRCLE);
     plot.series(
         "detrended",
         detrended.stream().mapToDouble(test -> test.lag() + APART).toArray(),
-        detrended.stream().mapToDouble(test -> test.test().coefficient()).toArray(),
+        detrended.stream().mapToDouble(test -> test.coefficient()).toArray(),
         Palette.QUIET_INK,
         0,
         SeriesMarkers.DIAMOND);
@@ -77,9 +75,9 @@ final class LagProfile {
         canvas -> {
           PairCorrelation test = strongest.measured();
           canvas.textLeftOf(
-              CorrelationSentences.coefficient(test.test().coefficient()),
+              CorrelationSentences.coefficient(test.coefficient()),
               canvas.x(test.lag() - APART) - 6,
-              canvas.y(test.test().coefficient()) + 4,
+              canvas.y(test.coefficient()) + 4,
               Palette.INK,
               11.5f);
           canvas.text(

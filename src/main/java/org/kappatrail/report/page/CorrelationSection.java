@@ -9,7 +9,6 @@ import org.kappatrail.review.correlation.Judgement;
 import org.kappatrail.review.correlation.Link;
 import org.kappatrail.review.correlation.Names;
 import org.kappatrail.review.correlation.PairCorrelation;
-import org.kappatrail.statistics.CorrelationTest;
 
 /** What goes with what in one asset, or in the fleet: sentences, picture, and the numbers. */
 final class CorrelationSection {
@@ -82,32 +81,31 @@ final class CorrelationSection {
 
   private void row(Html html, Link link) {
     PairCorrelation pair = link.measured();
-    CorrelationTest test = pair.test();
-    Optional<CorrelationTest> left = link.detrended().map(PairCorrelation::test);
+    Optional<PairCorrelation> left = link.detrended();
     html.raw("<tr>")
         .element("td", Names.of(pair.x()))
         .element("td", Names.of(pair.y()))
         .element("td class=\"n\"", fleet ? Integer.toString(pair.assets()) : lag(pair.lag()))
         .element("td class=\"n\"", Integer.toString(pair.n()))
-        .element("td class=\"n\"", Numbers.fixed(test.nEffective(), 1))
+        .element("td class=\"n\"", Numbers.fixed(pair.nEffective(), 1))
         .element(
             link.judgement() == Judgement.CALLED ? "td class=\"n deciding\"" : "td class=\"n\"",
-            CorrelationSentences.coefficient(test.coefficient()))
+            CorrelationSentences.coefficient(pair.coefficient()))
         .element(
             "td class=\"n\"",
-            CorrelationSentences.coefficient(test.low())
+            CorrelationSentences.coefficient(pair.low())
                 + " to "
-                + CorrelationSentences.coefficient(test.high()))
-        .element("td class=\"n\"", CorrelationSentences.probability(test.p()))
+                + CorrelationSentences.coefficient(pair.high()))
+        .element("td class=\"n\"", CorrelationSentences.probability(pair.p()))
         .element("td class=\"n\"", CorrelationSentences.probability(pair.q().orElse(1)))
         .element(
             "td class=\"n\"",
-            left.map(CorrelationTest::coefficient)
+            left.map(PairCorrelation::coefficient)
                 .map(CorrelationSentences::coefficient)
                 .orElse(""))
         .element(
             "td class=\"n\"",
-            left.map(CorrelationTest::p).map(CorrelationSentences::probability).orElse(""))
+            left.map(PairCorrelation::p).map(CorrelationSentences::probability).orElse(""))
         .element("td class=\"word\"", word(link.judgement()))
         .raw("</tr>\n");
   }

@@ -24,11 +24,11 @@ final class CorrelationTable {
         .whole("lag", PairCorrelation::lag)
         .text("form", test -> test.form().label())
         .whole("n", PairCorrelation::n)
-        .number("n_effective", test -> OptionalDouble.of(test.test().nEffective()))
-        .number("coefficient", test -> OptionalDouble.of(test.test().coefficient()))
-        .number("low", test -> OptionalDouble.of(test.test().low()))
-        .number("high", test -> OptionalDouble.of(test.test().high()))
-        .number("p", test -> OptionalDouble.of(test.test().p()))
+        .number("n_effective", test -> OptionalDouble.of(test.nEffective()))
+        .number("coefficient", test -> OptionalDouble.of(test.coefficient()))
+        .number("low", test -> OptionalDouble.of(test.low()))
+        .number("high", test -> OptionalDouble.of(test.high()))
+        .number("p", test -> OptionalDouble.of(test.p()))
         .number("q", PairCorrelation::q)
         .from(tests);
   }

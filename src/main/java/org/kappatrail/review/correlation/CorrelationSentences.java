@@ -7,7 +7,6 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Locale;
 import java.util.Set;
-import org.kappatrail.statistics.CorrelationTest;
 
 /**
  * Says which variables go with which: a sentence per pair that is called, those of κ first, then
@@ -57,7 +56,7 @@ public final class CorrelationSentences {
   /** The sentence on a link that is called, or that merely drifts. */
   public static String sentence(Link link) {
     PairCorrelation test = link.measured();
-    String numbers = coefficient(test.test().coefficient()) + ", " + certainty(test);
+    String numbers = coefficient(test.coefficient()) + ", " + certainty(test);
     String text =
         link.judgement() == Judgement.CALLED
             ? claim(test) + " (" + numbers + ")."
@@ -69,10 +68,7 @@ public final class CorrelationSentences {
     String x = Names.of(test.x());
     String y = Names.of(test.y());
     if (test.lag() == 0) {
-      return y
-          + verb(" move", test.y())
-          + (test.test().coefficient() > 0 ? " with " : " against ")
-          + x;
+      return y + verb(" move", test.y()) + (test.coefficient() > 0 ? " with " : " against ") + x;
     }
     String samples =
         NUMBERS.get(Math.abs(test.lag())) + (Math.abs(test.lag()) == 1 ? " sample" : " samples");
@@ -91,21 +87,20 @@ public final class CorrelationSentences {
     String assets = test.scope() == Scope.FLEET ? test.assets() + " assets, " : "";
     return assets
         + "N* "
-        + String.format(Locale.ROOT, "%.0f", test.test().nEffective())
+        + String.format(Locale.ROOT, "%.0f", test.nEffective())
         + ", q "
         + probability(test.q().orElseThrow());
   }
 
   private static String drift(Link link) {
-    double measured = link.measured().test().coefficient();
+    double measured = link.measured().coefficient();
     return link.detrended()
-        .map(PairCorrelation::test)
-        .map(test -> drift(measured, test))
+        .map(left -> drift(measured, left))
         .orElse("but without the drift of both nothing can be tested");
   }
 
   /** Half of the coefficient gone tells that the drift made it; else there is too little left. */
-  private static String drift(double measured, CorrelationTest left) {
+  private static String drift(double measured, PairCorrelation left) {
     String number = "detrended " + coefficient(left.coefficient());
     if (Math.abs(left.coefficient()) < Math.abs(measured) / 2) {
       return "but both drift with age (" + number + ")";

@@ -41,7 +41,7 @@ public final class Correlations {
     double[] p =
         Stream.concat(assets.stream(), fleet.stream())
             .filter(test -> !test.byConstruction())
-            .mapToDouble(test -> test.test().p())
+            .mapToDouble(test -> test.p())
             .toArray();
     double[] q = BenjaminiHochberg.adjust(p);
     int[] next = {0};

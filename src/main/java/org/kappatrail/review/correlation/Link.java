@@ -19,8 +19,8 @@ public record Link(PairCorrelation measured, Optional<PairCorrelation> detrended
 
   /** The least likely to be chance first; of equals the larger one, then the nearer lag. */
   public static final Comparator<Link> SUREST =
-      Comparator.comparingDouble((Link link) -> link.measured.test().p())
-          .thenComparingDouble(link -> -Math.abs(link.measured.test().coefficient()))
+      Comparator.comparingDouble((Link link) -> link.measured.p())
+          .thenComparingDouble(link -> -Math.abs(link.measured.coefficient()))
           .thenComparingInt(link -> Math.abs(link.measured.lag()))
           .thenComparingInt(link -> link.measured.lag());
 
@@ -72,8 +72,7 @@ public record Link(PairCorrelation measured, Optional<PairCorrelation> detrended
   }
 
   private boolean bearsOut(PairCorrelation other) {
-    return other.test().p() <= LIMIT
-        && other.test().coefficient() * measured.test().coefficient() > 0;
+    return other.p() <= LIMIT && other.coefficient() * measured.coefficient() > 0;
   }
 
   private static Key key(PairCorrelation test) {

@@ -46,6 +46,31 @@ public record PairCorrelation(
     }
   }
 
+  /** Coefficient, −1 to 1. */
+  public double coefficient() {
+    return test.coefficient();
+  }
+
+  /** Independent pairs the samples are worth, N*. */
+  public double nEffective() {
+    return test.nEffective();
+  }
+
+  /** Lower 95 % limit of the coefficient. */
+  public double low() {
+    return test.low();
+  }
+
+  /** Upper 95 % limit of the coefficient. */
+  public double high() {
+    return test.high();
+  }
+
+  /** Two-sided probability of so large a coefficient when there is none. */
+  public double p() {
+    return test.p();
+  }
+
   PairCorrelation withQ(double adjusted) {
     return new PairCorrelation(
         scope,
