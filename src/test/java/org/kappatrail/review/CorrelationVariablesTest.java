@@ -108,7 +108,11 @@ class CorrelationVariablesTest {
     Intake intake = HistoryReader.read(folder);
     assertThat(intake.problems()).isEmpty();
     return new Reviewer(
-            intake.history(), intake.settings(), LocalDate.of(2024, 3, 31), Progress.SILENT)
+            intake.history(),
+            intake.history(),
+            intake.settings(),
+            LocalDate.of(2024, 3, 31),
+            Progress.SILENT)
         .review(DutyLogs.empty());
   }
 

@@ -30,6 +30,8 @@ public final class ReviewTables {
         TrendTables.attribution(review),
         TrendTables.drift(review),
         CorrelationTable.of(review),
+        DecisionTables.verdicts(review),
+        DecisionTables.remedies(review),
         findings(review),
         problems(review));
   }
