@@ -67,6 +67,7 @@ public final class Pack {
     for (Table table : ReviewTables.all(review)) {
       CsvFile.write(table, folder.resolve(table.name() + ".csv"));
     }
+    CsvFile.write(ReviewTables.kappaDaily(review), folder.resolve("kappa-daily.csv"));
     manifest.write(folder.resolve("manifest.json"), review);
     Pictures pictures = charts ? writeCharts(folder) : Pictures.none();
     Files.writeString(folder.resolve("index.html"), new Page(review, pictures).html());
