@@ -34,7 +34,8 @@ final class CorrelationSection {
         .limit(MOST_SENTENCES)
         .forEach(sentence -> html.element("li", sentence).raw("\n"));
     if (sentences.size() > MOST_SENTENCES) {
-      html.element("li", sentences.size() - MOST_SENTENCES + " more are in the table below.");
+      int more = sentences.size() - MOST_SENTENCES;
+      html.element("li", more + (more == 1 ? " more is" : " more are") + " in the table below.");
     }
     html.raw("</ul>\n");
     if (links.isEmpty()) {
