@@ -3,21 +3,18 @@ package org.kappatrail.report;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 import java.util.stream.Stream;
-import org.kappatrail.report.chart.AssetChart;
 import org.kappatrail.report.chart.ChartFiles;
-import org.kappatrail.report.chart.Drawing;
-import org.kappatrail.report.page.FileNames;
 import org.kappatrail.report.page.Page;
+import org.kappatrail.report.page.Pictures;
 import org.kappatrail.report.table.CsvFile;
 import org.kappatrail.report.table.ReviewTables;
-import org.kappatrail.review.AssetReview;
 import org.kappatrail.review.Progress;
 import org.kappatrail.review.Review;
 import tech.tablesaw.api.Table;
@@ -72,49 +69,44 @@ public final class Pack {
     }
     CsvFile.write(ReviewTables.kappaDaily(review), folder.resolve("kappa-daily.csv"));
     manifest.write(folder.resolve("manifest.json"), review);
-    Map<String, String> pictures = charts ? writeCharts(folder) : Map.of();
+    Pictures pictures = charts ? writeCharts(folder) : Pictures.none();
     Files.writeString(folder.resolve("index.html"), new Page(review, pictures).html());
   }
 
-  /** Writes the charts and gives each asset's SVG text for the page. */
-  private Map<String, String> writeCharts(Path folder) throws IOException {
+  /** Writes the charts and gives their SVG texts for the page. */
+  private Pictures writeCharts(Path folder) throws IOException {
     Path place = Files.createDirectory(folder.resolve("charts"));
-    List<AssetReview> assets = review.assets();
-    Map<String, String> names = FileNames.of(assets.stream().map(a -> a.asset().id()).toList());
-    Map<String, String> pictures = new TreeMap<>();
-    List<Job> jobs = new ArrayList<>();
-    for (AssetReview asset : assets) {
-      Optional<Drawing> drawing = AssetChart.of(review, asset);
-      drawing.ifPresent(
-          found ->
-              jobs.add(
-                  new Job(
-                      asset.asset().id(), names.getOrDefault(asset.asset().id(), "asset"), found)));
-    }
+    List<ChartJob> jobs = ChartJob.of(review);
     List<Result> results = jobs.parallelStream().map(job -> draw(job, place)).toList();
+    Map<ChartJob.Kind, Map<String, String>> texts = new EnumMap<>(ChartJob.Kind.class);
     int done = 0;
     for (Result result : results) {
       if (result.failure().isPresent()) {
         throw result.failure().get();
       }
-      pictures.put(result.asset(), result.svg());
+      texts
+          .computeIfAbsent(result.job().kind(), kind -> new TreeMap<>())
+          .put(result.job().subject(), result.svg());
       progress.at("charts", ++done, results.size());
     }
-    return pictures;
+    return new Pictures(
+        texts.getOrDefault(ChartJob.Kind.TRAIL, Map.of()),
+        texts.getOrDefault(ChartJob.Kind.CORRELATION, Map.of()),
+        texts
+            .getOrDefault(ChartJob.Kind.FLEET_CORRELATION, Map.of())
+            .getOrDefault(ChartJob.FLEET, ""));
   }
 
-  private record Job(String asset, String fileName, Drawing drawing) {}
+  private record Result(ChartJob job, String svg, Optional<IOException> failure) {}
 
-  private record Result(String asset, String svg, Optional<IOException> failure) {}
-
-  private static Result draw(Job job, Path place) {
+  private static Result draw(ChartJob job, Path place) {
     try {
       String svg = ChartFiles.svg(job.drawing());
       Files.writeString(place.resolve(job.fileName() + ".svg"), svg);
       ChartFiles.writePng(job.drawing(), place.resolve(job.fileName() + ".png"));
-      return new Result(job.asset(), svg, Optional.empty());
+      return new Result(job, svg, Optional.empty());
     } catch (IOException e) {
-      return new Result(job.asset(), "", Optional.of(e));
+      return new Result(job, "", Optional.of(e));
     }
   }
 

@@ -17,11 +17,13 @@ final class AssetSection {
   private final AssetReview asset;
   private final String anchor;
   private final String picture;
+  private final CorrelationSection correlations;
 
-  AssetSection(AssetReview asset, String anchor, String picture) {
+  AssetSection(AssetReview asset, String anchor, String picture, CorrelationSection correlations) {
     this.asset = asset;
     this.anchor = anchor;
     this.picture = picture;
+    this.correlations = correlations;
   }
 
   void write(Html html) {
@@ -44,6 +46,8 @@ final class AssetSection {
       TrendSection.write(html, bearing);
       working(html, bearing);
     }
+    html.element("h3", "What goes with what").raw("\n");
+    correlations.write(html, asset.asset().id());
     html.raw("</section>\n");
   }
 

@@ -11,24 +11,25 @@ import org.kappatrail.history.Problem;
 import org.kappatrail.review.AssetReview;
 import org.kappatrail.review.Level;
 import org.kappatrail.review.Review;
+import org.kappatrail.review.correlation.PairCorrelation;
 
 /** The review as one self-contained page: nothing is loaded from anywhere. */
 public final class Page {
   private static final int MOST_PROBLEMS = 200;
 
   private final Review review;
-  private final Map<String, String> pictures;
+  private final Pictures pictures;
   private final Map<String, String> anchors;
 
   /**
    * A page.
    *
    * @param review what was found
-   * @param pictures SVG text of an asset's chart by asset; an asset without one gets none
+   * @param pictures its pictures
    */
-  public Page(Review review, Map<String, String> pictures) {
+  public Page(Review review, Pictures pictures) {
     this.review = review;
-    this.pictures = Map.copyOf(pictures);
+    this.pictures = pictures;
     this.anchors = FileNames.of(review.assets().stream().map(asset -> asset.asset().id()).toList());
   }
 
@@ -52,10 +53,20 @@ public final class Page {
         () -> {
           review.since().ifPresent(since -> new SinceSection(since, links()).write(html));
           new FleetTable(review, anchors).write(html);
+          Map<String, List<PairCorrelation>> correlations = review.correlations().byAsset();
           for (AssetReview asset : review.worstFirst()) {
-            new AssetSection(asset, anchorOf(asset), pictures.getOrDefault(asset.asset().id(), ""))
+            String id = asset.asset().id();
+            new AssetSection(
+                    asset,
+                    anchorOf(asset),
+                    pictures.assets().getOrDefault(id, ""),
+                    new CorrelationSection(
+                        correlations.getOrDefault(id, List.of()),
+                        pictures.correlations().getOrDefault(id, ""),
+                        false))
                 .write(html);
           }
+          html.around("section id=\"correlations\"", () -> fleetCorrelations(html));
           problems(html);
           html.raw(resource("method.html"));
         });
@@ -66,6 +77,12 @@ public final class Page {
     Map<String, String> links = new TreeMap<>();
     anchors.forEach((asset, anchor) -> links.put(asset, "#" + anchor));
     return links;
+  }
+
+  private void fleetCorrelations(Html html) {
+    html.element("h2", "What goes with what in the fleet").raw("\n");
+    new CorrelationSection(review.correlations().fleet(), pictures.fleetCorrelation(), true)
+        .write(html, "the fleet");
   }
 
   private String anchorOf(AssetReview asset) {
