@@ -12,7 +12,12 @@ public interface DutyLog extends AutoCloseable {
    * Hands over every registered bearing that has readings, in the order of {@link
    * org.kappatrail.history.BearingKey}; only one bearing's cells are held at a time.
    */
-  void forEachBearing(Consumer<BearingDuty> use);
+  void forEachBearing(Consumer<BearingDuty> use, RowsRead progress);
+
+  /** The same without word of how far it has come. */
+  default void forEachBearing(Consumer<BearingDuty> use) {
+    forEachBearing(use, RowsRead.UNHEARD);
+  }
 
   /** What became of every file; complete after {@link #forEachBearing}. */
   List<FileAccount> accounts();

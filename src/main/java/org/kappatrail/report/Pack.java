@@ -1,15 +1,14 @@
 package org.kappatrail.report;
 
 import java.io.IOException;
+import java.io.InterruptedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
-import java.util.stream.Stream;
 import org.kappatrail.report.chart.AssetChart;
 import org.kappatrail.report.chart.ChartFiles;
 import org.kappatrail.report.chart.Drawing;
@@ -54,19 +53,14 @@ public final class Pack {
    * @return the pack's folder
    */
   public Path writeTo(Path directory) throws IOException {
-    Files.createDirectories(directory);
-    Path place = directory.resolve(review.asOf().toString());
-    Path fresh = Files.createTempDirectory(directory, "." + review.asOf() + ".new-");
-    try {
-      write(fresh);
-      swap(fresh, place);
-    } finally {
-      deleteTree(fresh);
+    try (Draft draft = new Draft(directory, review.asOf())) {
+      write(draft.pack());
+      return draft.publish();
     }
-    return place;
   }
 
   private void write(Path folder) throws IOException {
+    progress.at("tables and page", 0, 1);
     for (Table table : ReviewTables.all(review)) {
       CsvFile.write(table, folder.resolve(table.name() + ".csv"));
     }
@@ -91,7 +85,8 @@ public final class Pack {
                   new Job(
                       asset.asset().id(), names.getOrDefault(asset.asset().id(), "asset"), found)));
     }
-    List<Result> results = jobs.parallelStream().map(job -> draw(job, place)).toList();
+    Thread caller = Thread.currentThread();
+    List<Result> results = jobs.parallelStream().map(job -> draw(job, place, caller)).toList();
     int done = 0;
     for (Result result : results) {
       if (result.failure().isPresent()) {
@@ -107,43 +102,17 @@ public final class Pack {
 
   private record Result(String asset, String svg, Optional<IOException> failure) {}
 
-  private static Result draw(Job job, Path place) {
+  private static Result draw(Job job, Path place, Thread caller) {
     try {
+      if (caller.isInterrupted()) {
+        throw new InterruptedIOException("the drawing of charts was stopped");
+      }
       String svg = ChartFiles.svg(job.drawing());
       Files.writeString(place.resolve(job.fileName() + ".svg"), svg);
       ChartFiles.writePng(job.drawing(), place.resolve(job.fileName() + ".png"));
       return new Result(job.asset(), svg, Optional.empty());
     } catch (IOException e) {
       return new Result(job.asset(), "", Optional.of(e));
-    }
-  }
-
-  private static void swap(Path fresh, Path place) throws IOException {
-    if (!Files.exists(place)) {
-      Files.move(fresh, place);
-      return;
-    }
-    Path old = Files.createTempDirectory(place.getParent(), "." + place.getFileName() + ".old-");
-    Path aside = old.resolve("pack");
-    Files.move(place, aside);
-    try {
-      Files.move(fresh, place);
-    } catch (IOException e) {
-      Files.move(aside, place);
-      throw e;
-    } finally {
-      deleteTree(old);
-    }
-  }
-
-  private static void deleteTree(Path folder) throws IOException {
-    if (!Files.exists(folder)) {
-      return;
-    }
-    try (Stream<Path> tree = Files.walk(folder)) {
-      for (Path path : tree.sorted(Comparator.reverseOrder()).toList()) {
-        Files.delete(path);
-      }
     }
   }
 }

@@ -104,7 +104,8 @@ public final class Reviewer {
             review(duty, bearings, logFindings);
           }
           progress.at("bearings", bearings.size(), total);
-        });
+        },
+        (rows, ofRows) -> progress.at("log rows", rows, ofRows));
     for (Bearing bearing : history.bearings()) {
       if (!bearings.containsKey(bearing.key())) {
         review(BearingDuty.none(bearing.key()), bearings, logFindings);
