@@ -22,6 +22,7 @@ final class DuckEngine implements AutoCloseable {
     this.work = new WorkFolder(options.temporaryFolder());
     try {
       this.streaming = connect(true);
+      UnpackedLibrary.remove();
     } catch (SQLException | RuntimeException e) {
       work.close();
       throw e;
