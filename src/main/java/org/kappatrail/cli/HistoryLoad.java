@@ -76,7 +76,8 @@ final class HistoryLoad {
     List<Problem> problems = new ArrayList<>(intake.problems());
     List<FileAccount> files = new ArrayList<>(intake.files());
     try (DutyLog log = openLog(asOf)) {
-      assets = new Reviewer(chosen, intake.settings(), asOf, progress).review(log);
+      assets =
+          new Reviewer(chosen, intake.history(), intake.settings(), asOf, progress).review(log);
       problems.addAll(log.problems());
       files.addAll(log.accounts());
     }
@@ -87,7 +88,13 @@ final class HistoryLoad {
   private Since since(LocalDate day, List<AssetReview> now, Progress progress) {
     try (DutyLog log = openLog(day)) {
       List<AssetReview> before =
-          new Reviewer(Reviewer.knownOn(chosen, day), intake.settings(), day, progress).review(log);
+          new Reviewer(
+                  Reviewer.knownOn(chosen, day),
+                  Reviewer.knownOn(intake.history(), day),
+                  intake.settings(),
+                  day,
+                  progress)
+              .review(log);
       return Reviewer.compare(day, before, now);
     }
   }

@@ -31,6 +31,15 @@ final class HistoryOptions {
       description = "Only these assets; default: all.")
   private List<String> assets = List.of();
 
+  /** Options given by a command of its own. */
+  static HistoryOptions of(Path folder, @Nullable LocalDate asOf, List<String> assets) {
+    HistoryOptions options = new HistoryOptions();
+    options.folder = folder;
+    options.asOf = asOf;
+    options.assets = List.copyOf(assets);
+    return options;
+  }
+
   Path folder() {
     return folder;
   }

@@ -15,6 +15,7 @@ import org.kappatrail.review.trend.Trend;
  * @param trail its samples in time
  * @param days its days with running hours, in time
  * @param trend drift, what moved κ, and the outlook
+ * @param life duty and life used so far; empty where no κ is known
  * @param dropped readings left out of its log
  */
 public record BearingReview(
@@ -24,6 +25,7 @@ public record BearingReview(
     List<KappaPoint> trail,
     List<DayKappa> days,
     Trend trend,
+    Optional<LifeSoFar> life,
     DroppedReadings dropped) {
 
   public BearingReview {

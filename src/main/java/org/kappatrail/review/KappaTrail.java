@@ -10,6 +10,7 @@ import org.kappatrail.duty.BearingDuty;
 import org.kappatrail.history.Asset;
 import org.kappatrail.history.Bearing;
 import org.kappatrail.history.Charge;
+import org.kappatrail.history.Event;
 import org.kappatrail.history.Oil;
 import org.kappatrail.history.PlantHistory;
 import org.kappatrail.history.Sample;
@@ -20,6 +21,7 @@ import org.kappatrail.review.trend.Trend;
 final class KappaTrail {
   private final Bearing bearing;
   private final List<Charge> charges;
+  private final List<Event> events;
   private final OilTimeline oil;
   private final PlantHistory history;
   private final Films films;
@@ -33,12 +35,14 @@ final class KappaTrail {
       Asset asset,
       Bearing bearing,
       List<Charge> charges,
+      List<Event> events,
       OilTimeline oil,
       PlantHistory history,
       BearingDuty duty,
       Settings settings) {
     this.bearing = bearing;
     this.charges = charges;
+    this.events = events;
     this.oil = oil;
     this.history = history;
     this.films = new Films(bearing, settings);
@@ -63,7 +67,20 @@ final class KappaTrail {
     Trend trend =
         new TrendOfTrail(bearing, films, reference, trail, days, history, settings)
             .trend(asset.samplingDays());
-    return new BearingReview(bearing, films.floor(), reference, trail, days, trend, duty.dropped());
+    Optional<KappaPoint> latest =
+        trail.stream().filter(point -> point.film().isPresent()).reduce((a, b) -> b);
+    Optional<LifeSoFar> life =
+        new LivesSoFar(
+                asset,
+                bearing,
+                duty.cells(),
+                days,
+                events,
+                drawn.stream().map(Drawn::sample).toList(),
+                settings.duty().uncertaintyC())
+            .at(latest, trend.outlook());
+    return new BearingReview(
+        bearing, films.floor(), reference, trail, days, trend, life, duty.dropped());
   }
 
   private KappaPoint point(Drawn drawn, Optional<Reference> reference, HoursBetween hours) {

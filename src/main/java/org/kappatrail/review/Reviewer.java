@@ -19,6 +19,9 @@ import org.kappatrail.history.Event;
 import org.kappatrail.history.PlantHistory;
 import org.kappatrail.history.Sample;
 import org.kappatrail.history.Settings;
+import org.kappatrail.review.decision.Decision;
+import org.kappatrail.review.decision.OilCause;
+import org.kappatrail.review.decision.Weighing;
 
 /** Makes the review: one pass over the logs, bearing by bearing, then asset by asset. */
 public final class Reviewer {
@@ -39,12 +42,18 @@ public final class Reviewer {
   /**
    * Prepares a review.
    *
-   * @param history the records
+   * @param history the records of the assets to review
+   * @param fleet the records of the whole site, for what only shows between assets
    * @param settings settings in force
    * @param asOf last day that counts: later samples, events and readings are left out
    * @param progress told how far it has come
    */
-  public Reviewer(PlantHistory history, Settings settings, LocalDate asOf, Progress progress) {
+  public Reviewer(
+      PlantHistory history,
+      PlantHistory fleet,
+      Settings settings,
+      LocalDate asOf,
+      Progress progress) {
     this.history = history;
     this.settings = settings;
     this.asOf = asOf;
@@ -63,12 +72,7 @@ public final class Reviewer {
           asset.id(),
           new AssetInputs(asset, charges, samples, events, new OilTimeline(charges, history)));
     }
-    swapped =
-        SwappedSamples.in(
-            history.assets().stream()
-                .flatMap(asset -> inputs(asset.id()).charges().stream())
-                .toList(),
-            history);
+    swapped = SwappedSamples.in(charges(fleet, asOf), fleet);
   }
 
   /** Latest sampling day of a history; empty where there is no sample. */
@@ -130,7 +134,14 @@ public final class Reviewer {
             .orElseThrow(() -> new IllegalStateException("log of an unknown bearing " + key));
     KappaTrail trail =
         new KappaTrail(
-            asset.asset(), bearing, asset.charges(), asset.oil(), history, duty, settings);
+            asset.asset(),
+            bearing,
+            asset.charges(),
+            asset.events(),
+            asset.oil(),
+            history,
+            duty,
+            settings);
     bearings.put(key, trail.review());
     logFindings.put(key, LogFindings.of(duty, lastSample(asset).orElse(asOf)));
   }
@@ -165,6 +176,20 @@ public final class Reviewer {
       findings.addAll(found(logFindings, bearing.bearing().key()));
     }
     findings.sort(Finding.ORDER);
+    Optional<Decision> decision =
+        DecisionOfAsset.of(asset.asset(), asset.charges(), own, findings, history, settings)
+            .map(Weighing::of);
+    Optional<BearingReview> governing =
+        decision.flatMap(
+            found ->
+                own.stream()
+                    .filter(item -> item.bearing().id().equals(found.bearing()))
+                    .findFirst());
+    boolean trusted =
+        governing
+            .flatMap(BearingReview::latestFilm)
+            .filter(point -> !untrusted.contains(point.charge().number()))
+            .isPresent();
     return new AssetReview(
         asset.asset(),
         history.getOil(asset.asset().oil()),
@@ -173,11 +198,38 @@ public final class Reviewer {
         asset.events(),
         own,
         LastChange.of(asset.charges(), settings.laboratory()),
-        Optional.empty(),
-        List.of(),
-        List.of(),
-        List.of(),
+        decision,
+        oilCauses(asset, decision),
+        FollowUps.of(asset.events(), asset.samples(), own),
+        Story.of(own, governing, decision, trusted),
         findings);
+  }
+
+  private List<OilCause> oilCauses(AssetInputs asset, Optional<Decision> decision) {
+    boolean suspect =
+        decision.filter(found -> !found.basis().record().suspect().isEmpty()).isPresent();
+    if (asset.charges().isEmpty() || suspect) {
+      return List.of();
+    }
+    Charge present = asset.charges().get(asset.charges().size() - 1);
+    return OilCauses.of(
+        present,
+        history.getOil(present.oil()),
+        history.oils(),
+        asset.events(),
+        asset.asset().oilVolumeL());
+  }
+
+  private static List<Charge> charges(PlantHistory fleet, LocalDate asOf) {
+    List<Charge> charges = new ArrayList<>();
+    for (Asset asset : fleet.assets()) {
+      charges.addAll(
+          Charges.of(
+              asset,
+              fleet.samplesOf(asset.id()).stream().filter(s -> !s.day().isAfter(asOf)).toList(),
+              fleet.eventsOf(asset.id()).stream().filter(e -> !e.date().isAfter(asOf)).toList()));
+    }
+    return charges;
   }
 
   private static Set<Integer> chargesWithUnrecordedChange(

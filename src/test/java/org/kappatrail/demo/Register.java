@@ -55,7 +55,7 @@ final class Register {
       SP-P3,NDE,radial-roller,75,160,,1480,240,222,,20,,
       SP-AG4,LOW,thrust-roller,160,270,,48,670,2300,,122,,
       SP-AG1,LOW,radial-roller,110,180,,140,,,,,,
-      SP-PGB,OUT,radial-roller,120,215,,120,650,765,,82,,
+      SP-PGB,OUT,radial-roller,120,215,,120,650,765,,98,,
       UT-AG2,LOW,radial-roller,110,200,,180,540,610,,62,,
       UT-SCR,DRIVE,radial-ball,90,160,,740,96,81.5,,9.4,,
       UT-WP1,THRUST,thrust-ball,80,140,,980,112,285,,9.2,,

@@ -50,7 +50,7 @@ final class Stories {
       SP-P3,NDE,60.0,0.25,0
       SP-AG4,LOW,55.0,0.20,0
       SP-AG1,LOW,50.0,0.20,0
-      SP-PGB,OUT,51.5,0.20,0
+      SP-PGB,OUT,58.5,0.20,0
       UT-AG2,LOW,57.4,0.74,0
       UT-SCR,DRIVE,55.0,0.40,0
       UT-WP1,THRUST,50.5,0.30,0
@@ -77,7 +77,7 @@ final class Stories {
           "SP-CRP",
               List.of(new Influence.Dilution(parse("2025-06-17"), parse("2026-10-31"), 0.075)),
           "SP-P3", List.of(new Influence.SilentChange(parse("2025-09-10"), true)),
-          "SP-PGB", List.of(new Influence.Swap(parse("2025-11-01"), "SP-AG1")),
+          "SP-PGB", List.of(new Influence.Swap(parse("2026-10-01"), "SP-AG1")),
           "UT-SCR",
               List.of(new Influence.Shear(parse("2024-11-12"), parse("2026-10-31"), 0.185, 17)));
 

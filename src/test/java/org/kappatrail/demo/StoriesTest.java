@@ -66,10 +66,10 @@ class StoriesTest {
 
   @Test
   void theSwappedBottlesCarryEachOthersOil() {
-    assertThat(month("SP-AG1", "2025-11", "boron_ppm")).isBetween(40.0, 56.0);
-    assertThat(month("SP-AG1", "2025-11", "viscosity_40c_cst")).isBetween(210.0, 230.0);
-    assertThat(month("SP-PGB", "2025-11", "zinc_ppm")).isBetween(380.0, 460.0);
-    assertThat(month("SP-PGB", "2025-11", "viscosity_40c_cst")).isBetween(143.0, 157.0);
+    assertThat(month("SP-AG1", "2026-10", "boron_ppm")).isBetween(40.0, 56.0);
+    assertThat(month("SP-AG1", "2026-10", "viscosity_40c_cst")).isBetween(210.0, 230.0);
+    assertThat(month("SP-PGB", "2026-10", "zinc_ppm")).isBetween(380.0, 460.0);
+    assertThat(month("SP-PGB", "2026-10", "viscosity_40c_cst")).isBetween(143.0, 157.0);
   }
 
   @Test

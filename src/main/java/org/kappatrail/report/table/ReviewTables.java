@@ -30,6 +30,8 @@ public final class ReviewTables {
         kappaHistory(review),
         TrendTables.attribution(review),
         TrendTables.drift(review),
+        DecisionTables.verdicts(review),
+        DecisionTables.remedies(review),
         findings(review),
         problems(review));
   }

@@ -16,6 +16,7 @@ import java.util.List;
  * @param urgent is it urgent?
  * @param remedies acts, best first, with staying as it is among them
  * @param assumptions what the figures rest on: duty, running hours, loads, horizon
+ * @param basis the case that was decided
  */
 public record Decision(
     String bearing,
@@ -28,7 +29,8 @@ public record Decision(
     Reply curable,
     Reply urgent,
     List<Remedy> remedies,
-    List<String> assumptions) {
+    List<String> assumptions,
+    AssetCase basis) {
   public Decision {
     remedies = List.copyOf(remedies);
     assumptions = List.copyOf(assumptions);

@@ -1,0 +1,4 @@
+@NullMarked
+package org.kappatrail.review;
+
+import org.jspecify.annotations.NullMarked;
