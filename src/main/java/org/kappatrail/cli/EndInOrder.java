@@ -9,7 +9,7 @@ import java.util.function.IntSupplier;
  * and the program waits a while for it.
  */
 final class EndInOrder {
-  private static final long PATIENCE_SECONDS = 10;
+  private static final long PATIENCE_SECONDS = 20;
 
   private EndInOrder() {}
 

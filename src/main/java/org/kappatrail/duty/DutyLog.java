@@ -12,11 +12,11 @@ public interface DutyLog extends AutoCloseable {
    * Hands over every registered bearing that has readings, in the order of {@link
    * org.kappatrail.history.BearingKey}; only one bearing's cells are held at a time.
    */
-  void forEachBearing(Consumer<BearingDuty> use, RowsRead progress);
+  void forEachBearing(Consumer<BearingDuty> use);
 
-  /** The same without word of how far it has come. */
-  default void forEachBearing(Consumer<BearingDuty> use) {
-    forEachBearing(use, RowsRead.UNHEARD);
+  /** The same, telling how far it has come where that is known. */
+  default void forEachBearing(Consumer<BearingDuty> use, RowsRead progress) {
+    forEachBearing(use);
   }
 
   /** What became of every file; complete after {@link #forEachBearing}. */

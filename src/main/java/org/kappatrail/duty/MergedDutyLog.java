@@ -25,6 +25,11 @@ final class MergedDutyLog implements DutyLog {
   }
 
   @Override
+  public void forEachBearing(Consumer<BearingDuty> use) {
+    forEachBearing(use, RowsRead.UNHEARD);
+  }
+
+  @Override
   public void forEachBearing(Consumer<BearingDuty> use, RowsRead progress) {
     List<Problem> found = new ArrayList<>(firstProblems);
     List<@Nullable BearingDuty> heads = new ArrayList<>();

@@ -67,7 +67,7 @@ public final class Pack {
     CsvFile.write(ReviewTables.kappaDaily(review), folder.resolve("kappa-daily.csv"));
     manifest.write(folder.resolve("manifest.json"), review);
     Map<String, String> pictures = charts ? writeCharts(folder) : Map.of();
-    Files.writeString(folder.resolve("index.html"), new Page(review, pictures).html());
+    new Page(review, pictures).write(folder.resolve("index.html"));
   }
 
   /** Writes the charts and gives each asset's SVG text for the page. */

@@ -113,6 +113,7 @@ public final class Reviewer {
     for (Bearing bearing : history.bearings()) {
       if (!bearings.containsKey(bearing.key())) {
         review(BearingDuty.none(bearing.key()), bearings, logFindings);
+        progress.at("bearings", bearings.size(), total);
       }
     }
     progress.at("bearings", total, total);

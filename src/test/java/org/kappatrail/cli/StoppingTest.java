@@ -45,7 +45,7 @@ class StoppingTest {
 
     interrupt(review);
 
-    assertThat(review.waitFor(10, TimeUnit.SECONDS)).isTrue();
+    assertThat(review.waitFor(60, TimeUnit.SECONDS)).isTrue();
     assertThat(review.exitValue()).isEqualTo(ExitCodes.STOPPED);
     assertThat(message()).contains("kappatrail: stopped").doesNotContain("bug");
     assertThat(entries(temporary)).isEmpty();
@@ -60,7 +60,7 @@ class StoppingTest {
 
     interrupt(review);
 
-    assertThat(review.waitFor(10, TimeUnit.SECONDS)).isTrue();
+    assertThat(review.waitFor(60, TimeUnit.SECONDS)).isTrue();
     assertThat(review.exitValue()).isEqualTo(ExitCodes.STOPPED);
     assertThat(entries(temporary)).isEmpty();
     assertThat(entries(out)).isEmpty();
@@ -81,7 +81,7 @@ class StoppingTest {
 
     Process next = start("--no-charts");
 
-    assertThat(next.waitFor(60, TimeUnit.SECONDS)).isTrue();
+    assertThat(next.waitFor(120, TimeUnit.SECONDS)).isTrue();
     assertThat(next.exitValue()).isEqualTo(ExitCodes.DONE);
     assertThat(entries(temporary)).isEmpty();
     assertThat(entries(out)).containsExactly("2025-01-20");
