@@ -1,15 +1,14 @@
 package org.kappatrail.report;
 
 import java.io.IOException;
+import java.io.InterruptedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.Comparator;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
-import java.util.stream.Stream;
 import org.kappatrail.report.chart.ChartFiles;
 import org.kappatrail.report.page.Page;
 import org.kappatrail.report.page.Pictures;
@@ -51,33 +50,29 @@ public final class Pack {
    * @return the pack's folder
    */
   public Path writeTo(Path directory) throws IOException {
-    Files.createDirectories(directory);
-    Path place = directory.resolve(review.asOf().toString());
-    Path fresh = Files.createTempDirectory(directory, "." + review.asOf() + ".new-");
-    try {
-      write(fresh);
-      swap(fresh, place);
-    } finally {
-      deleteTree(fresh);
+    try (Draft draft = new Draft(directory, review.asOf())) {
+      write(draft.pack());
+      return draft.publish();
     }
-    return place;
   }
 
   private void write(Path folder) throws IOException {
+    progress.at("tables and page", 0, 1);
     for (Table table : ReviewTables.all(review)) {
       CsvFile.write(table, folder.resolve(table.name() + ".csv"));
     }
     CsvFile.write(ReviewTables.kappaDaily(review), folder.resolve("kappa-daily.csv"));
     manifest.write(folder.resolve("manifest.json"), review);
     Pictures pictures = charts ? writeCharts(folder) : Pictures.none();
-    Files.writeString(folder.resolve("index.html"), new Page(review, pictures).html());
+    new Page(review, pictures).write(folder.resolve("index.html"));
   }
 
   /** Writes the charts and gives their SVG texts for the page. */
   private Pictures writeCharts(Path folder) throws IOException {
     Path place = Files.createDirectory(folder.resolve("charts"));
     List<ChartJob> jobs = ChartJob.of(review);
-    List<Result> results = jobs.parallelStream().map(job -> draw(job, place)).toList();
+    Thread caller = Thread.currentThread();
+    List<Result> results = jobs.parallelStream().map(job -> draw(job, place, caller)).toList();
     Map<ChartJob.Kind, Map<String, String>> texts = new EnumMap<>(ChartJob.Kind.class);
     int done = 0;
     for (Result result : results) {
@@ -99,43 +94,17 @@ public final class Pack {
 
   private record Result(ChartJob job, String svg, Optional<IOException> failure) {}
 
-  private static Result draw(ChartJob job, Path place) {
+  private static Result draw(ChartJob job, Path place, Thread caller) {
     try {
+      if (caller.isInterrupted()) {
+        throw new InterruptedIOException("the drawing of charts was stopped");
+      }
       String svg = ChartFiles.svg(job.drawing());
       Files.writeString(place.resolve(job.fileName() + ".svg"), svg);
       ChartFiles.writePng(job.drawing(), place.resolve(job.fileName() + ".png"));
       return new Result(job, svg, Optional.empty());
     } catch (IOException e) {
       return new Result(job, "", Optional.of(e));
-    }
-  }
-
-  private static void swap(Path fresh, Path place) throws IOException {
-    if (!Files.exists(place)) {
-      Files.move(fresh, place);
-      return;
-    }
-    Path old = Files.createTempDirectory(place.getParent(), "." + place.getFileName() + ".old-");
-    Path aside = old.resolve("pack");
-    Files.move(place, aside);
-    try {
-      Files.move(fresh, place);
-    } catch (IOException e) {
-      Files.move(aside, place);
-      throw e;
-    } finally {
-      deleteTree(old);
-    }
-  }
-
-  private static void deleteTree(Path folder) throws IOException {
-    if (!Files.exists(folder)) {
-      return;
-    }
-    try (Stream<Path> tree = Files.walk(folder)) {
-      for (Path path : tree.sorted(Comparator.reverseOrder()).toList()) {
-        Files.delete(path);
-      }
     }
   }
 }

@@ -17,12 +17,19 @@ final class AssetSection {
   private final AssetReview asset;
   private final String anchor;
   private final String picture;
+  private final boolean earlierSamples;
   private final CorrelationSection correlations;
 
-  AssetSection(AssetReview asset, String anchor, String picture, CorrelationSection correlations) {
+  AssetSection(
+      AssetReview asset,
+      String anchor,
+      String picture,
+      boolean earlierSamples,
+      CorrelationSection correlations) {
     this.asset = asset;
     this.anchor = anchor;
     this.picture = picture;
+    this.earlierSamples = earlierSamples;
     this.correlations = correlations;
   }
 
@@ -91,7 +98,9 @@ final class AssetSection {
     html.raw("<h3>").text("Bearing " + bearing.bearing().id()).raw("</h3>\n");
     int from = Math.max(0, trail.size() - SHOWN_SAMPLES);
     table(html, trail.subList(from, trail.size()));
-    if (from > 0) {
+    if (from > 0 && !earlierSamples) {
+      html.element("p class=\"note\"", from + " earlier samples are in kappa-history.csv.");
+    } else if (from > 0) {
       html.raw("<details><summary>").text(from + " earlier samples").raw("</summary>\n");
       table(html, trail.subList(0, from));
       html.raw("</details>\n");

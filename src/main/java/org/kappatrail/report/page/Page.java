@@ -3,7 +3,10 @@ package org.kappatrail.report.page;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
+import java.io.Writer;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
@@ -16,6 +19,11 @@ import org.kappatrail.review.correlation.PairCorrelation;
 /** The review as one self-contained page: nothing is loaded from anywhere. */
 public final class Page {
   private static final int MOST_PROBLEMS = 200;
+
+  /**
+   * Rows of samples beyond which earlier ones are left to the table: what a browser still opens.
+   */
+  private static final long MOST_SAMPLE_ROWS = 20_000;
 
   private final Review review;
   private final Pictures pictures;
@@ -33,8 +41,16 @@ public final class Page {
     this.anchors = FileNames.of(review.assets().stream().map(asset -> asset.asset().id()).toList());
   }
 
-  /** The page's text. */
-  public String html() {
+  /** Writes the page asset by asset. */
+  public void write(Path file) throws IOException {
+    try (Writer out = Files.newBufferedWriter(file)) {
+      write(out);
+    } catch (UncheckedIOException e) {
+      throw e.getCause();
+    }
+  }
+
+  private void write(Writer out) {
     Html html = new Html();
     String site = review.settings().site();
     String title = (site.isEmpty() ? "Oil film review" : site + ": oil film review");
@@ -48,6 +64,7 @@ public final class Page {
         .raw(resource("page.css"))
         .raw("</style>\n</head>\n<body>\n");
     html.around("header", () -> head(html, title));
+    boolean earlierSamples = sampleRows() <= MOST_SAMPLE_ROWS;
     html.around(
         "main",
         () -> {
@@ -60,17 +77,26 @@ public final class Page {
                     asset,
                     anchorOf(asset),
                     pictures.assets().getOrDefault(id, ""),
+                    earlierSamples,
                     new CorrelationSection(
                         correlations.getOrDefault(id, List.of()),
                         pictures.correlations().getOrDefault(id, ""),
                         false))
                 .write(html);
+            html.drainTo(out);
           }
           html.around("section id=\"correlations\"", () -> fleetCorrelations(html));
           problems(html);
           html.raw(resource("method.html"));
         });
-    return html.raw("</body>\n</html>\n").toString();
+    html.raw("</body>\n</html>\n").drainTo(out);
+  }
+
+  private long sampleRows() {
+    return review.assets().stream()
+        .flatMap(asset -> asset.bearings().stream())
+        .mapToLong(bearing -> bearing.trail().size())
+        .sum();
   }
 
   private Map<String, String> links() {
