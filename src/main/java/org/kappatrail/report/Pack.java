@@ -17,6 +17,7 @@ import org.kappatrail.report.page.FileNames;
 import org.kappatrail.report.page.Page;
 import org.kappatrail.report.table.CsvFile;
 import org.kappatrail.report.table.ReviewTables;
+import org.kappatrail.report.workbook.ReviewWorkbook;
 import org.kappatrail.review.AssetReview;
 import org.kappatrail.review.Progress;
 import org.kappatrail.review.Review;
@@ -67,9 +68,11 @@ public final class Pack {
   }
 
   private void write(Path folder) throws IOException {
-    for (Table table : ReviewTables.all(review)) {
+    List<Table> tables = ReviewTables.all(review);
+    for (Table table : tables) {
       CsvFile.write(table, folder.resolve(table.name() + ".csv"));
     }
+    new ReviewWorkbook(review, tables).write(folder.resolve("review.xlsx"));
     manifest.write(folder.resolve("manifest.json"), review);
     Map<String, String> pictures = charts ? writeCharts(folder) : Map.of();
     Files.writeString(folder.resolve("index.html"), new Page(review, pictures).html());
