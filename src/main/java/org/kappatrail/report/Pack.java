@@ -13,6 +13,7 @@ import java.util.stream.Stream;
 import org.kappatrail.report.chart.AssetChart;
 import org.kappatrail.report.chart.ChartFiles;
 import org.kappatrail.report.chart.Drawing;
+import org.kappatrail.report.json.ReviewJson;
 import org.kappatrail.report.page.FileNames;
 import org.kappatrail.report.page.Page;
 import org.kappatrail.report.table.CsvFile;
@@ -73,6 +74,7 @@ public final class Pack {
       CsvFile.write(table, folder.resolve(table.name() + ".csv"));
     }
     new ReviewWorkbook(review, tables).write(folder.resolve("review.xlsx"));
+    new ReviewJson(review, manifest.programVersion()).write(folder.resolve("review.json"));
     manifest.write(folder.resolve("manifest.json"), review);
     Map<String, String> pictures = charts ? writeCharts(folder) : Map.of();
     Files.writeString(folder.resolve("index.html"), new Page(review, pictures).html());

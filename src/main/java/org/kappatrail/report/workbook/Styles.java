@@ -7,6 +7,7 @@ import org.apache.poi.ss.usermodel.BorderStyle;
 import org.apache.poi.ss.usermodel.CellStyle;
 import org.apache.poi.ss.usermodel.FillPatternType;
 import org.apache.poi.ss.usermodel.Font;
+import org.apache.poi.ss.usermodel.HorizontalAlignment;
 import org.apache.poi.ss.usermodel.VerticalAlignment;
 import org.apache.poi.xssf.streaming.SXSSFWorkbook;
 import org.apache.poi.xssf.usermodel.XSSFCellStyle;
@@ -15,15 +16,17 @@ import org.kappatrail.review.Level;
 
 /** The few cell styles of the workbook; levels are told by shape, word and a quiet fill. */
 final class Styles {
-  private static final byte[] HEADER_FILL = {(byte) 0xE3, (byte) 0xEA, (byte) 0xF2};
-  private static final byte[] ALARM_FILL = {(byte) 0xD9, (byte) 0xDC, (byte) 0xDF};
-  private static final byte[] ALERT_FILL = {(byte) 0xEE, (byte) 0xEF, (byte) 0xF1};
+  private static final byte OPAQUE = (byte) 0xFF;
+  private static final byte[] HEADER_FILL = {OPAQUE, (byte) 0xE3, (byte) 0xEA, (byte) 0xF2};
+  private static final byte[] ALARM_FILL = {OPAQUE, (byte) 0xD9, (byte) 0xDC, (byte) 0xDF};
+  private static final byte[] ALERT_FILL = {OPAQUE, (byte) 0xEE, (byte) 0xEF, (byte) 0xF1};
   private static final String DATE_TIME = "yyyy-mm-dd hh:mm";
 
   private final SXSSFWorkbook workbook;
   private final Map<CellKind, CellStyle> byKind = new EnumMap<>(CellKind.class);
   private final Map<Level, CellStyle> byLevel = new EnumMap<>(Level.class);
   private final CellStyle header;
+  private final CellStyle numberHeader;
   private final CellStyle title;
   private final CellStyle dateTime;
   private final CellStyle quoted;
@@ -38,11 +41,8 @@ final class Styles {
     byLevel.put(Level.ALARM, level("■", Optional.of(ALARM_FILL), true));
     byLevel.put(Level.ALERT, level("◈", Optional.of(ALERT_FILL), false));
     byLevel.put(Level.CLEAR, level("○", Optional.empty(), false));
-    header = style("@");
-    fill(header, HEADER_FILL);
-    header.setFont(bold(11));
-    header.setBorderBottom(BorderStyle.THIN);
-    header.setVerticalAlignment(VerticalAlignment.BOTTOM);
+    header = header(HorizontalAlignment.LEFT);
+    numberHeader = header(HorizontalAlignment.RIGHT);
     title = style("@");
     title.setFont(bold(14));
     dateTime = style(DATE_TIME);
@@ -58,8 +58,8 @@ final class Styles {
     return byLevel.getOrDefault(level, header);
   }
 
-  CellStyle header() {
-    return header;
+  CellStyle header(boolean overNumbers) {
+    return overNumbers ? numberHeader : header;
   }
 
   CellStyle title() {
@@ -82,6 +82,16 @@ final class Styles {
     if (strong) {
       style.setFont(bold(11));
     }
+    return style;
+  }
+
+  private CellStyle header(HorizontalAlignment alignment) {
+    CellStyle style = style("@");
+    fill(style, HEADER_FILL);
+    style.setFont(bold(11));
+    style.setBorderBottom(BorderStyle.THIN);
+    style.setVerticalAlignment(VerticalAlignment.BOTTOM);
+    style.setAlignment(alignment);
     return style;
   }
 

@@ -34,6 +34,9 @@ final class TableSheet {
   private static final int WIDEST_TEXT_CHARS = 40;
   private static final int FILTER_ARROW_CHARS = 3;
 
+  private static final float LINE_POINTS = 15;
+  private static final int MOST_LINES = 12;
+
   /** First year whose days a workbook counts as dates; earlier ones stay text. */
   private static final int FIRST_YEAR = 1901;
 
@@ -59,13 +62,18 @@ final class TableSheet {
     for (int i = 0; i < columns.size(); i++) {
       Cell cell = header.createCell(i);
       cell.setCellValue(columns.get(i).name());
-      cell.setCellStyle(styles.header());
+      cell.setCellStyle(styles.header(isNumber(columns.get(i))));
       sheet.setColumnWidth(i, width(columns.get(i)) * WIDTH_UNITS);
     }
     for (int r = 0; r < table.rowCount(); r++) {
       Row row = sheet.createRow(r + 1);
+      int lines = 1;
       for (int i = 0; i < columns.size(); i++) {
         write(row, i, columns.get(i), r);
+        lines = Math.max(lines, lines(columns.get(i), r));
+      }
+      if (lines > 1) {
+        row.setHeightInPoints(lines * LINE_POINTS);
       }
     }
     sheet.createFreezePane(frozenColumns, 1);
@@ -148,10 +156,24 @@ final class TableSheet {
     return text.length() <= LONGEST_TEXT ? text : text.substring(0, LONGEST_TEXT - 1) + "…";
   }
 
+  /** Lines that a text takes in its column, reckoned with room to spare. */
+  private static int lines(Column<?> column, int r) {
+    if (isNumber(column)
+        || column.isMissing(r)
+        || CellKind.ofText(column.name()) != CellKind.PROSE) {
+      return 1;
+    }
+    int room = CellKind.PROSE.widthChars() - 8;
+    return Math.min(MOST_LINES, 1 + column.get(r).toString().length() / room);
+  }
+
+  private static boolean isNumber(Column<?> column) {
+    return column instanceof DoubleColumn || column instanceof IntColumn;
+  }
+
   private static int width(Column<?> column) {
-    boolean text = !(column instanceof DoubleColumn) && !(column instanceof IntColumn);
     CellKind kind =
-        text
+        !isNumber(column)
             ? CellKind.ofText(column.name())
             : column instanceof IntColumn ? CellKind.WHOLE : CellKind.ofNumber(column.name());
     int least = column.name().length() + FILTER_ARROW_CHARS;
