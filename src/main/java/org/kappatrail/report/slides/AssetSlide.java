@@ -2,6 +2,8 @@ package org.kappatrail.report.slides;
 
 import java.awt.geom.Rectangle2D;
 import java.io.IOException;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
 import org.apache.poi.sl.usermodel.ShapeType;
 import org.apache.poi.xslf.usermodel.XSLFAutoShape;
@@ -21,6 +23,8 @@ final class AssetSlide {
   private static final double CHART_SHARE = 0.56;
   private static final double KAPPA_SHARE = 0.6;
   private static final double TEXT = 14;
+  private static final int FACT_NAME = 24;
+  private static final double DUE_WIDTH = 200;
 
   private final Stage stage;
   private final AssetReview asset;
@@ -54,6 +58,35 @@ final class AssetSlide {
               TEXT,
               false);
     }
+    stage.notes(leaf, notes());
+  }
+
+  /** All of what the slide had no room for. */
+  private List<String> notes() {
+    List<String> lines = new ArrayList<>();
+    lines.add(asset.asset().name() + " (" + asset.asset().id() + ")");
+    lines.addAll(asset.story());
+    asset
+        .decision()
+        .ifPresent(
+            decision -> {
+              lines.add(
+                  "Verdict: "
+                      + Words.verdict(decision.verdict())
+                      + ". "
+                      + Words.sentence(decision.reason()));
+              QuestionPanel.questions(decision)
+                  .forEach(
+                      question ->
+                          lines.add(
+                              question.words()
+                                  + " "
+                                  + question.reply().answer().label()
+                                  + ": "
+                                  + question.reply().why()));
+              decision.assumptions().forEach(item -> lines.add("Assumed: " + item));
+            });
+    return lines;
   }
 
   private void facts(Leaf leaf) {
@@ -69,11 +102,13 @@ final class AssetSlide {
   private String facts() {
     StringBuilder line = new StringBuilder();
     asset.level().ifPresent(level -> line.append(level.label()).append(" · "));
-    line.append(Words.name(asset.asset().id()));
+    line.append(Words.name(asset.asset().id(), FACT_NAME));
     Optional<KappaPoint> latest = asset.governing().flatMap(BearingReview::latestFilm);
     asset
         .governing()
-        .ifPresent(bearing -> line.append(", bearing ").append(Words.name(bearing.bearing().id())));
+        .ifPresent(
+            bearing ->
+                line.append(", bearing ").append(Words.name(bearing.bearing().id(), FACT_NAME)));
     latest.ifPresent(
         point -> {
           Film film = point.film().orElseThrow();
@@ -84,7 +119,7 @@ final class AssetSlide {
               .append(") on ")
               .append(point.sample().day());
         });
-    return line.append(" · oil ").append(Words.name(asset.oil().id())).toString();
+    return line.append(" · oil ").append(Words.name(asset.oil().id(), FACT_NAME)).toString();
   }
 
   private void charts(Leaf leaf, Rectangle2D place) throws IOException {
@@ -119,19 +154,25 @@ final class AssetSlide {
     wash.setAnchor(place);
     wash.setFillColor(Palette.MIXED_WASH);
     wash.setLineColor(null);
-    double dueWidth = 170;
-    String story = asset.story().isEmpty() ? "" : asset.story().get(asset.story().size() - 1);
     leaf.box(
             place.getX() + GAP,
-            place.getY() + 6,
-            place.getWidth() - dueWidth - 3 * GAP,
-            place.getHeight() - 8)
+            place.getY() + 5,
+            place.getWidth() - DUE_WIDTH - 3 * GAP,
+            place.getHeight() - 6)
         .ink(Palette.INK)
         .line("Proposed: " + Words.verdict(decision.verdict()), 16, true)
-        .paragraph(story, TEXT, false, 2);
-    leaf.box(place.getMaxX() - dueWidth - GAP, place.getY() + 6, dueWidth, place.getHeight() - 8)
-        .ink(Palette.INK)
-        .line("Due", TEXT, false)
-        .paragraph(Words.due(asset, decision), 16, true, 2);
+        .paragraph(Words.sentence(decision.reason()), TEXT, false, 2);
+    Box due =
+        leaf.box(
+                place.getMaxX() - DUE_WIDTH - GAP,
+                place.getY() + 5,
+                DUE_WIDTH,
+                place.getHeight() - 6)
+            .ink(Palette.INK);
+    String day = Words.due(asset, decision);
+    if (!day.isEmpty()) {
+      due.line("Due " + day, 16, true);
+    }
+    due.paragraph(Words.nextSample(asset), TEXT, day.isEmpty(), 2);
   }
 }

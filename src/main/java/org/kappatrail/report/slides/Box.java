@@ -55,7 +55,8 @@ final class Box {
 
   /** One line, with an ellipsis where it is too long. */
   Box line(String text, double points, boolean strong) {
-    return set(fit.oneLine(ShownText.of(text), width, points, strong), points, strong, 1);
+    return set(
+        fit.oneLine(Words.joined(ShownText.of(text)), width, points, strong), points, strong, 1);
   }
 
   /** A paragraph of at most so many lines, and of no more than there is room for. */
@@ -63,13 +64,18 @@ final class Box {
     int room = (int) Math.floor((height - used) / (points * TextFit.LINE) + 1e-6);
     TextFit.Fitted fitted =
         fit.clipped(
-            ShownText.of(text), width, points, strong, Math.max(1, Math.min(room, mostLines)));
+            Words.joined(ShownText.of(text)),
+            width,
+            points,
+            strong,
+            Math.max(1, Math.min(room, mostLines)));
     return set(fitted.text(), points, strong, fitted.lines());
   }
 
   /** A paragraph over the whole box, smaller where that is needed. */
   Box fill(String text, double most, double least, boolean strong) {
-    TextFit.Fitted fitted = fit.fit(ShownText.of(text), width, height - used, most, least, strong);
+    TextFit.Fitted fitted =
+        fit.fit(Words.joined(ShownText.of(text)), width, height - used, most, least, strong);
     return set(fitted.text(), fitted.points(), strong, fitted.lines());
   }
 

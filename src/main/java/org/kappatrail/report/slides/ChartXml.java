@@ -27,6 +27,7 @@ final class ChartXml {
 
   private static final double TEXT = 12;
   private static final double TITLE_TEXT = 14;
+  private static final double LEGEND_FROM = 105;
   private static final int EMU = 12_700;
 
   private static final int DAY_AXIS = 1;
@@ -95,7 +96,7 @@ final class ChartXml {
     attribute("lang", "en-GB");
     attribute("sz", hundredths(TITLE_TEXT));
     attribute("b", "1");
-    solid(chart.left().ink());
+    solid(chart.right().isPresent() ? Palette.INK : chart.left().ink());
     close();
     drawing("t");
     xml.writeCharacters(chart.title());
@@ -112,7 +113,7 @@ final class ChartXml {
   /** Both charts of an asset have their plot between the same edges. */
   private void plot() throws XMLStreamException {
     open("plotArea");
-    double top = 26 / place.getHeight();
+    double top = 30 / place.getHeight();
     double foot = 24 / place.getHeight();
     layout(true, 40 / place.getWidth(), top, 1 - 80 / place.getWidth(), 1 - top - foot);
     group("areaChart", ChartSeries.Kind.AREA, DAY_AXIS, LEFT_AXIS);
@@ -135,7 +136,7 @@ final class ChartXml {
       return;
     }
     open(element);
-    value("grouping", "standard");
+    value("grouping", kind == ChartSeries.Kind.AREA ? "stacked" : "standard");
     value("varyColors", "0");
     for (ChartSeries item : members) {
       series(item);
@@ -333,9 +334,7 @@ final class ChartXml {
     value("crossAx", Integer.toString(crossed));
     value("crosses", left ? "min" : "max");
     value("crossBetween", "midCat");
-    if (!axis.logarithmic()) {
-      value("majorUnit", number(axis.step()));
-    }
+    value("majorUnit", number(axis.step()));
     close();
   }
 
@@ -350,7 +349,7 @@ final class ChartXml {
         close();
       }
     }
-    double from = 150 / place.getWidth();
+    double from = LEGEND_FROM / place.getWidth();
     layout(false, from, 0.0, 1 - from, 24 / place.getHeight());
     value("overlay", "1");
     textProperties(TEXT, Palette.INK, false);

@@ -16,10 +16,14 @@ import org.kappatrail.review.decision.Decision;
 /** What needs a decision: an asset a row, as many slides as that takes. */
 final class DecisionList {
   private static final double TEXT = 14;
-  private static final double ROW = 48;
+  private static final double LEAST_ROW = 46;
+  private static final double MOST_ROW = 80;
+  private static final double PADDING = 10;
   private static final double HEADER = 22;
   private static final double GAP = 12;
   private static final double NOTE = 22;
+
+  private static final String BEFORE = "before ";
 
   /** Shares of the width: asset, κ, verdict, why, due. */
   private static final double[] SHARES = {0.24, 0.14, 0.16, 0.33, 0.13};
@@ -40,12 +44,14 @@ final class DecisionList {
     int page = 0;
     do {
       Leaf leaf = stage.leaf(headline(need) + (page == 0 ? "" : ", continued"));
-      int rows = (int) Math.max(1, Math.floor((leaf.room().getHeight() - HEADER - NOTE) / ROW));
+      double height = leaf.room().getHeight() - HEADER - NOTE;
+      int rows = (int) Math.max(1, Math.floor(height / LEAST_ROW));
       List<AssetReview> here = left.subList(0, Math.min(rows, left.size()));
-      draw(leaf, here);
+      double rowHeight = Math.min(MOST_ROW, height / Math.max(1, here.size()));
+      draw(leaf, here, rowHeight);
       left = new ArrayList<>(left.subList(here.size(), left.size()));
       if (left.isEmpty() && choice.more() > 0) {
-        note(leaf, here.size());
+        note(leaf, here.size() * rowHeight);
       }
       page++;
     } while (!left.isEmpty());
@@ -62,10 +68,10 @@ final class DecisionList {
     return all == 1 ? "One asset needs a decision" : all + " assets need a decision";
   }
 
-  private void note(Leaf leaf, int rows) {
+  private void note(Leaf leaf, double below) {
     leaf.box(
             leaf.room().getX(),
-            leaf.room().getY() + HEADER + rows * ROW + 4,
+            leaf.room().getY() + HEADER + below + 4,
             leaf.room().getWidth(),
             NOTE)
         .line(
@@ -74,7 +80,7 @@ final class DecisionList {
             true);
   }
 
-  private static void draw(Leaf leaf, List<AssetReview> assets) {
+  private static void draw(Leaf leaf, List<AssetReview> assets, double rowHeight) {
     Rectangle2D room = leaf.room();
     double[] x = new double[SHARES.length + 1];
     x[0] = room.getX();
@@ -87,16 +93,16 @@ final class DecisionList {
       }
     }
     for (int r = 0; r < assets.size(); r++) {
-      double y = room.getY() + HEADER + r * ROW;
+      double y = room.getY() + HEADER + r * rowHeight;
       rule(leaf, y);
-      row(leaf, x, y + 5, assets.get(r));
+      row(leaf, x, y + 5, rowHeight - PADDING, assets.get(r));
     }
   }
 
-  private static void row(Leaf leaf, double[] x, double y, AssetReview asset) {
+  private static void row(Leaf leaf, double[] x, double y, double height, AssetReview asset) {
     Optional<Level> level = asset.level();
     level.ifPresent(known -> LevelShape.draw(leaf.slide(), known, x[0] + 7, y + 9, 11));
-    cell(leaf, x, 0, y, 20)
+    cell(leaf, x, 0, y, height, 20)
         .line(Words.name(asset.asset().name()), TEXT, true)
         .line(
             level.map(Level::label).orElse("no κ") + " · " + Words.name(asset.asset().id()),
@@ -106,25 +112,28 @@ final class DecisionList {
         asset.governing().flatMap(BearingReview::latestFilm).flatMap(KappaPoint::film);
     film.ifPresent(
         known ->
-            cell(leaf, x, 1, y, 0)
+            cell(leaf, x, 1, y, height, 0)
                 .line(Words.kappa(known.kappa()), TEXT, true)
                 .line(Words.interval(known), TEXT, false));
-    asset.decision().ifPresent(decision -> decided(leaf, x, y, asset, decision));
+    asset.decision().ifPresent(decision -> decided(leaf, x, y, height, asset, decision));
   }
 
   private static void decided(
-      Leaf leaf, double[] x, double y, AssetReview asset, Decision decision) {
-    cell(leaf, x, 2, y, 0).paragraph(Words.verdict(decision.verdict()), TEXT, true, 2);
-    cell(leaf, x, 3, y, 0).paragraph(decision.reason(), TEXT, false, 2);
-    cell(leaf, x, 4, y, 0).paragraph(Words.due(asset, decision), TEXT, true, 2);
+      Leaf leaf, double[] x, double y, double height, AssetReview asset, Decision decision) {
+    cell(leaf, x, 2, y, height, 0).paragraph(Words.verdict(decision.verdict()), TEXT, true, 3);
+    cell(leaf, x, 3, y, height, 0).paragraph(Words.sentence(decision.reason()), TEXT, false, 4);
+    Box due = cell(leaf, x, 4, y, height, 0);
+    String day = Words.due(asset, decision);
+    if (day.startsWith(BEFORE)) {
+      due.line(BEFORE.strip(), TEXT, true).line(day.substring(BEFORE.length()), TEXT, true);
+    } else {
+      due.paragraph(day.isEmpty() ? "–" : day, TEXT, true, 2);
+    }
   }
 
-  private static Box cell(Leaf leaf, double[] x, int column, double y, double indent) {
-    return leaf.box(
-        x[column] + indent,
-        y,
-        x[column + 1] - x[column] - GAP - indent,
-        2 * TEXT * TextFit.LINE + 1);
+  private static Box cell(
+      Leaf leaf, double[] x, int column, double y, double height, double indent) {
+    return leaf.box(x[column] + indent, y, x[column + 1] - x[column] - GAP - indent, height);
   }
 
   private static void rule(Leaf leaf, double y) {

@@ -19,9 +19,10 @@ import org.kappatrail.tribology.LubricationRegime;
  */
 final class FleetPicture {
   private static final double TEXT = 14;
-  private static final double LABEL_WIDTH = 220;
+  private static final double LABEL_WIDTH = 315;
   private static final double VALUE_WIDTH = 56;
   private static final double AXIS_HEIGHT = 22;
+  private static final double NAMES_HEIGHT = 20;
   private static final double LEGEND_HEIGHT = 24;
   private static final double LEAST_ROW = 19;
   private static final double MOST_ROW = 34;
@@ -41,7 +42,7 @@ final class FleetPicture {
     this.slide = leaf.slide();
     this.rows = rows;
     Rectangle2D room = leaf.room();
-    double height = room.getHeight() - AXIS_HEIGHT - LEGEND_HEIGHT - 4;
+    double height = room.getHeight() - NAMES_HEIGHT - AXIS_HEIGHT - LEGEND_HEIGHT - 4;
     int most = (int) Math.max(1, Math.floor(height / LEAST_ROW));
     shown = rows.size() <= most ? rows.size() : most - 1;
     int lines = Math.min(rows.size(), most);
@@ -49,7 +50,7 @@ final class FleetPicture {
     plot =
         new Rectangle2D.Double(
             room.getX() + LABEL_WIDTH,
-            room.getY(),
+            room.getY() + NAMES_HEIGHT,
             room.getWidth() - LABEL_WIDTH - VALUE_WIDTH,
             rowHeight * lines);
     double low = rows.stream().mapToDouble(row -> row.film().uncertainty().low()).min().orElse(0.5);
@@ -98,11 +99,11 @@ final class FleetPicture {
     if (to - from < 1) {
       return;
     }
-    rect(from, plot.getMinY(), to - from, plot.getHeight() + AXIS_HEIGHT, wash);
+    rect(from, plot.getMinY() - NAMES_HEIGHT, to - from, plot.getHeight() + NAMES_HEIGHT, wash);
     if (to - from > 70) {
-      leaf.box(from + 5, plot.getMaxY() + 3, to - from - 10, 17)
+      leaf.box(from + 6, plot.getMinY() - NAMES_HEIGHT + 2, to - from - 12, 17)
           .ink(Palette.QUIET_INK)
-          .line(name, 12, false);
+          .line(name, 13, false);
     }
   }
 
@@ -115,12 +116,14 @@ final class FleetPicture {
           .ink(Palette.INK)
           .line(Numbers.significant(tick, 1), 13, false);
     }
-    leaf.box(plot.getMaxX() + 6, plot.getMaxY() + 3, VALUE_WIDTH - 6, 17).line("κ now", 13, true);
+    leaf.box(plot.getMaxX() + 6, plot.getMinY() - NAMES_HEIGHT + 2, VALUE_WIDTH - 6, 17)
+        .line("κ now", 13, true);
   }
 
   private void row(FleetRow row, double y) {
     LevelShape.draw(slide, row.film().level(), plot.getMinX() - LABEL_WIDTH + 7, y, 10);
-    String label = Words.name(row.asset()) + " · " + Words.name(row.bearing());
+    String label =
+        Words.name(row.asset()) + " " + Words.name(row.bearing()) + " · " + Words.name(row.name());
     leaf.box(plot.getMinX() - LABEL_WIDTH + 20, y - 9, LABEL_WIDTH - 28, TEXT * TextFit.LINE + 1)
         .line(label, TEXT, false);
     double floor = scale.x(row.floor());
@@ -152,7 +155,7 @@ final class FleetPicture {
     if (width >= 0.5) {
       XSLFAutoShape bar = rect(left, top, width, STEP, Palette.wash(Palette.KAPPA, 0.7));
       if (!oil) {
-        Hatch.fill(bar, Palette.KAPPA, Palette.PAPER);
+        hatch(bar);
       }
     }
   }
@@ -173,13 +176,19 @@ final class FleetPicture {
     x = named(x + 16, y, "fresh oil, as the charge began");
     rect(x, y - STEP / 2, 24, STEP, Palette.wash(Palette.KAPPA, 0.7));
     x = named(x + 30, y, "what the oil took");
-    Hatch.fill(rect(x, y - STEP / 2, 24, STEP, Palette.KAPPA), Palette.KAPPA, Palette.PAPER);
+    hatch(rect(x, y - STEP / 2, 24, STEP, Palette.KAPPA));
     x = named(x + 30, y, "what temperature and speed took");
     line(x, y, x + 26, y, Palette.KAPPA, 1.5);
     dot(x + 13, y, Palette.KAPPA);
     x = named(x + 32, y, "κ now, 95 %");
     line(x + 2, y - 7, x + 2, y + 7, Palette.INK, 1);
     named(x + 8, y, "floor");
+  }
+
+  private static void hatch(XSLFAutoShape bar) {
+    Hatch.fill(bar, Palette.KAPPA, Palette.PAPER);
+    bar.setLineColor(Palette.KAPPA);
+    bar.setLineWidth(0.5);
   }
 
   private double named(double x, double y, String text) {

@@ -15,6 +15,7 @@ import org.kappatrail.review.trend.Attribution;
  * One bearing of the fleet picture.
  *
  * @param asset its asset
+ * @param name the asset's name
  * @param bearing its id
  * @param floor its floor
  * @param film its present film
@@ -23,7 +24,13 @@ import org.kappatrail.review.trend.Attribution;
  * @param afterOil κ after the step that the oil took
  */
 record FleetRow(
-    String asset, String bearing, double floor, Film film, double fresh, double afterOil) {
+    String asset,
+    String name,
+    String bearing,
+    double floor,
+    Film film,
+    double fresh,
+    double afterOil) {
   private static final Comparator<FleetRow> WORST_FIRST =
       Comparator.comparingDouble((FleetRow row) -> row.film().kappa() / row.floor())
           .thenComparing(FleetRow::asset)
@@ -34,19 +41,25 @@ record FleetRow(
     List<FleetRow> rows = new ArrayList<>();
     for (AssetReview asset : review.assets()) {
       for (BearingReview bearing : asset.bearings()) {
-        bearing.latestFilm().ifPresent(point -> rows.add(of(bearing, point)));
+        bearing.latestFilm().ifPresent(point -> rows.add(of(asset, bearing, point)));
       }
     }
     rows.sort(WORST_FIRST);
     return rows;
   }
 
-  private static FleetRow of(BearingReview bearing, KappaPoint point) {
+  private static FleetRow of(AssetReview asset, BearingReview bearing, KappaPoint point) {
     Film film = point.film().orElseThrow();
     Optional<Attribution> moved = Words.sinceFresh(bearing, point);
     double fresh = moved.map(parts -> film.kappa() / Math.exp(parts.total())).orElse(film.kappa());
     double afterOil = moved.map(parts -> fresh * Math.exp(parts.oil())).orElse(film.kappa());
     return new FleetRow(
-        bearing.bearing().asset(), bearing.bearing().id(), bearing.floor(), film, fresh, afterOil);
+        asset.asset().id(),
+        asset.asset().name(),
+        bearing.bearing().id(),
+        bearing.floor(),
+        film,
+        fresh,
+        afterOil);
   }
 }

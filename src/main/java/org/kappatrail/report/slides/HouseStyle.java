@@ -5,6 +5,7 @@ import java.awt.Dimension;
 import java.awt.geom.Rectangle2D;
 import java.util.List;
 import org.apache.poi.sl.usermodel.Placeholder;
+import org.apache.poi.sl.usermodel.VerticalAlignment;
 import org.apache.poi.xslf.usermodel.XMLSlideShow;
 import org.apache.poi.xslf.usermodel.XSLFShape;
 import org.apache.poi.xslf.usermodel.XSLFSheet;
@@ -15,8 +16,12 @@ import org.kappatrail.report.chart.Palette;
 import org.openxmlformats.schemas.drawingml.x2006.main.CTColor;
 import org.openxmlformats.schemas.drawingml.x2006.main.CTColorScheme;
 import org.openxmlformats.schemas.drawingml.x2006.main.CTFontScheme;
+import org.openxmlformats.schemas.drawingml.x2006.main.CTTextBody;
+import org.openxmlformats.schemas.drawingml.x2006.main.CTTextCharacterProperties;
 import org.openxmlformats.schemas.drawingml.x2006.main.CTTextListStyle;
+import org.openxmlformats.schemas.drawingml.x2006.main.CTTextParagraphProperties;
 import org.openxmlformats.schemas.drawingml.x2006.main.STTextAlignType;
+import org.openxmlformats.schemas.presentationml.x2006.main.CTShape;
 
 /** Page, fonts and colours of slides where the site gives no template of its own. */
 final class HouseStyle {
@@ -26,6 +31,7 @@ final class HouseStyle {
   private static final Rectangle2D SUBTITLE = new Rectangle2D.Double(40, 258, 880, 150);
   private static final String FONT = "Arial";
   private static final int TITLE_HUNDREDTHS = 2600;
+  private static final int OPENING_HUNDREDTHS = 4000;
 
   private HouseStyle() {}
 
@@ -51,11 +57,11 @@ final class HouseStyle {
         Placeholder kind = text.getTextType();
         switch (kind) {
           case TITLE -> text.setAnchor(TITLE);
-          case CENTERED_TITLE -> text.setAnchor(OPENING);
-          case SUBTITLE -> {
-            text.setAnchor(SUBTITLE);
-            text.getTextParagraphs().forEach(paragraph -> paragraph.getXmlObject().getPPr());
+          case CENTERED_TITLE -> {
+            text.setAnchor(OPENING);
+            openingSize(text);
           }
+          case SUBTITLE -> text.setAnchor(SUBTITLE);
           case SLIDE_NUMBER -> text.setAnchor(new Rectangle2D.Double(840, 508, 80, 22));
           case FOOTER -> text.setAnchor(new Rectangle2D.Double(40, 508, 700, 22));
           case DATETIME -> text.setAnchor(new Rectangle2D.Double(740, 508, 100, 22));
@@ -63,6 +69,16 @@ final class HouseStyle {
         }
       }
     }
+  }
+
+  private static void openingSize(XSLFTextShape text) {
+    CTTextBody body = ((CTShape) text.getXmlObject()).getTxBody();
+    CTTextListStyle style = body.isSetLstStyle() ? body.getLstStyle() : body.addNewLstStyle();
+    CTTextParagraphProperties level =
+        style.isSetLvl1PPr() ? style.getLvl1PPr() : style.addNewLvl1PPr();
+    CTTextCharacterProperties run = level.isSetDefRPr() ? level.getDefRPr() : level.addNewDefRPr();
+    run.setSz(OPENING_HUNDREDTHS);
+    text.setVerticalAlignment(VerticalAlignment.BOTTOM);
   }
 
   /** The library's own page is narrower. */

@@ -10,7 +10,6 @@ import java.util.TreeMap;
 import java.util.function.ToDoubleFunction;
 import org.kappatrail.history.Charge;
 import org.kappatrail.report.chart.Palette;
-import org.kappatrail.report.page.Numbers;
 import org.kappatrail.review.AssetReview;
 import org.kappatrail.review.BearingReview;
 import org.kappatrail.review.Film;
@@ -25,6 +24,12 @@ import org.kappatrail.tribology.LubricationRegime;
 final class KappaTrend {
   /** More lines than this cannot be told apart. */
   private static final int MOST_OTHERS = 2;
+
+  /** Half the height of a name in the plot, as a share of the plot's. */
+  private static final double NAME_SHARE = 0.06;
+
+  /** Share of the span from which there is no room for a name at the right. */
+  private static final double LATE = 0.7;
 
   private static final int LONGEST_NAME = 14;
 
@@ -57,13 +62,13 @@ final class KappaTrend {
     ValueAxis axis = axis(low, high, fan);
     bands(axis);
     String name = shortened(shown.bearing().id());
-    int line = sheet.add("κ " + name, kappa);
+    int line = sheet.add(name, kappa);
     int up = sheet.add("up to 97.5 %", difference(high, kappa));
     int down = sheet.add("down to 2.5 %", difference(kappa, low));
-    others();
+    thinLines();
     int floor =
         sheet.add(
-            "floor " + Numbers.significant(shown.floor(), 2),
+            "floor " + Words.floor(shown.floor()),
             new TreeMap<>(java.util.Map.of(span.from(), shown.floor(), span.to(), shown.floor())));
     series.add(ChartSeries.line(floor, Palette.INK, 1.25).dashed("dash"));
     outlook(fan);
@@ -73,7 +78,7 @@ final class KappaTrend {
             .marked("circle")
             .whiskers(up, down, Palette.KAPPA));
     return new NativeChart(
-        "κ, viscosity ratio",
+        "κ = ν/ν1",
         "κ of "
             + name
             + " against time on a logarithmic axis, with its 95 % intervals, floor and outlook;"
@@ -91,21 +96,24 @@ final class KappaTrend {
     values.addAll(low.values());
     values.addAll(high.values());
     fan.forEach(point -> values.add(point.likely()));
+    others().forEach(other -> values.addAll(films(other, Film::kappa).values()));
     double least = values.stream().mapToDouble(value -> value).min().orElseThrow();
     double most = values.stream().mapToDouble(value -> value).max().orElseThrow();
     return ValueAxis.log(Math.max(least, 0.03), Math.min(most, 60), Palette.KAPPA);
   }
 
-  /** Regimes as washes, each over the one beneath it, named at their lower edge. */
+  /**
+   * Regimes as washes on top of one another, named at the right, away from where the trail begins.
+   */
   private void bands(ValueAxis axis) {
-    band(axis, "full film", LubricationRegime.FULL_FILM_FROM, axis.high(), Palette.FILM_WASH);
+    band(axis, "boundary", 0, LubricationRegime.MIXED_FROM, Palette.BOUNDARY_WASH);
     band(
         axis,
         "mixed",
         LubricationRegime.MIXED_FROM,
         LubricationRegime.FULL_FILM_FROM,
         Palette.MIXED_WASH);
-    band(axis, "boundary", 0, LubricationRegime.MIXED_FROM, Palette.BOUNDARY_WASH);
+    band(axis, "full film", LubricationRegime.FULL_FILM_FROM, axis.high(), Palette.FILM_WASH);
   }
 
   private void band(ValueAxis axis, String name, double from, double to, Color wash) {
@@ -114,30 +122,32 @@ final class KappaTrend {
     if (high <= low) {
       return;
     }
-    TreeMap<LocalDate, Double> top = new TreeMap<>();
-    top.put(span.from(), high);
-    top.put(span.to(), high);
-    series.add(ChartSeries.area(sheet.add(name + " up to", top), wash));
-    TreeMap<LocalDate, Double> place = new TreeMap<>();
-    place.put(span.from(), low * Math.pow(axis.high() / axis.low(), 0.06));
-    if (high / low > Math.pow(axis.high() / axis.low(), 0.12)) {
-      series.add(ChartSeries.name(sheet.add(name, place), Palette.QUIET_INK, "r"));
+    double height = low > axis.low() ? high - low : high;
+    TreeMap<LocalDate, Double> band = new TreeMap<>();
+    band.put(span.from(), height);
+    band.put(span.to(), height);
+    series.add(ChartSeries.area(sheet.add(name + ", width of band", band), wash));
+    double edge = Math.pow(axis.high() / axis.low(), NAME_SHARE);
+    if (high / low > edge * edge) {
+      TreeMap<LocalDate, Double> place = new TreeMap<>();
+      place.put(span.to(), high == axis.high() ? high / edge : low * edge);
+      series.add(ChartSeries.name(sheet.add(name, place), Palette.QUIET_INK, "l"));
     }
   }
 
-  private void others() {
-    asset.bearings().stream()
+  private List<BearingReview> others() {
+    return asset.bearings().stream()
         .filter(bearing -> !bearing.bearing().id().equals(shown.bearing().id()))
         .filter(bearing -> !films(bearing, Film::kappa).isEmpty())
         .limit(MOST_OTHERS)
-        .forEach(
-            bearing ->
-                series.add(
-                    ChartSeries.line(
-                        sheet.add(
-                            "κ " + shortened(bearing.bearing().id()), films(bearing, Film::kappa)),
-                        Palette.wash(Palette.KAPPA, 0.5),
-                        1)));
+        .toList();
+  }
+
+  private void thinLines() {
+    for (BearingReview other : others()) {
+      int line = sheet.add(shortened(other.bearing().id()), films(other, Film::kappa));
+      series.add(ChartSeries.line(line, Palette.wash(Palette.KAPPA, 0.5), 1));
+    }
   }
 
   private void outlook(List<FanPoint> fan) {
@@ -168,7 +178,7 @@ final class KappaTrend {
     TreeMap<LocalDate, Double> at = new TreeMap<>();
     TreeMap<LocalDate, Double> up = new TreeMap<>();
     TreeMap<LocalDate, Double> down = new TreeMap<>();
-    double height = axis.high() / Math.pow(axis.high() / axis.low(), 0.06);
+    double height = axis.high() / Math.pow(axis.high() / axis.low(), NAME_SHARE);
     for (Charge charge : asset.charges()) {
       charge
           .start()
@@ -186,7 +196,7 @@ final class KappaTrend {
     LocalDate last = at.lastKey();
     boolean late =
         last.toEpochDay() - span.from().toEpochDay()
-            > 0.75 * (span.to().toEpochDay() - span.from().toEpochDay());
+            > LATE * (span.to().toEpochDay() - span.from().toEpochDay());
     int lines = sheet.add("oil changes", at);
     series.add(
         ChartSeries.name(lines, Palette.INK, "")

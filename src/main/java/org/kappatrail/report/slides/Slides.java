@@ -6,7 +6,6 @@ import java.io.OutputStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import org.kappatrail.report.office.OfficeProperties;
@@ -20,6 +19,9 @@ import org.kappatrail.review.Review;
  * per asset, method and cautions.
  */
 public final class Slides {
+  private static final double LEVELS_DOWN = 64;
+  private static final double LEVEL_TEXT = 18;
+
   private final Review review;
   private final Choice choice;
   private final Optional<Path> template;
@@ -67,7 +69,7 @@ public final class Slides {
     String site = ShownText.of(review.settings().site());
     String footer = (site.isEmpty() ? "" : site + " · ") + "state of " + review.asOf();
     try (Stage stage = new Stage(template, footer)) {
-      stage.opening(site.isEmpty() ? "Oil film of rolling bearings" : site, summary(site));
+      opening(stage, site);
       fleet(stage);
       new DecisionList(stage, choice).add();
       for (AssetReview asset : choice.shown()) {
@@ -93,22 +95,29 @@ public final class Slides {
     new FleetPicture(stage.leaf(headline), rows).draw();
   }
 
-  private List<String> summary(String site) {
-    List<String> lines = new ArrayList<>();
-    lines.add(
-        (site.isEmpty() ? "Review" : "Oil film of the rolling bearings")
-            + ", state of "
-            + review.asOf());
+  private void opening(Stage stage, String site) {
     int bearings = review.assets().stream().mapToInt(asset -> asset.bearings().size()).sum();
-    lines.add(review.assets().size() + " assets, " + bearings + " bearings");
-    lines.add(
-        count(Level.ALARM)
-            + " alarm, "
-            + count(Level.ALERT)
-            + " alert, "
-            + count(Level.CLEAR)
-            + " clear");
-    return lines;
+    Leaf leaf =
+        stage.opening(
+            site.isEmpty() ? "Oil film of the rolling bearings" : site,
+            List.of(
+                (site.isEmpty() ? "Review" : "Oil film of the rolling bearings")
+                    + ", state of "
+                    + review.asOf(),
+                count(review.assets().size(), "asset") + ", " + count(bearings, "bearing")));
+    double x = leaf.room().getX();
+    double y = leaf.room().getY() + LEVELS_DOWN;
+    for (Level level : List.of(Level.ALARM, Level.ALERT, Level.CLEAR)) {
+      String text = count(level) + " " + level.label();
+      double width = leaf.fit().width(text, LEVEL_TEXT, true) + 2;
+      LevelShape.draw(leaf.slide(), level, x + 8, y + 11, 14);
+      leaf.box(x + 22, y, width, LEVEL_TEXT * TextFit.LINE + 1).line(text, LEVEL_TEXT, true);
+      x += 22 + width + 26;
+    }
+  }
+
+  private static String count(int number, String thing) {
+    return number + " " + thing + (number == 1 ? "" : "s");
   }
 
   private long count(Level level) {

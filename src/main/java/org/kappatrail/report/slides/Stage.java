@@ -13,6 +13,7 @@ import org.apache.poi.openxml4j.exceptions.OpenXML4JRuntimeException;
 import org.apache.poi.sl.usermodel.Placeholder;
 import org.apache.poi.xslf.usermodel.SlideLayout;
 import org.apache.poi.xslf.usermodel.XMLSlideShow;
+import org.apache.poi.xslf.usermodel.XSLFRelation;
 import org.apache.poi.xslf.usermodel.XSLFShape;
 import org.apache.poi.xslf.usermodel.XSLFSheet;
 import org.apache.poi.xslf.usermodel.XSLFSlide;
@@ -22,11 +23,14 @@ import org.apache.poi.xslf.usermodel.XSLFTextRun;
 import org.apache.poi.xslf.usermodel.XSLFTextShape;
 import org.kappatrail.history.UnusableInputException;
 import org.kappatrail.report.office.FixedZip;
+import org.kappatrail.report.office.ShownText;
 
 /** The slide show: of the house, or on a site's template with its master, layouts and page. */
 final class Stage implements AutoCloseable {
   private static final double GAP = 6;
   private static final double MARGIN = 40;
+  private static final double LEAST_FOOTER = 150;
+  private static final double LEAST_MARGIN = 12;
   private static final double FOOTER_HEIGHT = 22;
   private static final double LEAST_TITLE_POINTS = 18;
 
@@ -54,6 +58,10 @@ final class Stage implements AutoCloseable {
     XMLSlideShow show;
     try (InputStream in = Files.newInputStream(template)) {
       show = new XMLSlideShow(in);
+      show.getPackage()
+          .replaceContentType(
+              XSLFRelation.PRESENTATIONML_TEMPLATE.getContentType(),
+              XSLFRelation.MAIN.getContentType());
     } catch (POIXMLException | OpenXML4JRuntimeException | IllegalArgumentException e) {
       throw new UnusableInputException(
           template + ": cannot be read as a PowerPoint file; save it as .pptx", e);
@@ -78,7 +86,7 @@ final class Stage implements AutoCloseable {
   }
 
   /** The opening slide. */
-  void opening(String title, List<String> lines) {
+  Leaf opening(String title, List<String> lines) {
     XSLFSlide slide = show.createSlide(layout(SlideLayout.TITLE));
     Optional<XSLFTextShape> under = find(slide, Placeholder.SUBTITLE);
     XSLFTextShape heading = heading(slide);
@@ -92,12 +100,18 @@ final class Stage implements AutoCloseable {
                     heading.getAnchor().getMaxY() + GAP,
                     heading.getAnchor().getWidth(),
                     150));
-    under.ifPresent(slide::removeShape);
+    Rectangle2D room =
+        new Rectangle2D.Double(
+            place.getX() + heading.getLeftInset(),
+            place.getY(),
+            place.getWidth() - heading.getLeftInset() - heading.getRightInset(),
+            place.getHeight());
     dropEmpty(slide, heading);
-    Box box = new Box(slide, fit, place);
+    Box box = new Box(slide, fit, room);
     for (int i = 0; i < lines.size(); i++) {
       box.line(lines.get(i), i == 0 ? 22 : 18, false);
     }
+    return new Leaf(slide, fit, room);
   }
 
   /** A slide with a headline. */
@@ -107,9 +121,12 @@ final class Stage implements AutoCloseable {
     title(heading, headline);
     dropEmpty(slide, heading);
     double top = heading.getAnchor().getMaxY() + GAP;
-    double left = Math.max(heading.getAnchor().getX(), 12);
+    double left = Math.max(heading.getAnchor().getX() + heading.getLeftInset(), LEAST_MARGIN);
     double width =
-        Math.min(heading.getAnchor().getWidth(), show.getPageSize().getWidth() - left - 12);
+        Math.min(
+                heading.getAnchor().getMaxX() - heading.getRightInset(),
+                show.getPageSize().getWidth() - LEAST_MARGIN)
+            - left;
     double bottom = foot(slide, left, width);
     return new Leaf(slide, fit, new Rectangle2D.Double(left, top, width, bottom - top));
   }
@@ -130,13 +147,14 @@ final class Stage implements AutoCloseable {
   private void title(XSLFTextShape shape, String text) {
     shape.clearText();
     XSLFTextRun run = shape.addNewTextParagraph().addNewTextRun();
-    run.setText(text);
+    String joined = Words.joined(text);
+    run.setText(joined);
     Double inherited = run.getFontSize();
     double most = inherited == null ? 26 : inherited;
     Rectangle2D box = shape.getAnchor();
     TextFit.Fitted fitted =
         fit.fit(
-            text,
+            joined,
             box.getWidth() - shape.getLeftInset() - shape.getRightInset(),
             box.getHeight() - shape.getTopInset() - shape.getBottomInset(),
             most,
@@ -159,7 +177,9 @@ final class Stage implements AutoCloseable {
                     width,
                     FOOTER_HEIGHT));
     String number = Integer.toString(show.getSlides().size());
-    Box box = new Box(slide, fit, place);
+    Rectangle2D line =
+        new Rectangle2D.Double(left, place.getY(), place.getMaxX() - left, place.getHeight());
+    Box box = new Box(slide, fit, line.getWidth() > LEAST_FOOTER ? line : place);
     box.line(footer + " · " + number, 12, false);
     double least = place.getMinY();
     for (Placeholder kind : List.of(Placeholder.SLIDE_NUMBER, Placeholder.DATETIME)) {
@@ -206,6 +226,17 @@ final class Stage implements AutoCloseable {
           shape instanceof XSLFTextShape text && shape != kept && text.getTextType() != null;
       if (prompt) {
         slide.removeShape(shape);
+      }
+    }
+  }
+
+  /** Sets what the presenter reads beside a slide. */
+  void notes(Leaf leaf, List<String> lines) {
+    for (XSLFTextShape shape : show.getNotesSlide(leaf.slide()).getPlaceholders()) {
+      if (shape.getTextType() == Placeholder.BODY) {
+        shape.clearText();
+        lines.forEach(
+            line -> shape.addNewTextParagraph().addNewTextRun().setText(ShownText.of(line)));
       }
     }
   }

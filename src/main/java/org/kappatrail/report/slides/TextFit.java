@@ -19,6 +19,9 @@ final class TextFit {
   private static final String ELLIPSIS = "…";
   private static final FontRenderContext CONTEXT = new FontRenderContext(null, true, true);
 
+  /** A word that is dropped whole rather than shown in part. */
+  private static final int SHORT_WORD = 14;
+
   /** Points at which fonts are measured; widths scale with the size. */
   private static final float MEASURED_POINTS = 100;
 
@@ -103,10 +106,20 @@ final class TextFit {
     return width(text, points, strong) <= width ? text : ended(text, width, points, strong);
   }
 
+  /** Cut at a blank where there is one, so that no number is shown in part. */
   private String ended(String text, double width, double points, boolean strong) {
     String kept = text.stripTrailing();
+    boolean whole = width(kept + ELLIPSIS, points, strong) <= width;
     while (!kept.isEmpty() && width(kept + ELLIPSIS, points, strong) > width) {
       kept = kept.substring(0, kept.offsetByCodePoints(kept.length(), -1)).stripTrailing();
+    }
+    int blank = kept.lastIndexOf(' ');
+    boolean within = kept.length() < text.length() && text.charAt(kept.length()) != ' ';
+    if (!whole && within && blank > 0) {
+      String part = kept.substring(blank);
+      if (part.length() <= SHORT_WORD || part.codePoints().anyMatch(Character::isDigit)) {
+        kept = kept.substring(0, blank).stripTrailing();
+      }
     }
     return kept + ELLIPSIS;
   }

@@ -1,5 +1,6 @@
 package org.kappatrail.report.slides;
 
+import java.util.Locale;
 import java.util.Optional;
 import org.kappatrail.report.office.ShownText;
 import org.kappatrail.report.page.Numbers;
@@ -37,11 +38,38 @@ final class Words {
 
   /** A name, its beginning only where it is very long. */
   static String name(String name) {
+    return name(name, LONGEST_NAME);
+  }
+
+  /** A name of at most so many characters, cut at a blank where that costs little. */
+  static String name(String name, int longest) {
     String shown = ShownText.of(name);
-    if (shown.codePointCount(0, shown.length()) <= LONGEST_NAME) {
+    if (shown.codePointCount(0, shown.length()) <= longest) {
       return shown;
     }
-    return ShownText.of(shown.substring(0, shown.offsetByCodePoints(0, LONGEST_NAME - 1)) + "…");
+    String kept = shown.substring(0, shown.offsetByCodePoints(0, longest - 1));
+    int blank = kept.lastIndexOf(' ');
+    return ShownText.of((blank > longest * 2 / 3 ? kept.substring(0, blank) : kept) + "…");
+  }
+
+  /** A phrase as a sentence. */
+  static String sentence(String phrase) {
+    if (phrase.isEmpty()) {
+      return phrase;
+    }
+    int first = phrase.offsetByCodePoints(0, 1);
+    String begun = phrase.substring(0, first).toUpperCase(Locale.ROOT) + phrase.substring(first);
+    return begun.endsWith(".") ? begun : begun + ".";
+  }
+
+  /** A text whose numbers stay with their unit when its lines break. */
+  static String joined(String text) {
+    return text.replace(" %", "\u00A0%").replace(" °C", "\u00A0°C").replace("κ ", "κ\u00A0");
+  }
+
+  static String floor(double floor) {
+    boolean tenths = Math.abs(floor * 10 - Math.rint(floor * 10)) < 1e-9;
+    return Numbers.fixed(floor, tenths ? 1 : 2);
   }
 
   static String kappa(double kappa) {
@@ -68,7 +96,7 @@ final class Words {
           case ALERT -> ", perhaps below its floor of ";
           case CLEAR -> ", clear of its floor of ";
         });
-    line.append(Numbers.significant(governing.get().floor(), 2));
+    line.append(floor(governing.get().floor()));
     sinceFresh(governing.get(), latest.get()).flatMap(Words::taken).ifPresent(line::append);
     asset.decision().ifPresent(found -> line.append(": ").append(verdict(found.verdict())));
     return line.toString();
@@ -89,13 +117,21 @@ final class Words {
     return Optional.of(", " + what + " took " + -most + " %");
   }
 
-  /** When the act is due. */
+  /** The next sample that is asked for; empty where none is. */
+  static String nextSample(AssetReview asset) {
+    return asset
+        .governing()
+        .flatMap(bearing -> bearing.trend().outlook())
+        .map(outlook -> "next sample by " + outlook.nextSample())
+        .orElse("");
+  }
+
+  /** When the act is due; empty where nothing is to be done. */
   static String due(AssetReview asset, Decision decision) {
     Optional<Outlook> outlook = asset.governing().flatMap(bearing -> bearing.trend().outlook());
-    String next = outlook.map(found -> found.nextSample().toString()).orElse("");
     boolean urgent = decision.urgent().answer() == Answer.YES;
     return switch (decision.verdict()) {
-      case KEEP -> next.isEmpty() ? "" : "next sample by " + next;
+      case KEEP -> "";
       case RESAMPLE, CHANGE_NOW -> "now";
       case FIX_CAUSE_FIRST, PLAN_CHANGE ->
           urgent
@@ -103,7 +139,7 @@ final class Words {
               : outlook
                   .flatMap(Outlook::firstCrossing)
                   .map(day -> "before " + day)
-                  .orElse(next.isEmpty() ? "" : "by " + next);
+                  .orElse("at the next planned stop");
     };
   }
 }
