@@ -73,6 +73,7 @@ public final class Pack {
     for (Table table : tables) {
       CsvFile.write(table, folder.resolve(table.name() + ".csv"));
     }
+    CsvFile.write(ReviewTables.kappaDaily(review), folder.resolve("kappa-daily.csv"));
     new ReviewWorkbook(review, tables).write(folder.resolve("review.xlsx"));
     new ReviewJson(review, manifest.programVersion()).write(folder.resolve("review.json"));
     manifest.write(folder.resolve("manifest.json"), review);

@@ -11,6 +11,7 @@ import org.kappatrail.review.trend.ChargeDrift;
 import org.kappatrail.review.trend.Crossing;
 import org.kappatrail.review.trend.Direction;
 import org.kappatrail.review.trend.Drift;
+import org.kappatrail.review.trend.FilmState;
 import org.kappatrail.review.trend.Forecast;
 import org.kappatrail.review.trend.OilShift;
 import org.kappatrail.review.trend.Outlook;
@@ -138,32 +139,59 @@ final class TrendFindings {
             settings.duty().uncertaintyC());
   }
 
+  /**
+   * Hotter than a year ago at this season, where the log reaches back so far; else than at the
+   * charge's first sample, which may be the season's doing.
+   */
   private void heat() {
-    if (sinceStart.isEmpty()) {
+    OptionalDouble then = outlook.map(Outlook::yearAgoC).orElse(OptionalDouble.empty());
+    if (then.isPresent()) {
+      hotterThanAYearAgo(then.getAsDouble());
+    } else {
+      sinceStart.ifPresent(this::hotterThanAtTheStart);
+    }
+  }
+
+  private double measurableHeat() {
+    return DIFFERENCE_95
+        * Math.abs(film.sensitivityToTemperature())
+        * settings.duty().uncertaintyC();
+  }
+
+  private void hotterThanAYearAgo(double thenC) {
+    FilmState now = TrendOfTrail.state(latest);
+    double part = Attribution.between(now.at(thenC, now.speedRpm()), now).temperature();
+    double oil = sinceStart.map(Attribution::oil).orElse(0.0);
+    if (part >= -measurableHeat() || part >= oil) {
       return;
     }
-    Attribution parts = sinceStart.get();
-    double limit =
-        DIFFERENCE_95 * Math.abs(film.sensitivityToTemperature()) * settings.duty().uncertaintyC();
+    add(
+        Level.ALERT,
+        FindingKind.HEAT,
+        Say.text(
+            "%s °C now, %s °C a year ago at this season: the heat costs %s %% of κ%s",
+            Say.oneDecimal(now.temperatureC()),
+            Say.oneDecimal(thenC),
+            Say.whole(-Math.expm1(part) * 100),
+            sinceStart.map(parts -> "; since the charge began " + Moved.words(parts)).orElse("")));
+  }
+
+  private void hotterThanAtTheStart(Attribution parts) {
+    double limit = measurableHeat();
     boolean hotter =
         parts.temperature() < -limit
             && parts.temperature() < Math.min(parts.oil(), parts.speed())
             && parts.total() < -limit;
-    if (!hotter || asWarmAsLastYear()) {
+    if (!hotter) {
       return;
     }
-    OptionalDouble then = outlook.map(Outlook::yearAgoC).orElse(OptionalDouble.empty());
-    double now = latest.point().temperatureC().getAsDouble();
     add(
-        then.isPresent() || film.level() != Level.CLEAR ? Level.ALERT : Level.CLEAR,
+        film.level() == Level.CLEAR ? Level.CLEAR : Level.ALERT,
         FindingKind.HEAT,
         Say.text(
-            "since the charge's first sample %s; %s °C now, %s",
-            Moved.words(parts),
-            Say.oneDecimal(now),
-            then.isPresent()
-                ? Say.oneDecimal(then.getAsDouble()) + " °C a year ago"
-                : "and the log is too short to tell a season from a fault"));
+            "since the charge began %s; %s °C now, and the log is too short to tell a season from"
+                + " a fault",
+            Moved.words(parts), Say.oneDecimal(latest.point().temperatureC().getAsDouble())));
   }
 
   private void seasonalDip() {

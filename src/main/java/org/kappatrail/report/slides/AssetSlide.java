@@ -21,6 +21,8 @@ final class AssetSlide {
   private static final double ACT = 66;
   private static final double GAP = 10;
   private static final double CHART_SHARE = 0.56;
+  private static final double NARROW = 700;
+  private static final double NARROW_SHARE = 0.5;
   private static final double KAPPA_SHARE = 0.6;
   private static final double TEXT = 14;
   private static final int FACT_NAME = 24;
@@ -40,7 +42,7 @@ final class AssetSlide {
     facts(leaf);
     double top = room.getY() + FACTS + 2;
     double height = room.getMaxY() - ACT - GAP - top;
-    double width = room.getWidth() * CHART_SHARE;
+    double width = room.getWidth() * (room.getWidth() < NARROW ? NARROW_SHARE : CHART_SHARE);
     charts(leaf, new Rectangle2D.Double(room.getX(), top, width, height));
     double right = room.getX() + width + 2 * GAP;
     Rectangle2D side = new Rectangle2D.Double(right, top, room.getMaxX() - right, height);

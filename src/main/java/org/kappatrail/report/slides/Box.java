@@ -79,6 +79,11 @@ final class Box {
     return set(fitted.text(), fitted.points(), strong, fitted.lines());
   }
 
+  /** Height of what has been set. */
+  double used() {
+    return used;
+  }
+
   private Box set(String text, double points, boolean strong, int lines) {
     XSLFTextParagraph paragraph = shape.addNewTextParagraph();
     paragraph.setTextAlign(align);

@@ -26,8 +26,9 @@ final class ChartXml {
   private static final String DATES = "yyyy-mm-dd";
 
   private static final double TEXT = 12;
-  private static final double TITLE_TEXT = 14;
-  private static final double LEGEND_FROM = 105;
+  static final double TITLE_TEXT = 14;
+  private static final double NARROW = 400;
+  private static final double LEGEND_LINE = 22;
   private static final int EMU = 12_700;
 
   private static final int DAY_AXIS = 1;
@@ -37,12 +38,21 @@ final class ChartXml {
 
   private final NativeChart chart;
   private final Rectangle2D place;
+  private final double legendFrom;
+  private final double legendHeight;
   private final StringWriter text = new StringWriter();
   private final XMLStreamWriter xml;
 
-  ChartXml(NativeChart chart, Rectangle2D place) {
+  /**
+   * The XML of a chart.
+   *
+   * @param legendFrom points from the left at which the legend begins, clear of the title
+   */
+  ChartXml(NativeChart chart, Rectangle2D place, double legendFrom) {
     this.chart = chart;
     this.place = place;
+    this.legendFrom = legendFrom;
+    legendHeight = place.getWidth() < NARROW ? 2 * LEGEND_LINE : LEGEND_LINE;
     try {
       xml = XMLOutputFactory.newInstance().createXMLStreamWriter(text);
     } catch (XMLStreamException e) {
@@ -113,7 +123,7 @@ final class ChartXml {
   /** Both charts of an asset have their plot between the same edges. */
   private void plot() throws XMLStreamException {
     open("plotArea");
-    double top = 30 / place.getHeight();
+    double top = (legendHeight + 8) / place.getHeight();
     double foot = 24 / place.getHeight();
     layout(true, 40 / place.getWidth(), top, 1 - 80 / place.getWidth(), 1 - top - foot);
     group("areaChart", ChartSeries.Kind.AREA, DAY_AXIS, LEFT_AXIS);
@@ -349,8 +359,8 @@ final class ChartXml {
         close();
       }
     }
-    double from = LEGEND_FROM / place.getWidth();
-    layout(false, from, 0.0, 1 - from, 24 / place.getHeight());
+    double from = legendFrom / place.getWidth();
+    layout(false, from, 0.0, 1 - from, (legendHeight + 2) / place.getHeight());
     value("overlay", "1");
     textProperties(TEXT, Palette.INK, false);
     close();

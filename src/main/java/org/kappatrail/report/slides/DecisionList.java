@@ -17,6 +17,8 @@ import org.kappatrail.review.decision.Decision;
 final class DecisionList {
   private static final double TEXT = 14;
   private static final double LEAST_ROW = 46;
+  private static final double NARROW = 700;
+  private static final double NARROW_ROW = 64;
   private static final double MOST_ROW = 80;
   private static final double PADDING = 10;
   private static final double HEADER = 22;
@@ -45,7 +47,8 @@ final class DecisionList {
     do {
       Leaf leaf = stage.leaf(headline(need) + (page == 0 ? "" : ", continued"));
       double height = leaf.room().getHeight() - HEADER - NOTE;
-      int rows = (int) Math.max(1, Math.floor(height / LEAST_ROW));
+      double least = leaf.room().getWidth() < NARROW ? NARROW_ROW : LEAST_ROW;
+      int rows = (int) Math.max(1, Math.floor(height / least));
       List<AssetReview> here = left.subList(0, Math.min(rows, left.size()));
       double rowHeight = Math.min(MOST_ROW, height / Math.max(1, here.size()));
       draw(leaf, here, rowHeight);
@@ -103,7 +106,7 @@ final class DecisionList {
     Optional<Level> level = asset.level();
     level.ifPresent(known -> LevelShape.draw(leaf.slide(), known, x[0] + 7, y + 9, 11));
     cell(leaf, x, 0, y, height, 20)
-        .line(Words.name(asset.asset().name()), TEXT, true)
+        .paragraph(Words.name(asset.asset().name()), TEXT, true, nameLines(height))
         .line(
             level.map(Level::label).orElse("no κ") + " · " + Words.name(asset.asset().id()),
             TEXT,
@@ -114,7 +117,7 @@ final class DecisionList {
         known ->
             cell(leaf, x, 1, y, height, 0)
                 .line(Words.kappa(known.kappa()), TEXT, true)
-                .line(Words.interval(known), TEXT, false));
+                .paragraph(Words.interval(known), TEXT, false, 2));
     asset.decision().ifPresent(decision -> decided(leaf, x, y, height, asset, decision));
   }
 
@@ -129,6 +132,11 @@ final class DecisionList {
     } else {
       due.paragraph(day.isEmpty() ? "–" : day, TEXT, true, 2);
     }
+  }
+
+  /** One line is kept for level and id. */
+  private static int nameLines(double height) {
+    return (int) Math.max(1, Math.floor(height / (TEXT * TextFit.LINE)) - 1);
   }
 
   private static Box cell(

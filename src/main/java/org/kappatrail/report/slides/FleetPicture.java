@@ -19,13 +19,16 @@ import org.kappatrail.tribology.LubricationRegime;
  */
 final class FleetPicture {
   private static final double TEXT = 14;
-  private static final double LABEL_WIDTH = 315;
+  private static final double MOST_LABEL_WIDTH = 315;
+  private static final double LABEL_SHARE = 0.38;
   private static final double VALUE_WIDTH = 56;
   private static final double AXIS_HEIGHT = 22;
   private static final double NAMES_HEIGHT = 20;
   private static final double LEGEND_HEIGHT = 24;
+  private static final double LEGEND_TEXT = 13;
+  private static final double MARK_GAP = 14;
   private static final double LEAST_ROW = 19;
-  private static final double MOST_ROW = 34;
+  private static final double MOST_ROW = 44;
   private static final double STEP = 5;
   private static final double DOT = 9;
 
@@ -33,6 +36,7 @@ final class FleetPicture {
   private final XSLFSlide slide;
   private final List<FleetRow> rows;
   private final int shown;
+  private final double labelWidth;
   private final double rowHeight;
   private final LogScale scale;
   private final Rectangle2D plot;
@@ -42,16 +46,18 @@ final class FleetPicture {
     this.slide = leaf.slide();
     this.rows = rows;
     Rectangle2D room = leaf.room();
-    double height = room.getHeight() - NAMES_HEIGHT - AXIS_HEIGHT - LEGEND_HEIGHT - 4;
+    labelWidth = Math.min(MOST_LABEL_WIDTH, LABEL_SHARE * room.getWidth());
+    double height =
+        room.getHeight() - NAMES_HEIGHT - AXIS_HEIGHT - legendLines() * LEGEND_HEIGHT - 4;
     int most = (int) Math.max(1, Math.floor(height / LEAST_ROW));
     shown = rows.size() <= most ? rows.size() : most - 1;
     int lines = Math.min(rows.size(), most);
     rowHeight = Math.min(MOST_ROW, height / Math.max(1, lines));
     plot =
         new Rectangle2D.Double(
-            room.getX() + LABEL_WIDTH,
+            room.getX() + labelWidth,
             room.getY() + NAMES_HEIGHT,
-            room.getWidth() - LABEL_WIDTH - VALUE_WIDTH,
+            room.getWidth() - labelWidth - VALUE_WIDTH,
             rowHeight * lines);
     double low = rows.stream().mapToDouble(row -> row.film().uncertainty().low()).min().orElse(0.5);
     double high =
@@ -113,7 +119,6 @@ final class FleetPicture {
       line(x, plot.getMinY(), x, plot.getMaxY(), Palette.RULE, tick == 1 ? 1.5 : 0.75);
       leaf.box(x - 25, plot.getMaxY() + 3, 50, 17)
           .align(TextAlign.CENTER)
-          .ink(Palette.INK)
           .line(Numbers.significant(tick, 1), 13, false);
     }
     leaf.box(plot.getMaxX() + 6, plot.getMinY() - NAMES_HEIGHT + 2, VALUE_WIDTH - 6, 17)
@@ -121,10 +126,10 @@ final class FleetPicture {
   }
 
   private void row(FleetRow row, double y) {
-    LevelShape.draw(slide, row.film().level(), plot.getMinX() - LABEL_WIDTH + 7, y, 10);
+    LevelShape.draw(slide, row.film().level(), plot.getMinX() - labelWidth + 7, y, 10);
     String label =
         Words.name(row.asset()) + " " + Words.name(row.bearing()) + " · " + Words.name(row.name());
-    leaf.box(plot.getMinX() - LABEL_WIDTH + 20, y - 9, LABEL_WIDTH - 28, TEXT * TextFit.LINE + 1)
+    leaf.box(plot.getMinX() - labelWidth + 20, y - 9, labelWidth - 28, TEXT * TextFit.LINE + 1)
         .line(label, TEXT, false);
     double floor = scale.x(row.floor());
     line(floor, y - rowHeight / 2 + 2, floor, y + rowHeight / 2 - 2, Palette.INK, 1);
@@ -162,39 +167,81 @@ final class FleetPicture {
 
   /** The bearings for which there is no row: their present κ alone, on one line. */
   private void others(List<FleetRow> rest, double y) {
-    leaf.box(plot.getMinX() - LABEL_WIDTH + 20, y - 9, LABEL_WIDTH - 28, TEXT * TextFit.LINE + 1)
+    leaf.box(plot.getMinX() - labelWidth + 20, y - 9, labelWidth - 28, TEXT * TextFit.LINE + 1)
         .line(rest.size() + " more, κ now", TEXT, false);
     for (FleetRow row : rest) {
       dot(scale.x(row.film().kappa()), y, Palette.wash(Palette.KAPPA, 0.7));
     }
   }
 
+  /** What a mark of the picture means. */
+  private enum Mark {
+    FRESH("fresh oil, as the charge began", 16),
+    OIL("what the oil took", 30),
+    HEAT("what temperature and speed took", 30),
+    NOW("κ now, 95 %", 32),
+    FLOOR("floor", 10);
+
+    private final String words;
+    private final double width;
+
+    Mark(String words, double width) {
+      this.words = words;
+      this.width = width;
+    }
+  }
+
+  private int legendLines() {
+    int lines = 1;
+    double x = 0;
+    for (Mark mark : Mark.values()) {
+      double width = width(mark);
+      if (x > 0 && x + width > leaf.room().getWidth()) {
+        lines++;
+        x = 0;
+      }
+      x += width + MARK_GAP;
+    }
+    return lines;
+  }
+
+  private double width(Mark mark) {
+    return mark.width + leaf.fit().width(mark.words, LEGEND_TEXT, false) + 2;
+  }
+
   private void legend() {
+    double left = leaf.room().getX();
     double y = plot.getMaxY() + AXIS_HEIGHT + LEGEND_HEIGHT / 2 + 3;
-    double x = leaf.room().getX();
-    dot(x + 6, y, Palette.PAPER);
-    x = named(x + 16, y, "fresh oil, as the charge began");
-    rect(x, y - STEP / 2, 24, STEP, Palette.wash(Palette.KAPPA, 0.7));
-    x = named(x + 30, y, "what the oil took");
-    hatch(rect(x, y - STEP / 2, 24, STEP, Palette.KAPPA));
-    x = named(x + 30, y, "what temperature and speed took");
-    line(x, y, x + 26, y, Palette.KAPPA, 1.5);
-    dot(x + 13, y, Palette.KAPPA);
-    x = named(x + 32, y, "κ now, 95 %");
-    line(x + 2, y - 7, x + 2, y + 7, Palette.INK, 1);
-    named(x + 8, y, "floor");
+    double x = left;
+    for (Mark mark : Mark.values()) {
+      double width = width(mark);
+      if (x > left && x + width > leaf.room().getMaxX()) {
+        x = left;
+        y += LEGEND_HEIGHT;
+      }
+      draw(mark, x, y);
+      leaf.box(x + mark.width, y - 8, width - mark.width, 17).line(mark.words, LEGEND_TEXT, false);
+      x += width + MARK_GAP;
+    }
+  }
+
+  private void draw(Mark mark, double x, double y) {
+    switch (mark) {
+      case FRESH -> dot(x + 6, y, Palette.PAPER);
+      case OIL -> rect(x, y - STEP / 2, 24, STEP, Palette.wash(Palette.KAPPA, 0.7));
+      case HEAT -> hatch(rect(x, y - STEP / 2, 24, STEP, Palette.KAPPA));
+      case NOW -> {
+        line(x, y, x + 26, y, Palette.KAPPA, 1.5);
+        dot(x + 13, y, Palette.KAPPA);
+      }
+      case FLOOR -> line(x + 3, y - 7, x + 3, y + 7, Palette.INK, 1);
+    }
   }
 
   private static void hatch(XSLFAutoShape bar) {
     Hatch.fill(bar, Palette.KAPPA, Palette.PAPER);
     bar.setLineColor(Palette.KAPPA);
     bar.setLineWidth(0.5);
-  }
-
-  private double named(double x, double y, String text) {
-    double width = leaf.fit().width(text, 13, false) + 2;
-    leaf.box(x, y - 8, width, 17).line(text, 13, false);
-    return x + width + 14;
   }
 
   private void dot(double x, double y, Color fill) {

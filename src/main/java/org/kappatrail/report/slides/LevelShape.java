@@ -1,6 +1,5 @@
 package org.kappatrail.report.slides;
 
-import java.awt.Color;
 import java.awt.geom.Path2D;
 import java.awt.geom.Rectangle2D;
 import org.apache.poi.sl.usermodel.ShapeType;
@@ -26,6 +25,7 @@ final class LevelShape {
       case ALARM -> {
         XSLFAutoShape mark = outline(slide, ShapeType.RECT, square);
         mark.setFillColor(Palette.INK);
+        Themed.ink(mark);
       }
     }
   }
@@ -34,9 +34,10 @@ final class LevelShape {
     XSLFAutoShape mark = slide.createAutoShape();
     mark.setShapeType(kind);
     mark.setAnchor(square);
-    mark.setFillColor(Color.WHITE);
+    mark.setFillColor(null);
     mark.setLineColor(Palette.INK);
     mark.setLineWidth(1.25);
+    Themed.ink(mark);
     return mark;
   }
 
@@ -51,5 +52,6 @@ final class LevelShape {
     mark.setFillColor(Palette.INK);
     mark.setLineColor(Palette.INK);
     mark.setLineWidth(0.5);
+    Themed.ink(mark);
   }
 }

@@ -25,7 +25,7 @@ final class QuestionPanel {
 
   static List<Question> questions(Decision decision) {
     return List.of(
-        new Question("Is the drop of viscosity real?", decision.real()),
+        new Question("Is the drop real?", decision.real()),
         new Question("Does an act pay?", decision.matters()),
         new Question("Is it the oil's doing?", decision.oilToBlame()),
         new Question("Would fresh oil cure it?", decision.curable()),

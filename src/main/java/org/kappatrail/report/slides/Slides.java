@@ -19,7 +19,6 @@ import org.kappatrail.review.Review;
  * per asset, method and cautions.
  */
 public final class Slides {
-  private static final double LEVELS_DOWN = 64;
   private static final double LEVEL_TEXT = 18;
 
   private final Review review;
@@ -106,7 +105,7 @@ public final class Slides {
                     + review.asOf(),
                 count(review.assets().size(), "asset") + ", " + count(bearings, "bearing")));
     double x = leaf.room().getX();
-    double y = leaf.room().getY() + LEVELS_DOWN;
+    double y = leaf.room().getY();
     for (Level level : List.of(Level.ALARM, Level.ALERT, Level.CLEAR)) {
       String text = count(level) + " " + level.label();
       double width = leaf.fit().width(text, LEVEL_TEXT, true) + 2;

@@ -85,7 +85,7 @@ final class Stage implements AutoCloseable {
     return fit;
   }
 
-  /** The opening slide. */
+  /** The opening slide; gives the room under its lines. */
   Leaf opening(String title, List<String> lines) {
     XSLFSlide slide = show.createSlide(layout(SlideLayout.TITLE));
     Optional<XSLFTextShape> under = find(slide, Placeholder.SUBTITLE);
@@ -109,9 +109,13 @@ final class Stage implements AutoCloseable {
     dropEmpty(slide, heading);
     Box box = new Box(slide, fit, room);
     for (int i = 0; i < lines.size(); i++) {
-      box.line(lines.get(i), i == 0 ? 22 : 18, false);
+      box.paragraph(lines.get(i), i == 0 ? 22 : 18, false, 2);
     }
-    return new Leaf(slide, fit, room);
+    double y = room.getY() + box.used() + 2 * GAP;
+    return new Leaf(
+        slide,
+        fit,
+        new Rectangle2D.Double(room.getX(), y, room.getWidth(), room.getMaxY() - y));
   }
 
   /** A slide with a headline. */

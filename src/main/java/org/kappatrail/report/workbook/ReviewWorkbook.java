@@ -8,6 +8,8 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
+import java.util.stream.Stream;
 import org.apache.commons.compress.archivers.zip.Zip64Mode;
 import org.apache.poi.ss.usermodel.Cell;
 import org.apache.poi.ss.usermodel.CellStyle;
@@ -17,6 +19,7 @@ import org.kappatrail.report.office.FixedZip;
 import org.kappatrail.report.office.OfficeProperties;
 import org.kappatrail.report.office.ShownText;
 import org.kappatrail.report.page.Numbers;
+import org.kappatrail.report.table.ReviewTables;
 import org.kappatrail.review.Review;
 import tech.tablesaw.api.Table;
 
@@ -28,6 +31,7 @@ public final class ReviewWorkbook {
   /** Rows beyond which a table is left to its CSV file: what still opens at once. */
   public static final int MOST_ROWS = 100_000;
 
+  private static final String DAILY = "kappa-daily";
   private static final int WINDOW_ROWS = 200;
   private static final int FLEET_FROZEN_COLUMNS = 2;
 
@@ -39,7 +43,7 @@ public final class ReviewWorkbook {
    * A workbook to be written.
    *
    * @param review what was found
-   * @param tables the tables of the pack
+   * @param tables the tables of the pack, the daily one apart
    */
   public ReviewWorkbook(Review review, List<Table> tables) {
     this(review, tables, MOST_ROWS);
@@ -66,16 +70,36 @@ public final class ReviewWorkbook {
       sheets.add(FleetTable.of(review), FLEET_FROZEN_COLUMNS);
       for (Table table : tables) {
         if (table.rowCount() > mostRows) {
-          leftOut(workbook, styles, table);
+          leftOut(workbook, styles, table.name(), table.rowCount());
         } else {
           sheets.add(table, namesInFront(table));
         }
       }
+      daily(workbook, styles, sheets);
       prose(workbook, styles, "about", AboutSheet.lines(review));
       OfficeProperties.set(workbook.getXSSFWorkbook().getProperties(), review, "Review");
       workbook.write(bytes);
     }
     return bytes.toByteArray();
+  }
+
+  /** The daily table is made part by part, and only where it has its place here. */
+  private void daily(SXSSFWorkbook workbook, Styles styles, TableSheet sheets) throws IOException {
+    long rows =
+        review.assets().stream()
+            .flatMap(asset -> asset.bearings().stream())
+            .mapToLong(bearing -> bearing.days().size())
+            .sum();
+    if (rows > mostRows) {
+      leftOut(workbook, styles, DAILY, rows);
+      return;
+    }
+    try (Stream<Table> parts = ReviewTables.kappaDaily(review)) {
+      Optional<Table> whole = parts.reduce(Table::append);
+      if (whole.isPresent()) {
+        sheets.add(whole.get(), namesInFront(whole.get()));
+      }
+    }
   }
 
   /** Asset and bearing stay in sight. */
@@ -89,19 +113,20 @@ public final class ReviewWorkbook {
     return count;
   }
 
-  private void leftOut(SXSSFWorkbook workbook, Styles styles, Table table) throws IOException {
+  private void leftOut(SXSSFWorkbook workbook, Styles styles, String table, long rows)
+      throws IOException {
     prose(
         workbook,
         styles,
-        table.name(),
+        table,
         List.of(
-            table.name(),
+            table,
             "This table has "
-                + Numbers.grouped(table.rowCount())
+                + Numbers.grouped((double) rows)
                 + " rows; tables of more than "
                 + Numbers.grouped(mostRows)
                 + " are not in the workbook.",
-            "All of it is in " + table.name() + ".csv beside this file."));
+            "All of it is in " + table + ".csv beside this file."));
   }
 
   /** A sheet of lines, the first of them its title. */
