@@ -127,9 +127,7 @@ final class TrendOnPanel {
               var line = charge.drift().line().orElseThrow();
               canvas.polyline(
                   new double[] {charge.from(), charge.to()},
-                  new double[] {
-                    Math.exp(line.at(charge.from())), Math.exp(line.at(charge.to()))
-                  },
+                  new double[] {Math.exp(line.at(charge.from())), Math.exp(line.at(charge.to()))},
                   Palette.wash(Palette.KAPPA, 0.8),
                   new BasicStroke(1f));
             });

@@ -19,7 +19,6 @@ import org.kappatrail.review.trend.FanPoint;
  */
 record ChartSpan(LocalDate from, LocalDate to) {
   private static final int MOST_YEARS = 3;
-  private static final int MOST_TICKS = 8;
   private static final int[] STEPS = {1, 2, 3, 4, 6, 12, 24, 60, 120};
 
   static Optional<ChartSpan> of(AssetReview asset) {
@@ -49,11 +48,11 @@ record ChartSpan(LocalDate from, LocalDate to) {
     return !day.isBefore(from) && !day.isAfter(to);
   }
 
-  /** Months between ticks, so that their labels have room. */
-  int stepMonths() {
+  /** Months between ticks, so that there are no more than have room for their labels. */
+  int stepMonths(int mostTicks) {
     long months = ChronoUnit.MONTHS.between(from, to) + 1;
     for (int step : STEPS) {
-      if (months <= (long) MOST_TICKS * step) {
+      if (months <= (long) mostTicks * step) {
         return step;
       }
     }

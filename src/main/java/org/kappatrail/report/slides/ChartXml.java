@@ -26,8 +26,11 @@ final class ChartXml {
   private static final String DATES = "yyyy-mm-dd";
 
   private static final double TEXT = 12;
-  static final double TITLE_TEXT = 14;
-  private static final double NARROW = 400;
+  private static final double TITLE_TEXT = 14;
+  private static final double LEGEND_KEY = 40;
+  private static final double TITLE_GAP = 30;
+  private static final double AXIS_ROOM = 40;
+  private static final double TICK_ROOM = 54;
   private static final double LEGEND_LINE = 22;
   private static final int EMU = 12_700;
 
@@ -40,19 +43,23 @@ final class ChartXml {
   private final Rectangle2D place;
   private final double legendFrom;
   private final double legendHeight;
+  private final int mostTicks;
   private final StringWriter text = new StringWriter();
   private final XMLStreamWriter xml;
 
-  /**
-   * The XML of a chart.
-   *
-   * @param legendFrom points from the left at which the legend begins, clear of the title
-   */
-  ChartXml(NativeChart chart, Rectangle2D place, double legendFrom) {
+  /** The XML of a chart that takes a place on a slide. */
+  ChartXml(NativeChart chart, Rectangle2D place, TextFit fit) {
     this.chart = chart;
     this.place = place;
-    this.legendFrom = legendFrom;
-    legendHeight = place.getWidth() < NARROW ? 2 * LEGEND_LINE : LEGEND_LINE;
+    legendFrom = fit.width(chart.title(), TITLE_TEXT, true) + TITLE_GAP;
+    double keys =
+        chart.series().stream()
+            .filter(ChartSeries::inLegend)
+            .mapToDouble(
+                item -> fit.width(chart.sheet().name(item.column()), TEXT, false) + LEGEND_KEY)
+            .sum();
+    legendHeight = (keys > place.getWidth() - legendFrom ? 2 : 1) * LEGEND_LINE;
+    mostTicks = (int) Math.max(2, (place.getWidth() - 2 * AXIS_ROOM) / TICK_ROOM);
     try {
       xml = XMLOutputFactory.newInstance().createXMLStreamWriter(text);
     } catch (XMLStreamException e) {
@@ -125,7 +132,12 @@ final class ChartXml {
     open("plotArea");
     double top = (legendHeight + 8) / place.getHeight();
     double foot = 24 / place.getHeight();
-    layout(true, 40 / place.getWidth(), top, 1 - 80 / place.getWidth(), 1 - top - foot);
+    layout(
+        true,
+        AXIS_ROOM / place.getWidth(),
+        top,
+        1 - 2 * AXIS_ROOM / place.getWidth(),
+        1 - top - foot);
     group("areaChart", ChartSeries.Kind.AREA, DAY_AXIS, LEFT_AXIS);
     group("lineChart", ChartSeries.Kind.LINE, DAY_AXIS, LEFT_AXIS);
     group("lineChart", ChartSeries.Kind.LINE_RIGHT, HIDDEN_DAY_AXIS, RIGHT_AXIS);
@@ -304,7 +316,7 @@ final class ChartXml {
     value("auto", "0");
     value("lblOffset", "50");
     value("baseTimeUnit", "days");
-    value("majorUnit", Integer.toString(chart.span().stepMonths()));
+    value("majorUnit", Integer.toString(chart.span().stepMonths(mostTicks)));
     value("majorTimeUnit", "months");
     close();
   }
@@ -388,6 +400,8 @@ final class ChartXml {
   private void textProperties(double points, Color ink, boolean strong) throws XMLStreamException {
     open("txPr");
     drawing("bodyPr");
+    attribute("rot", "0");
+    attribute("vert", "horz");
     close();
     drawing("p");
     drawing("pPr");

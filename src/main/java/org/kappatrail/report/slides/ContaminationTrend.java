@@ -51,8 +51,8 @@ final class ContaminationTrend {
           ChartSeries.line(sheet.add("water, mg/kg", water), Palette.WATER, 2).marked("circle"));
     }
     boolean right = !water.isEmpty();
-    particles(sheet, series, "≥ 6 µm, ISO 4406", fine, "diamond", right);
-    particles(sheet, series, "≥ 14 µm", coarse, "square", right);
+    particles(sheet, series, "code ≥ 6 µm", fine, "diamond", right);
+    particles(sheet, series, "code ≥ 14 µm", coarse, "square", right);
     List<Double> codes = new ArrayList<>(fine.values());
     codes.addAll(coarse.values());
     Optional<ValueAxis> axis =
@@ -71,7 +71,7 @@ final class ContaminationTrend {
     sheet.add("calendar", new TreeMap<>(java.util.Map.of(span.from(), 0.0, span.to(), 0.0)));
     return new NativeChart(
         "Contamination",
-        "Water and particles of the same samples against time; the numbers are in the chart's data"
+        "Water and cleanliness code (ISO 4406) of the same samples against time; the numbers are in the chart's data"
             + " sheet",
         sheet,
         series,

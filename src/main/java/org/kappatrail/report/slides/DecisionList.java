@@ -30,6 +30,8 @@ final class DecisionList {
   /** Shares of the width: asset, κ, verdict, why, due. */
   private static final double[] SHARES = {0.24, 0.14, 0.16, 0.33, 0.13};
 
+  private static final double[] NARROW_SHARES = {0.28, 0.15, 0.17, 0.25, 0.15};
+
   private static final String[] HEADERS = {"asset", "κ, 95 %", "verdict", "why", "due"};
 
   private final Stage stage;
@@ -85,10 +87,11 @@ final class DecisionList {
 
   private static void draw(Leaf leaf, List<AssetReview> assets, double rowHeight) {
     Rectangle2D room = leaf.room();
-    double[] x = new double[SHARES.length + 1];
+    double[] shares = room.getWidth() < NARROW ? NARROW_SHARES : SHARES;
+    double[] x = new double[shares.length + 1];
     x[0] = room.getX();
-    for (int i = 0; i < SHARES.length; i++) {
-      x[i + 1] = x[i] + SHARES[i] * room.getWidth();
+    for (int i = 0; i < shares.length; i++) {
+      x[i + 1] = x[i] + shares[i] * room.getWidth();
     }
     if (!assets.isEmpty()) {
       for (int i = 0; i < HEADERS.length; i++) {

@@ -213,6 +213,12 @@ final class FleetPicture {
     double left = leaf.room().getX();
     double y = plot.getMaxY() + AXIS_HEIGHT + LEGEND_HEIGHT / 2 + 3;
     double x = left;
+    rect(
+        left - 4,
+        plot.getMaxY() + AXIS_HEIGHT + 2,
+        leaf.room().getWidth() + 8,
+        legendLines() * LEGEND_HEIGHT,
+        Palette.PAPER);
     for (Mark mark : Mark.values()) {
       double width = width(mark);
       if (x > left && x + width > leaf.room().getMaxX()) {
@@ -220,7 +226,9 @@ final class FleetPicture {
         y += LEGEND_HEIGHT;
       }
       draw(mark, x, y);
-      leaf.box(x + mark.width, y - 8, width - mark.width, 17).line(mark.words, LEGEND_TEXT, false);
+      leaf.box(x + mark.width, y - 8, width - mark.width, 17)
+          .ink(Palette.INK)
+          .line(mark.words, LEGEND_TEXT, false);
       x += width + MARK_GAP;
     }
   }

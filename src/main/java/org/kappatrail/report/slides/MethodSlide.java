@@ -18,6 +18,7 @@ final class MethodSlide {
               + " uncertainty.",
           "What moved κ is split into oil, temperature and speed; the parts add up.",
           "An act is weighed by the failures it prevents (ISO 281 life) against its price.",
+          "Code: the scale number of ISO 4406 for particles of that size and above.",
           "Level: alarm where κ is below the floor, alert where its interval reaches below.");
 
   private static final List<String> CAUTIONS =

@@ -37,8 +37,6 @@ record NativeChart(
     ChartSpan span,
     ValueAxis left,
     Optional<ValueAxis> right) {
-  private static final double TITLE_GAP = 30;
-
   NativeChart {
     // In the order of the legend, which goes by kind: its entries are told by their number.
     series = series.stream().sorted(Comparator.comparing(ChartSeries::kind)).toList();
@@ -47,8 +45,7 @@ record NativeChart(
   void draw(Stage stage, Leaf leaf, Rectangle2D place) throws IOException {
     XSLFChart chart = stage.show().createChart();
     try {
-      double legendFrom = leaf.fit().width(title, ChartXml.TITLE_TEXT, true) + TITLE_GAP;
-      String xml = new ChartXml(this, place, legendFrom).text();
+      String xml = new ChartXml(this, place, leaf.fit()).text();
       chart.getCTChartSpace().set(ChartSpaceDocument.Factory.parse(xml).getChartSpace());
       XSSFWorkbook workbook = chart.getWorkbook();
       sheet.fill(workbook);

@@ -113,9 +113,7 @@ final class Stage implements AutoCloseable {
     }
     double y = room.getY() + box.used() + 2 * GAP;
     return new Leaf(
-        slide,
-        fit,
-        new Rectangle2D.Double(room.getX(), y, room.getWidth(), room.getMaxY() - y));
+        slide, fit, new Rectangle2D.Double(room.getX(), y, room.getWidth(), room.getMaxY() - y));
   }
 
   /** A slide with a headline. */
