@@ -40,10 +40,20 @@ final class HistoryLoad {
   private final LocalDate asOf;
 
   HistoryLoad(HistoryOptions options, Clock clock) {
+    this(options, clock, false);
+  }
+
+  /** A load of the whole fleet, whatever assets are named; the names are checked all the same. */
+  static HistoryLoad ofWholeFleet(HistoryOptions options, Clock clock) {
+    return new HistoryLoad(options, clock, true);
+  }
+
+  private HistoryLoad(HistoryOptions options, Clock clock, boolean wholeFleet) {
     folder = options.folder();
     intake =
         HistoryReader.read(folder, Optional.of(LocalDate.now(clock).plusDays(ZONE_MARGIN_DAYS)));
-    chosen = choose(intake.history(), options.assets());
+    PlantHistory named = choose(intake.history(), options.assets());
+    chosen = wholeFleet ? intake.history() : named;
     LocalDate given = options.asOf();
     asOf =
         given != null

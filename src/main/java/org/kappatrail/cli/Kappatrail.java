@@ -64,6 +64,7 @@ public final class Kappatrail implements Runnable {
         new CommandLine(this)
             .addSubcommand(new ReviewCommand(terminal))
             .addSubcommand(new CheckCommand(terminal))
+            .addSubcommand(new SlidesCommand(terminal))
             .addSubcommand(new WeighCommand(terminal))
             .addSubcommand(new PointCommand(terminal))
             .setOut(out)

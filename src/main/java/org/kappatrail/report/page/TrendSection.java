@@ -110,7 +110,9 @@ final class TrendSection {
         .element(
             "td class=\"n\"",
             low.isPresent() && high.isPresent() ? percent(low) + " – " + percent(high) : "")
-        .element("td class=\"n\"", drift.test().map(test -> Long.toString(test.s())).orElse(""))
+        .element(
+            "td class=\"n\"",
+            drift.score().isPresent() ? Long.toString(drift.score().getAsLong()) : "")
         .element("td class=\"n\"", Numbers.significant(drift.p(), 2))
         .element("td", drift.direction().label())
         .element("td", sum)
