@@ -108,7 +108,7 @@ final class Canvas {
   void text(String text, double x, double y, Color colour, float size) {
     g.setColor(colour);
     g.setFont(ChartFont.of(size));
-    g.drawString(text, (float) x, (float) y);
+    g.drawString(PlainText.of(text), (float) x, (float) y);
   }
 
   /** Text that ends at x. */

@@ -14,6 +14,7 @@ import org.knowm.xchart.XYChart;
 import org.knowm.xchart.XYChartBuilder;
 import org.knowm.xchart.XYSeries;
 import org.knowm.xchart.style.Styler.ChartTheme;
+import org.knowm.xchart.style.lines.SeriesLines;
 import org.knowm.xchart.style.markers.Marker;
 import org.knowm.xchart.style.markers.SeriesMarkers;
 
@@ -106,10 +107,7 @@ final class Panel {
     series.setLineStyle(
         width > 0
             ? new BasicStroke(width, BasicStroke.CAP_ROUND, BasicStroke.JOIN_ROUND)
-            : new BasicStroke(0));
-    if (width == 0) {
-      series.setLineColor(CLEAR);
-    }
+            : SeriesLines.NONE);
     return this;
   }
 
@@ -192,11 +190,12 @@ final class Panel {
   /** Writes the panel's title on paper, over whatever runs through; the origin as for painting. */
   void paintTitle(Graphics2D g) {
     g.setFont(ChartFont.bold(12.5f));
-    double width = g.getFontMetrics().stringWidth(label);
+    String shown = Fitted.to(g, label, 420);
+    double width = g.getFontMetrics().stringWidth(shown);
     g.setColor(Palette.PAPER);
     g.fill(new Rectangle2D.Double(LEFT, 1, width + 4, TOP - 3));
     g.setColor(colour);
-    g.drawString(label, LEFT, TOP - 6);
+    g.drawString(shown, LEFT, TOP - 6);
   }
 
   /** No marker. */

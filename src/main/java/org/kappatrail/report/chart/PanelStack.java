@@ -84,7 +84,7 @@ final class PanelStack implements Drawing {
     titles(g);
     g.setFont(ChartFont.of(11));
     g.setColor(Palette.QUIET_INK);
-    g.drawString(source, Panel.LEFT, height() - 12);
+    g.drawString(Fitted.to(g, source, WIDTH - Panel.LEFT - 20), Panel.LEFT, height() - 12);
   }
 
   private void titles(Graphics2D g) {
