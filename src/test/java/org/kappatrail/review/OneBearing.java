@@ -37,6 +37,7 @@ public final class OneBearing {
   private static final long DAY_MS = 86_400_000;
 
   private final String id;
+  private OptionalDouble volumeL = OptionalDouble.empty();
   private Asset asset;
   private Bearing bearing;
   private final List<Oil> oils = new ArrayList<>();
@@ -74,7 +75,7 @@ public final class OneBearing {
         "",
         oil,
         OilSupply.BATH,
-        OptionalDouble.empty(),
+        volumeL,
         OptionalDouble.empty(),
         change,
         cooling,
@@ -215,6 +216,27 @@ public final class OneBearing {
             OptionalDouble.empty(),
             Optional.empty(),
             ""));
+    return this;
+  }
+
+  /** A top-up of an oil that the record does not name. */
+  public OneBearing topUp(LocalDate date, double litres) {
+    events.add(
+        new Event(
+            id,
+            date,
+            EventKind.TOP_UP,
+            Optional.empty(),
+            OptionalDouble.of(litres),
+            Optional.empty(),
+            ""));
+    return this;
+  }
+
+  /** Volume of a charge, litres. */
+  public OneBearing volume(double litres) {
+    volumeL = OptionalDouble.of(litres);
+    asset = asset(asset.oil(), asset.changeCost(), asset.coolingCost(), asset.failureCost());
     return this;
   }
 

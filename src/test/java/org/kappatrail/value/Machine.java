@@ -27,6 +27,8 @@ final class Machine {
   private static final int[] GRADES = {68, 100, 150, 220, 320, 460};
   private static final double INDEX = 97;
   private static final double HOURS_PER_DAY = 24;
+  private static final double DYNAMIC_KN = 300;
+  private static final double STATIC_KN = 340;
 
   final String name;
   final Trouble trouble;
@@ -75,12 +77,11 @@ final class Machine {
       weather = 0.8 * weather + 0.6 * gaussian(random);
       warmth[day] = base + season * Math.cos(2 * Math.PI * (day + phase) / 365) + weather;
     }
-    double dynamic = 300;
-    double load = dynamic / Math.exp(random.nextDouble(Math.log(4.5), Math.log(9)));
+    double wanted = Math.exp(random.nextDouble(Math.log(40_000), Math.log(300_000)));
     made =
         new OneBearing(name)
             .oilInUse(oil(registered))
-            .bearing(pitch, rpm, dynamic, 340, load)
+            .bearing(pitch, rpm, DYNAMIC_KN, STATIC_KN, load(pitch, rpm, base, wanted))
             .costs(changeCost, coolingCost, failureCost);
     oils.values().stream().filter(o -> !o.id().equals(registered)).forEach(made::otherOil);
     bearing = made.bearing();
@@ -91,6 +92,28 @@ final class Machine {
   /** The thickest oil on the shelf. */
   String thickest() {
     return "mineral-" + GRADES[GRADES.length - 1];
+  }
+
+  /** The load under which fresh oil at the mean temperature gives a wanted L10mh. */
+  private double load(double pitch, double rpm, double temperature, double wantedH) {
+    Cleanliness clean = new OneBearing("load").cleanliness();
+    OilViscosity fresh = oil(registered).viscosity();
+    double kappa =
+        fresh.viscosityCst(temperature) / Iso281RatedViscosity.ratedViscosityCst(rpm, pitch);
+    double low = DYNAMIC_KN / 60;
+    double high = DYNAMIC_KN / 2;
+    for (int i = 0; i < 40; i++) {
+      double middle = Math.sqrt(low * high);
+      Bearing tried =
+          new OneBearing("load").bearing(pitch, rpm, DYNAMIC_KN, STATIC_KN, middle).bearing();
+      double hours = new BearingLife(tried).ratingLifeH(kappa, rpm, clean).orElseThrow();
+      if (hours > wantedH) {
+        low = middle;
+      } else {
+        high = middle;
+      }
+    }
+    return low;
   }
 
   Oil oil(String id) {
@@ -138,6 +161,16 @@ final class Machine {
     return OilViscosity.measured(
         AstmD7152Blend.viscosityCst(fresh.viscosity40Cst(), v40, share),
         AstmD7152Blend.viscosityCst(fresh.viscosity100Cst(), v100, share));
+  }
+
+  /**
+   * Fresh oil of the present grade has κ below 1 at the temperature that the machine ought to have.
+   */
+  boolean tooThinByDesign(Policy.State state) {
+    double kappa =
+        oil(state.oil()).viscosity().viscosityCst(warmth[state.day()])
+            / Iso281RatedViscosity.ratedViscosityCst(bearing.speedRpm(), bearing.pitchMm());
+    return kappa < 1;
   }
 
   /** Fraction of L10mh used up on a day. */

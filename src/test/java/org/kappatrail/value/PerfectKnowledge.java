@@ -18,7 +18,10 @@ final class PerfectKnowledge implements Policy {
     Deed best = Deed.NOTHING;
     double saved = 0;
     List<Deed> deeds = new ArrayList<>();
-    machine.oils.keySet().forEach(oil -> deeds.add(Deed.change(oil)));
+    deeds.add(Deed.change(state.oil()));
+    if (machine.tooThinByDesign(state)) {
+      machine.oils.keySet().forEach(oil -> deeds.add(Deed.change(oil)));
+    }
     deeds.add(Deed.COOL);
     for (Deed deed : deeds) {
       boolean cool = deed.kind() == Kind.COOL;

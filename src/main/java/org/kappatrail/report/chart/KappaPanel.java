@@ -76,6 +76,8 @@ final class KappaPanel {
                 axis(others))
             .under(this::washes)
             .under(canvas -> daily(canvas))
+            .under(new TrendOnPanel(shown)::under)
+            .over(new TrendOnPanel(shown)::over)
             .over(this::regimeNames)
             .over(this::floor)
             .over(this::whiskers);
@@ -103,6 +105,7 @@ final class KappaPanel {
               values.add(film.uncertainty().low());
               values.add(film.uncertainty().high());
             });
+    values.addAll(TrendOnPanel.values(shown));
     others.forEach(other -> films(other).forEach(film -> values.add(film.kappa())));
     shown.days().stream()
         .filter(day -> day.kappa().isPresent())

@@ -2,13 +2,11 @@ package org.kappatrail.review.trend;
 
 import java.time.LocalDate;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
-import java.util.Map;
-import java.util.NavigableMap;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.TreeMap;
-import org.apache.commons.math3.stat.descriptive.rank.Median;
 import org.jspecify.annotations.Nullable;
 import org.kappatrail.statistics.TheilSen;
 import org.kappatrail.tribology.OilSensitivity;
@@ -269,32 +267,51 @@ public final class Forecast {
   private OptionalDouble readLastYear(List<DayPoint> days) {
     long last = lastSample.toEpochDay();
     long from = last - YEAR_DAYS;
-    TreeMap<Long, DayPoint> byDay = new TreeMap<>();
-    days.forEach(day -> byDay.put(day.epochDay(), day));
-    var before = byDay.headMap(from + SMOOTH_DAYS, true);
-    if (before.isEmpty() || byDay.subMap(from, last + 1).size() < LEAST_RUNNING_DAYS) {
+    int first = firstFrom(days, from);
+    boolean reachesBack = !days.isEmpty() && days.get(0).epochDay() <= from + SMOOTH_DAYS;
+    if (!reachesBack || days.size() - first < LEAST_RUNNING_DAYS) {
       return OptionalDouble.empty();
     }
-    OptionalDouble then = median(byDay, from, SEASON_DAYS);
+    OptionalDouble then = median(days, from, SEASON_DAYS);
     if (then.isEmpty()) {
       return then;
     }
-    for (Map.Entry<Long, DayPoint> day : byDay.subMap(from + 1, last + 1).entrySet()) {
-      double temperature = median(byDay, day.getKey(), SMOOTH_DAYS).getAsDouble();
-      if (day.getValue().speedRpm() > 0) {
-        lastYear.put(day.getKey(), present.at(temperature, day.getValue().speedRpm()));
+    for (DayPoint day : days.subList(first, days.size())) {
+      if (day.epochDay() > from && day.speedRpm() > 0) {
+        double temperature = median(days, day.epochDay(), SMOOTH_DAYS).getAsDouble();
+        lastYear.put(day.epochDay(), present.at(temperature, day.speedRpm()));
       }
     }
     return then;
   }
 
-  private static OptionalDouble median(NavigableMap<Long, DayPoint> days, long centre, int width) {
-    double[] around =
-        days.subMap(centre - width / 2, centre + width / 2 + 1).values().stream()
-            .mapToDouble(DayPoint::temperatureC)
-            .toArray();
+  /** Place of the first day from a day on; the days are in time. */
+  private static int firstFrom(List<DayPoint> days, long epochDay) {
+    int low = 0;
+    int high = days.size();
+    while (low < high) {
+      int middle = (low + high) / 2;
+      if (days.get(middle).epochDay() < epochDay) {
+        low = middle + 1;
+      } else {
+        high = middle;
+      }
+    }
+    return low;
+  }
+
+  private static OptionalDouble median(List<DayPoint> days, long centre, int width) {
+    int from = firstFrom(days, centre - width / 2);
+    int to = firstFrom(days, centre + width / 2 + 1);
+    double[] around = new double[to - from];
+    for (int i = from; i < to; i++) {
+      around[i - from] = days.get(i).temperatureC();
+    }
+    Arrays.sort(around);
+    int half = around.length / 2;
     return around.length == 0
         ? OptionalDouble.empty()
-        : OptionalDouble.of(new Median().evaluate(around));
+        : OptionalDouble.of(
+            around.length % 2 == 1 ? around[half] : (around[half - 1] + around[half]) / 2);
   }
 }
