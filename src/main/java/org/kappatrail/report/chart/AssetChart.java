@@ -95,6 +95,7 @@ public final class AssetChart {
                 + " of the oil at the present operating point",
             span,
             EventMark.of(asset));
+    stack.samples(asset.samples());
     Optional<BearingReview> shown = shown(asset);
     shown.ifPresent(bearing -> KappaPanel.of(asset, bearing, span).ifPresent(stack::add));
     stack.add(viscosity());

@@ -99,6 +99,18 @@ final class Canvas {
     g.draw(ring);
   }
 
+  /** A filled diamond, place and half width in px. */
+  void diamond(double x, double y, double half, Color colour) {
+    Path2D shape = new Path2D.Double();
+    shape.moveTo(x, y - half);
+    shape.lineTo(x + half, y);
+    shape.lineTo(x, y + half);
+    shape.lineTo(x - half, y);
+    shape.closePath();
+    g.setColor(colour);
+    g.fill(shape);
+  }
+
   void line(double x1, double y1, double x2, double y2, Color colour, BasicStroke stroke) {
     g.setColor(colour);
     g.setStroke(stroke);

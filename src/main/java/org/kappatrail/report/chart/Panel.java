@@ -34,6 +34,7 @@ final class Panel {
   private final XYChart chart;
   private final TimeSpan span;
   private int seriesCount;
+  private String note = "";
   private Consumer<Canvas> under = canvas -> {};
   private Consumer<Canvas> over = canvas -> {};
 
@@ -108,6 +109,12 @@ final class Panel {
         width > 0
             ? new BasicStroke(width, BasicStroke.CAP_ROUND, BasicStroke.JOIN_ROUND)
             : SeriesLines.NONE);
+    return this;
+  }
+
+  /** Says something at the right of the panel's title. */
+  Panel note(String text) {
+    note = text;
     return this;
   }
 
@@ -188,7 +195,7 @@ final class Panel {
   }
 
   /** Writes the panel's title on paper, over whatever runs through; the origin as for painting. */
-  void paintTitle(Graphics2D g) {
+  void paintTitle(Graphics2D g, int panelWidth) {
     g.setFont(ChartFont.bold(12.5f));
     String shown = Fitted.to(g, label, 420);
     double width = g.getFontMetrics().stringWidth(shown);
@@ -196,6 +203,19 @@ final class Panel {
     g.fill(new Rectangle2D.Double(LEFT, 1, width + 4, TOP - 3));
     g.setColor(colour);
     g.drawString(shown, LEFT, TOP - 6);
+    if (!note.isEmpty()) {
+      paintNote(g, panelWidth - RIGHT, panelWidth - RIGHT - LEFT - width - 24);
+    }
+  }
+
+  private void paintNote(Graphics2D g, double right, double room) {
+    g.setFont(ChartFont.of(11f));
+    String text = Fitted.to(g, note, room);
+    double width = g.getFontMetrics().stringWidth(text);
+    g.setColor(Palette.PAPER);
+    g.fill(new Rectangle2D.Double(right - width - 2, 1, width + 4, TOP - 3));
+    g.setColor(Palette.QUIET_INK);
+    g.drawString(text, (float) (right - width), TOP - 6);
   }
 
   /** No marker. */
