@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.Comparator;
 import java.util.List;
 import java.util.Map;
@@ -13,6 +14,7 @@ import java.util.stream.Stream;
 import org.kappatrail.report.chart.AssetChart;
 import org.kappatrail.report.chart.ChartFiles;
 import org.kappatrail.report.chart.Drawing;
+import org.kappatrail.report.chart.FleetChart;
 import org.kappatrail.report.page.FileNames;
 import org.kappatrail.report.page.Page;
 import org.kappatrail.report.table.CsvFile;
@@ -91,6 +93,8 @@ public final class Pack {
                   new Job(
                       asset.asset().id(), names.getOrDefault(asset.asset().id(), "asset"), found)));
     }
+    FleetChart.of(review)
+        .ifPresent(found -> jobs.add(new Job("", freeName("fleet", names.values()), found)));
     List<Result> results = jobs.parallelStream().map(job -> draw(job, place)).toList();
     int done = 0;
     for (Result result : results) {
@@ -101,6 +105,15 @@ public final class Pack {
       progress.at("charts", ++done, results.size());
     }
     return pictures;
+  }
+
+  /** A file name that no asset's chart has, under any case. */
+  private static String freeName(String wanted, Collection<String> taken) {
+    String name = wanted;
+    for (int n = 2; taken.stream().anyMatch(name::equalsIgnoreCase); n++) {
+      name = wanted + "-" + n;
+    }
+    return name;
   }
 
   private record Job(String asset, String fileName, Drawing drawing) {}

@@ -99,6 +99,14 @@ final class Canvas {
     g.draw(ring);
   }
 
+  /** A bar from one place to another, centred on a height, px. */
+  void bar(double from, double to, double y, double thick, Color colour) {
+    double left = Math.min(from, to);
+    double right = Math.max(from, to);
+    g.setColor(colour);
+    g.fill(new Rectangle2D.Double(left, y - thick / 2, right - left, thick));
+  }
+
   /** A filled diamond, place and half width in px. */
   void diamond(double x, double y, double half, Color colour) {
     Path2D shape = new Path2D.Double();

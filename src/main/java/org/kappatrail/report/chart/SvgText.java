@@ -91,7 +91,8 @@ final class SvgText {
         .append(width)
         .append(' ')
         .append(height)
-        .append("\" fill=\"none\" stroke=\"none\" stroke-linecap=\"square\"");
+        .append("\" fill=\"none\" stroke=\"none\" stroke-linecap=\"square\"")
+        .append(" font-size=\"12\"");
     font = firstFont(root);
     if (!font.isEmpty()) {
       out.append(" font-family=\"").append(escape(font)).append(", sans-serif\"");
