@@ -1,25 +1,19 @@
 package org.kappatrail.report;
 
 import java.io.IOException;
+import java.io.InterruptedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.ArrayList;
-import java.util.Collection;
-import java.util.Comparator;
+import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
-import java.util.stream.Stream;
-import org.kappatrail.report.chart.AssetChart;
 import org.kappatrail.report.chart.ChartFiles;
-import org.kappatrail.report.chart.Drawing;
-import org.kappatrail.report.chart.FleetChart;
-import org.kappatrail.report.page.FileNames;
 import org.kappatrail.report.page.Page;
+import org.kappatrail.report.page.Pictures;
 import org.kappatrail.report.table.CsvFile;
 import org.kappatrail.report.table.ReviewTables;
-import org.kappatrail.review.AssetReview;
 import org.kappatrail.review.Progress;
 import org.kappatrail.review.Review;
 import tech.tablesaw.api.Table;
@@ -56,107 +50,61 @@ public final class Pack {
    * @return the pack's folder
    */
   public Path writeTo(Path directory) throws IOException {
-    Files.createDirectories(directory);
-    Path place = directory.resolve(review.asOf().toString());
-    Path fresh = Files.createTempDirectory(directory, "." + review.asOf() + ".new-");
-    try {
-      write(fresh);
-      swap(fresh, place);
-    } finally {
-      deleteTree(fresh);
+    try (Draft draft = new Draft(directory, review.asOf())) {
+      write(draft.pack());
+      return draft.publish();
     }
-    return place;
   }
 
   private void write(Path folder) throws IOException {
+    progress.at("tables and page", 0, 1);
     for (Table table : ReviewTables.all(review)) {
       CsvFile.write(table, folder.resolve(table.name() + ".csv"));
     }
     CsvFile.write(ReviewTables.kappaDaily(review), folder.resolve("kappa-daily.csv"));
     manifest.write(folder.resolve("manifest.json"), review);
-    Map<String, String> pictures = charts ? writeCharts(folder) : Map.of();
-    Files.writeString(folder.resolve("index.html"), new Page(review, pictures).html());
+    Pictures pictures = charts ? writeCharts(folder) : Pictures.none();
+    new Page(review, pictures).write(folder.resolve("index.html"));
   }
 
-  /** Writes the charts and gives each asset's SVG text for the page. */
-  private Map<String, String> writeCharts(Path folder) throws IOException {
+  /** Writes the charts and gives their SVG texts for the page. */
+  private Pictures writeCharts(Path folder) throws IOException {
     Path place = Files.createDirectory(folder.resolve("charts"));
-    List<AssetReview> assets = review.assets();
-    Map<String, String> names = FileNames.of(assets.stream().map(a -> a.asset().id()).toList());
-    Map<String, String> pictures = new TreeMap<>();
-    List<Job> jobs = new ArrayList<>();
-    for (AssetReview asset : assets) {
-      Optional<Drawing> drawing = AssetChart.of(review, asset);
-      drawing.ifPresent(
-          found ->
-              jobs.add(
-                  new Job(
-                      asset.asset().id(), names.getOrDefault(asset.asset().id(), "asset"), found)));
-    }
-    FleetChart.of(review)
-        .ifPresent(found -> jobs.add(new Job("", freeName("fleet", names.values()), found)));
-    List<Result> results = jobs.parallelStream().map(job -> draw(job, place)).toList();
+    List<ChartJob> jobs = ChartJob.of(review);
+    Thread caller = Thread.currentThread();
+    List<Result> results = jobs.parallelStream().map(job -> draw(job, place, caller)).toList();
+    Map<ChartJob.Kind, Map<String, String>> texts = new EnumMap<>(ChartJob.Kind.class);
     int done = 0;
     for (Result result : results) {
       if (result.failure().isPresent()) {
         throw result.failure().get();
       }
-      pictures.put(result.asset(), result.svg());
+      texts
+          .computeIfAbsent(result.job().kind(), kind -> new TreeMap<>())
+          .put(result.job().subject(), result.svg());
       progress.at("charts", ++done, results.size());
     }
-    return pictures;
+    return new Pictures(
+        texts.getOrDefault(ChartJob.Kind.TRAIL, Map.of()),
+        texts.getOrDefault(ChartJob.Kind.CORRELATION, Map.of()),
+        texts
+            .getOrDefault(ChartJob.Kind.FLEET_CORRELATION, Map.of())
+            .getOrDefault(ChartJob.FLEET, ""));
   }
 
-  /** A file name that no asset's chart has, under any case. */
-  private static String freeName(String wanted, Collection<String> taken) {
-    String name = wanted;
-    for (int n = 2; taken.stream().anyMatch(name::equalsIgnoreCase); n++) {
-      name = wanted + "-" + n;
-    }
-    return name;
-  }
+  private record Result(ChartJob job, String svg, Optional<IOException> failure) {}
 
-  private record Job(String asset, String fileName, Drawing drawing) {}
-
-  private record Result(String asset, String svg, Optional<IOException> failure) {}
-
-  private static Result draw(Job job, Path place) {
+  private static Result draw(ChartJob job, Path place, Thread caller) {
     try {
+      if (caller.isInterrupted()) {
+        throw new InterruptedIOException("the drawing of charts was stopped");
+      }
       String svg = ChartFiles.svg(job.drawing());
       Files.writeString(place.resolve(job.fileName() + ".svg"), svg);
       ChartFiles.writePng(job.drawing(), place.resolve(job.fileName() + ".png"));
-      return new Result(job.asset(), svg, Optional.empty());
+      return new Result(job, svg, Optional.empty());
     } catch (IOException e) {
-      return new Result(job.asset(), "", Optional.of(e));
-    }
-  }
-
-  private static void swap(Path fresh, Path place) throws IOException {
-    if (!Files.exists(place)) {
-      Files.move(fresh, place);
-      return;
-    }
-    Path old = Files.createTempDirectory(place.getParent(), "." + place.getFileName() + ".old-");
-    Path aside = old.resolve("pack");
-    Files.move(place, aside);
-    try {
-      Files.move(fresh, place);
-    } catch (IOException e) {
-      Files.move(aside, place);
-      throw e;
-    } finally {
-      deleteTree(old);
-    }
-  }
-
-  private static void deleteTree(Path folder) throws IOException {
-    if (!Files.exists(folder)) {
-      return;
-    }
-    try (Stream<Path> tree = Files.walk(folder)) {
-      for (Path path : tree.sorted(Comparator.reverseOrder()).toList()) {
-        Files.delete(path);
-      }
+      return new Result(job, "", Optional.of(e));
     }
   }
 }

@@ -1,7 +1,5 @@
 package org.kappatrail.report.page;
 
-import java.nio.charset.StandardCharsets;
-import java.util.Base64;
 import java.util.List;
 import java.util.Optional;
 import org.kappatrail.history.Sample;
@@ -19,11 +17,20 @@ final class AssetSection {
   private final AssetReview asset;
   private final String anchor;
   private final String picture;
+  private final boolean earlierSamples;
+  private final CorrelationSection correlations;
 
-  AssetSection(AssetReview asset, String anchor, String picture) {
+  AssetSection(
+      AssetReview asset,
+      String anchor,
+      String picture,
+      boolean earlierSamples,
+      CorrelationSection correlations) {
     this.asset = asset;
     this.anchor = anchor;
     this.picture = picture;
+    this.earlierSamples = earlierSamples;
+    this.correlations = correlations;
   }
 
   void write(Html html) {
@@ -34,12 +41,20 @@ final class AssetSection {
         .text(asset.asset().name().equals(asset.asset().id()) ? "" : asset.asset().name())
         .raw("</span></h2>\n");
     html.element("p class=\"note\"", facts());
-    picture(html);
+    if (!asset.story().isEmpty()) {
+      html.element("p class=\"story\"", String.join(" ", asset.story())).raw("\n");
+    }
+    new ChartFigure(asset, picture).write(html);
     findings(html);
+    new DecisionSection(asset).write(html);
+    TrendSection.lastChange(html, asset);
     for (BearingReview bearing : asset.bearings()) {
       samples(html, bearing);
+      TrendSection.write(html, bearing);
       working(html, bearing);
     }
+    html.element("h3", "What goes with what").raw("\n");
+    correlations.write(html, asset.asset().id());
     html.raw("</section>\n");
   }
 
@@ -53,22 +68,6 @@ final class AssetSection {
         + "; "
         + asset.samples().size()
         + (asset.samples().size() == 1 ? " sample" : " samples");
-  }
-
-  private void picture(Html html) {
-    if (picture.isEmpty()) {
-      return;
-    }
-    String data = Base64.getEncoder().encodeToString(picture.getBytes(StandardCharsets.UTF_8));
-    html.raw("<figure><img loading=\"lazy\" alt=\"")
-        .text(
-            "κ of "
-                + asset.asset().id()
-                + " against time, with viscosity, temperature and"
-                + " contamination; the numbers are in the tables below")
-        .raw("\" src=\"data:image/svg+xml;base64,")
-        .raw(data)
-        .raw("\"></figure>\n");
   }
 
   private void findings(Html html) {
@@ -99,7 +98,9 @@ final class AssetSection {
     html.raw("<h3>").text("Bearing " + bearing.bearing().id()).raw("</h3>\n");
     int from = Math.max(0, trail.size() - SHOWN_SAMPLES);
     table(html, trail.subList(from, trail.size()));
-    if (from > 0) {
+    if (from > 0 && !earlierSamples) {
+      html.element("p class=\"note\"", from + " earlier samples are in kappa-history.csv.");
+    } else if (from > 0) {
       html.raw("<details><summary>").text(from + " earlier samples").raw("</summary>\n");
       table(html, trail.subList(0, from));
       html.raw("</details>\n");
@@ -107,7 +108,8 @@ final class AssetSection {
   }
 
   private static void table(Html html, List<KappaPoint> points) {
-    html.raw("<div class=\"scroll\"><table class=\"samples\">\n<thead><tr><th>sample</th>")
+    html.raw(
+            "<div class=\"scroll\"><table class=\"samples\" data-name=\"samples\">\n<thead><tr><th>sample</th>")
         .raw("<th>drawn</th><th class=\"n\">charge</th><th class=\"n\">oil hours</th>")
         .raw("<th class=\"n\">ν40, mm²/s</th><th class=\"n\">T, °C</th>")
         .raw("<th class=\"n\">n, r/min</th><th class=\"n\">ν, mm²/s</th>")

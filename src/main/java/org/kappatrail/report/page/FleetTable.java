@@ -28,6 +28,7 @@ final class FleetTable {
           html.raw("<div class=\"scroll\"><table class=\"fleet\">\n<thead><tr>")
               .raw("<th>asset</th><th>bearing</th><th class=\"n\">κ</th>")
               .raw("<th class=\"n\">95 % interval</th><th>regime</th><th>level</th>")
+              .raw("<th>κ over its samples</th><th>verdict</th>")
               .raw(
                   "<th class=\"n\">κ since the sample before</th><th class=\"n\">water, mg/kg</th>")
               .raw("<th>code</th><th class=\"n\">mixed regime, h</th><th>last sample</th>")
@@ -64,6 +65,10 @@ final class FleetTable {
         .element("td class=\"n\"", film.map(FleetTable::interval).orElse(""))
         .element("td class=\"word\"", film.map(known -> known.regime().label()).orElse(""))
         .raw("<td>" + film.map(known -> LevelMark.of(known.level())).orElse("no κ") + "</td>")
+        .raw("<td>" + governing.map(Sparkline::of).orElse("") + "</td>")
+        .element(
+            "td class=\"word\"",
+            asset.decision().map(decision -> decision.verdict().label()).orElse(""))
         .element("td class=\"n\"", governing.map(FleetTable::change).orElse(""))
         .element(
             "td class=\"n\"",

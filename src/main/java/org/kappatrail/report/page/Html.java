@@ -1,5 +1,9 @@
 package org.kappatrail.report.page;
 
+import java.io.IOException;
+import java.io.UncheckedIOException;
+import java.io.Writer;
+
 /** Writes HTML; every text goes through {@link #escape}. */
 final class Html {
   private final StringBuilder text = new StringBuilder();
@@ -50,6 +54,16 @@ final class Html {
     raw("<" + tag + ">");
     body.run();
     return raw("</" + name + ">\n");
+  }
+
+  /** Hands over what was added since the last time, so that a large page is never held whole. */
+  void drainTo(Writer out) {
+    try {
+      out.append(text);
+    } catch (IOException e) {
+      throw new UncheckedIOException(e);
+    }
+    text.setLength(0);
   }
 
   @Override

@@ -3,36 +3,54 @@ package org.kappatrail.report.page;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.UncheckedIOException;
+import java.io.Writer;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
+import java.util.TreeMap;
 import org.kappatrail.history.Problem;
 import org.kappatrail.review.AssetReview;
 import org.kappatrail.review.Level;
 import org.kappatrail.review.Review;
+import org.kappatrail.review.correlation.PairCorrelation;
 
 /** The review as one self-contained page: nothing is loaded from anywhere. */
 public final class Page {
   private static final int MOST_PROBLEMS = 200;
 
+  /**
+   * Rows of samples beyond which earlier ones are left to the table: what a browser still opens.
+   */
+  private static final long MOST_SAMPLE_ROWS = 20_000;
+
   private final Review review;
-  private final Map<String, String> pictures;
+  private final Pictures pictures;
   private final Map<String, String> anchors;
 
   /**
    * A page.
    *
    * @param review what was found
-   * @param pictures SVG text of an asset's chart by asset; an asset without one gets none
+   * @param pictures its pictures
    */
-  public Page(Review review, Map<String, String> pictures) {
+  public Page(Review review, Pictures pictures) {
     this.review = review;
-    this.pictures = Map.copyOf(pictures);
+    this.pictures = pictures;
     this.anchors = FileNames.of(review.assets().stream().map(asset -> asset.asset().id()).toList());
   }
 
-  /** The page's text. */
-  public String html() {
+  /** Writes the page asset by asset. */
+  public void write(Path file) throws IOException {
+    try (Writer out = Files.newBufferedWriter(file)) {
+      write(out);
+    } catch (UncheckedIOException e) {
+      throw e.getCause();
+    }
+  }
+
+  private void write(Writer out) {
     Html html = new Html();
     String site = review.settings().site();
     String title = (site.isEmpty() ? "Oil film review" : site + ": oil film review");
@@ -46,18 +64,51 @@ public final class Page {
         .raw(resource("page.css"))
         .raw("</style>\n</head>\n<body>\n");
     html.around("header", () -> head(html, title));
+    boolean earlierSamples = sampleRows() <= MOST_SAMPLE_ROWS;
     html.around(
         "main",
         () -> {
+          review.since().ifPresent(since -> new SinceSection(since, links()).write(html));
           new FleetTable(review, anchors).write(html);
+          Map<String, List<PairCorrelation>> correlations = review.correlations().byAsset();
           for (AssetReview asset : review.worstFirst()) {
-            new AssetSection(asset, anchorOf(asset), pictures.getOrDefault(asset.asset().id(), ""))
+            String id = asset.asset().id();
+            new AssetSection(
+                    asset,
+                    anchorOf(asset),
+                    pictures.assets().getOrDefault(id, ""),
+                    earlierSamples,
+                    new CorrelationSection(
+                        correlations.getOrDefault(id, List.of()),
+                        pictures.correlations().getOrDefault(id, ""),
+                        false))
                 .write(html);
+            html.drainTo(out);
           }
+          html.around("section id=\"correlations\"", () -> fleetCorrelations(html));
           problems(html);
           html.raw(resource("method.html"));
         });
-    return html.raw("</body>\n</html>\n").toString();
+    html.raw("</body>\n</html>\n").drainTo(out);
+  }
+
+  private long sampleRows() {
+    return review.assets().stream()
+        .flatMap(asset -> asset.bearings().stream())
+        .mapToLong(bearing -> bearing.trail().size())
+        .sum();
+  }
+
+  private Map<String, String> links() {
+    Map<String, String> links = new TreeMap<>();
+    anchors.forEach((asset, anchor) -> links.put(asset, "#" + anchor));
+    return links;
+  }
+
+  private void fleetCorrelations(Html html) {
+    html.element("h2", "What goes with what in the fleet").raw("\n");
+    new CorrelationSection(review.correlations().fleet(), pictures.fleetCorrelation(), true)
+        .write(html, "the fleet");
   }
 
   private String anchorOf(AssetReview asset) {
