@@ -65,6 +65,7 @@ public final class Kappatrail implements Runnable {
             .addSubcommand(new ReviewCommand(terminal))
             .addSubcommand(new CheckCommand(terminal))
             .addSubcommand(new WeighCommand(terminal))
+            .addSubcommand(new AdoptCommand(terminal))
             .addSubcommand(new PointCommand(terminal))
             .setOut(out)
             .setErr(err)
