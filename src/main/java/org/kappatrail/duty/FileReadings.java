@@ -69,8 +69,8 @@ final class FileReadings {
         .replace("{common}", columns.common())
         .replace("{asset}", columns.text(LogLayout.ASSET))
         .replace("{bearing}", columns.text(LogLayout.BEARING))
-        .replace("{temperature_text}", columns.text(LogLayout.TEMPERATURE))
-        .replace("{speed_text}", columns.text(LogLayout.SPEED))
+        .replace("{temperature_text}", columns.value(LogLayout.TEMPERATURE))
+        .replace("{speed_text}", columns.value(LogLayout.SPEED))
         .replace("{quality}", columns.text(LogLayout.QUALITY))
         .replace(
             "{temperature}",

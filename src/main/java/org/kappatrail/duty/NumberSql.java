@@ -31,13 +31,13 @@ final class NumberSql {
   /** The column as a floating point number; NULL where it is none. */
   static String number(String column, String type, ExportMapping mapping, String place) {
     if (isNumeric(type)) {
-      return "CAST(" + column + " AS DOUBLE)";
+      return MissingSql.withoutNamedNumber("CAST(" + column + " AS DOUBLE)", mapping);
     }
     if (!type.equals(LogTable.TEXT)) {
       throw new UnusableInputException(
           place + ": a column of type " + type + " holds no numbers; give a number or a text");
     }
-    String text = column;
+    String text = MissingSql.withoutNamed(column, mapping);
     if (mapping.thousands().isPresent()) {
       text = "replace(" + text + ", " + SqlText.literal(mapping.thousands().get()) + ", '')";
     }

@@ -54,6 +54,21 @@ final class TableColumns {
     return "CAST(" + FileScan.column(group.shape(), index) + " AS VARCHAR)";
   }
 
+  /** The text of a column of numbers; NULL where the settings take it for missing. */
+  String value(String canonical) {
+    Optional<Integer> index = layout.find(canonical);
+    return index.isPresent() && layout.constant(canonical).isEmpty()
+        ? value(index.get())
+        : text(canonical);
+  }
+
+  String value(int index) {
+    String column = FileScan.column(group.shape(), index);
+    return NumberSql.isNumeric(group.shape().types().get(index))
+        ? "CAST(" + MissingSql.withoutNamedNumber(column, mapping) + " AS VARCHAR)"
+        : MissingSql.withoutNamed(text(index), mapping);
+  }
+
   /** A canonical column as a number in the unit of the file. */
   String number(String canonical) {
     Optional<Integer> index = layout.find(canonical);

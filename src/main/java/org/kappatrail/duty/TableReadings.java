@@ -166,7 +166,7 @@ final class TableReadings {
               + column.get().type()
               + " and no number; make a view with numbers and name that");
     }
-    return engine.number(column.get().quoted());
+    return MissingSql.withoutNamedNumber(engine.number(column.get().quoted()), mapping);
   }
 
   private String text(String canonical) {

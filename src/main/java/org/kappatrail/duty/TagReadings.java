@@ -107,6 +107,11 @@ final class TagReadings {
     }
   }
 
+  /** A missing value is an empty cell here, so that the value before it is held. */
+  private String value(int index) {
+    return MissingSql.withoutUsual(columns.value(index));
+  }
+
   private String cells(BearingKey bearing, Map<Tag.Quantity, Integer> found) {
     return cells(key(bearing), found);
   }
@@ -118,13 +123,13 @@ final class TagReadings {
     return "{'bearing': "
         + key
         + ", 'temperature_text': "
-        + temperature.map(columns::text).orElse("CAST(NULL AS VARCHAR)")
+        + temperature.map(this::value).orElse("CAST(NULL AS VARCHAR)")
         + ", 'temperature_c': "
         + temperature
             .map(index -> NumberSql.celsius(columns.number(index), mapping))
             .orElse("CAST(NULL AS DOUBLE)")
         + ", 'speed_text': "
-        + speed.map(columns::text).orElse("CAST(NULL AS VARCHAR)")
+        + speed.map(this::value).orElse("CAST(NULL AS VARCHAR)")
         + ", 'speed_rpm': "
         + speed
             .map(index -> NumberSql.rpm(columns.number(index), mapping))
@@ -167,7 +172,7 @@ final class TagReadings {
         .replace("{common}", columns.common())
         .replace("{quality}", columns.text(LogLayout.QUALITY))
         .replace("{tag}", columns.text(LogLayout.TAG))
-        .replace("{value_text}", columns.text(LogLayout.VALUE))
+        .replace("{value_text}", MissingSql.withoutUsual(columns.value(LogLayout.VALUE)))
         .replace("{number}", columns.number(LogLayout.VALUE))
         .replace("{tags}", tags)
         .replace("{scan}", scan);

@@ -26,6 +26,7 @@ judged AS (
       WHEN mark > 0 THEN mark
       WHEN temperature IS NULL AND trim(temperature_text) <> '' THEN {no_temperature}
       WHEN rank = 0 AND temperature IS NULL AND tag_text IS NOT NULL THEN 9
+      WHEN rank = 1 AND speed IS NULL AND COALESCE(trim(speed_text), '') = '' THEN 9
       ELSE 0
     END AS own_fault,
     {flaw} AS flaw

@@ -1,6 +1,7 @@
 package org.kappatrail.duty;
 
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
@@ -16,6 +17,7 @@ final class Block {
   private final Map<String, String> constants = new LinkedHashMap<>();
   private final Map<String, Tag> tags = new LinkedHashMap<>();
   private final Map<String, String> texts = new LinkedHashMap<>();
+  private List<String> missing = List.of();
   private boolean decimalComma;
   private int skipLines;
   private int headerRows = 1;
@@ -54,6 +56,11 @@ final class Block {
     return this;
   }
 
+  Block missing(String... markers) {
+    missing = List.of(markers);
+    return this;
+  }
+
   Block decimalComma() {
     decimalComma = true;
     return this;
@@ -83,7 +90,8 @@ final class Block {
         constants,
         Optional.empty(),
         text("timezone"),
-        tags);
+        tags,
+        missing);
   }
 
   private Optional<String> text(String key) {
