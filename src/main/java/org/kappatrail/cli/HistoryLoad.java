@@ -38,7 +38,16 @@ final class HistoryLoad {
   private final PlantHistory chosen;
   private final LocalDate asOf;
 
+  /**
+   * Reads what is to be reviewed.
+   *
+   * @throws UnusableInputException where there is no day that the review could be made for
+   */
   HistoryLoad(HistoryOptions options, Clock clock) {
+    this(options, clock, Optional.empty());
+  }
+
+  private HistoryLoad(HistoryOptions options, Clock clock, Optional<LocalDate> otherwise) {
     folder = options.folder();
     intake =
         HistoryReader.read(folder, Optional.of(LocalDate.now(clock).plusDays(ZONE_MARGIN_DAYS)));
@@ -48,6 +57,7 @@ final class HistoryLoad {
         given != null
             ? given
             : Reviewer.latestSampling(intake.history())
+                .or(() -> otherwise)
                 .orElseThrow(
                     () ->
                         new UnusableInputException(
@@ -55,6 +65,11 @@ final class HistoryLoad {
                                 + ": no oil sample that can be used, so there is nothing to"
                                 + " review; put the laboratory's files into samples/, or give"
                                 + " --as-of to look at the logs alone"));
+  }
+
+  /** Reads what is to be looked at, which may be a history without samples. */
+  static HistoryLoad toCheck(HistoryOptions options, Clock clock) {
+    return new HistoryLoad(options, clock, Optional.of(LocalDate.now(clock)));
   }
 
   Intake intake() {
@@ -74,7 +89,7 @@ final class HistoryLoad {
   Review review(Optional<LocalDate> earlier, Progress progress) {
     List<AssetReview> assets;
     List<Problem> problems = new ArrayList<>(intake.problems());
-    List<FileAccount> files = new ArrayList<>(intake.files());
+    List<FileAccount> files = new ArrayList<>(intake.upTo(asOf).files());
     try (DutyLog log = openLog(asOf)) {
       assets =
           new Reviewer(chosen, intake.history(), intake.settings(), asOf, progress).review(log);

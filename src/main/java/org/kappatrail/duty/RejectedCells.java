@@ -71,6 +71,10 @@ final class RejectedCells {
     return all;
   }
 
+  Map<String, Long> unknownBearings() {
+    return unknownBearings.readings();
+  }
+
   private void addTexts(LogTable table, OddTexts odd) {
     for (CellFault fault : CellFault.values()) {
       odd.of(fault).entrySet().stream()
