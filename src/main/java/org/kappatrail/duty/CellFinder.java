@@ -83,6 +83,7 @@ final class CellFinder {
   private List<Cell> cells(CellFault fault, CsvRecord row) {
     return switch (fault) {
       case CELLS -> overflows(row) ? List.of(new Cell("", "")) : List.of();
+      case TIME -> List.of(new Cell(fault.column(), time(row)));
       case BEARING -> List.of(new Cell(fault.column(), bearing(row)));
       default -> {
         List<Cell> cells = new ArrayList<>();
@@ -100,6 +101,15 @@ final class CellFinder {
   /** The tag where many columns carry the quantity, else the program's name. */
   private String name(CellFault fault, int index) {
     return layout.tagColumns().containsKey(index) ? table.columns().get(index) : fault.column();
+  }
+
+  private String time(CsvRecord row) {
+    String day = cell(LogLayout.TIME, row);
+    if (!layout.splitsTime()) {
+      return day;
+    }
+    String time = cell(LogLayout.TIME_OF_DAY, row).strip();
+    return day.strip() + ' ' + (time.isEmpty() ? "?" : time);
   }
 
   private String bearing(CsvRecord row) {

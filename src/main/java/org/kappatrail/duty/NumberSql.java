@@ -39,12 +39,29 @@ final class NumberSql {
     }
     String text = MissingSql.withoutNamed(column, mapping);
     if (mapping.thousands().isPresent()) {
-      text = "replace(" + text + ", " + SqlText.literal(mapping.thousands().get()) + ", '')";
+      text = withoutThousands(text, mapping.thousands().get(), mapping.decimalComma());
     }
     if (mapping.decimalComma()) {
       text = "CASE WHEN NOT contains(" + text + ", '.') THEN replace(" + text + ", ',', '.') END";
     }
     return "TRY_CAST(" + text + " AS DOUBLE)";
+  }
+
+  /** Groups of three without the sign between them; NULL where the sign stands elsewhere. */
+  private static String withoutThousands(String text, String sign, boolean decimalComma) {
+    String even = text;
+    if (sign.isBlank()) {
+      // No-break and narrow blanks count as blanks.
+      even = "translate(trim(" + text + "), '\u00A0\u202F\u2009', '   ')";
+    }
+    String escaped = sign.isBlank() ? " " : "\\" + sign;
+    String groups =
+        "[+-]?\\d{1,3}(" + escaped + "\\d{3})+(" + (decimalComma ? "," : "\\.") + "\\d*)?";
+    return "CASE WHEN NOT contains({e}, {s}) THEN {e} WHEN regexp_full_match(trim({e}), {g})"
+        .concat(" THEN replace({e}, {s}, '') END")
+        .replace("{g}", SqlText.literal(groups))
+        .replace("{s}", SqlText.literal(sign.isBlank() ? " " : sign))
+        .replace("{e}", even);
   }
 
   /**

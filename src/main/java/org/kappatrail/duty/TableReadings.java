@@ -63,6 +63,10 @@ final class TableReadings {
     this.columns = List.copyOf(columns);
     this.mapping = mapping;
     this.names = names;
+    if (mapping.columns().containsValue(LogLayout.TIME_OF_DAY)) {
+      throw new UnusableInputException(
+          table + ": time_of_day is for files; make a view with a timestamp and name that");
+    }
     if (!mapping.tags().isEmpty()) {
       throw new UnusableInputException(
           table + ": tags: are for files; make a view with a row per reading and name that");

@@ -18,7 +18,16 @@ import org.kappatrail.history.SampleColumns;
 final class MappingReader {
   /** Canonical columns of readings. */
   static final List<String> READING_COLUMNS =
-      List.of("time", "asset", "bearing", "temperature_c", "speed_rpm", "quality", "tag", "value");
+      List.of(
+          "time",
+          "time_of_day",
+          "asset",
+          "bearing",
+          "temperature_c",
+          "speed_rpm",
+          "quality",
+          "tag",
+          "value");
 
   private static final List<String> KEYS =
       List.of(
