@@ -84,7 +84,7 @@ final class CellFinder {
     return switch (fault) {
       case CELLS -> overflows(row) ? List.of(new Cell("", "")) : List.of();
       case TIME -> List.of(new Cell(fault.column(), time(row)));
-      case BEARING -> List.of(new Cell(fault.column(), bearing(row)));
+      case BEARING -> bearings(row).stream().map(name -> new Cell(fault.column(), name)).toList();
       default -> {
         List<Cell> cells = new ArrayList<>();
         layout
@@ -112,10 +112,23 @@ final class CellFinder {
     return day.strip() + ' ' + (time.isEmpty() ? "?" : time);
   }
 
-  private String bearing(CsvRecord row) {
-    return layout.form() == LogLayout.Form.TAGGED
-        ? cell(LogLayout.TAG, row) + OddTexts.BETWEEN
-        : cell(LogLayout.ASSET, row) + OddTexts.BETWEEN + cell(LogLayout.BEARING, row);
+  private List<String> bearings(CsvRecord row) {
+    String asset = cell(LogLayout.ASSET, row);
+    return switch (layout.form()) {
+      case LONG -> List.of(asset + OddTexts.BETWEEN + cell(LogLayout.BEARING, row));
+      case WIDE ->
+          layout.bearingsOfRowAsset().stream()
+              .map(name -> asset + OddTexts.BETWEEN + name)
+              .toList();
+      case TAGGED -> {
+        String tag = cell(LogLayout.TAG, row);
+        yield List.of(
+            layout
+                .bearingOfRowAsset(tag.strip())
+                .map(name -> asset + OddTexts.BETWEEN + name)
+                .orElse(tag + OddTexts.BETWEEN));
+      }
+    };
   }
 
   private boolean overflows(CsvRecord row) {

@@ -144,7 +144,35 @@ final class LogLayout {
         .findFirst();
   }
 
+  /** True where a tag has no asset of its own, so that the row's asset tells the bearing. */
+  boolean takesAssetsFromRows() {
+    return mapping.tags().values().stream().anyMatch(tag -> tag.asset().isEmpty());
+  }
+
+  /** Bearings whose asset a row of a log with a column per tag must tell. */
+  List<String> bearingsOfRowAsset() {
+    return tagColumns.values().stream()
+        .filter(tag -> tag.asset().isEmpty())
+        .map(Tag::bearing)
+        .distinct()
+        .toList();
+  }
+
+  /** The bearing that a tag without an asset names; empty for any other tag. */
+  Optional<String> bearingOfRowAsset(String tag) {
+    return Optional.ofNullable(mapping.tags().get(tag))
+        .filter(known -> known.asset().isEmpty())
+        .map(Tag::bearing);
+  }
+
   private void requireColumns(List<String> header) {
+    if (takesAssetsFromRows() && !columns.containsKey(ASSET) && constant(ASSET).isEmpty()) {
+      throw new UnusableInputException(
+          name
+              + ": has no column asset, which the tags without asset: need; it has "
+              + String.join(", ", header)
+              + "; name it in columns:, or put asset: to each of tags: in kappatrail.yaml");
+    }
     for (String required : form.required()) {
       if (!columns.containsKey(required) && !mapping.constants().containsKey(required)) {
         throw new UnusableInputException(

@@ -60,7 +60,7 @@ final class AdoptionBlock {
     dates();
     numbers(numbers);
     form();
-    tags.ifPresent(found -> found.lines().forEach(this::line));
+    tags.ifPresent(found -> found.lines(find("asset").isPresent()).forEach(this::line));
     return out.toString();
   }
 
@@ -72,6 +72,10 @@ final class AdoptionBlock {
             : "workbook";
     line("# " + name + ": a " + what + ", " + form + ", " + shape.body().size() + " rows seen.");
     line("# Lines that begin with # say what the file does not settle.");
+    line(
+        "# Where kappatrail.yaml has "
+            + (kind == MappingReader.Kind.SAMPLES ? "samples:" : "temperatures:")
+            + " already, put the lines from '- files' on below it.");
   }
 
   private void mapping() {
@@ -94,6 +98,15 @@ final class AdoptionBlock {
       note("not recognised, so read under their own names where they hold numbers:");
       unknown.forEach(header -> note("  " + header));
     }
+    List<String> places = new ArrayList<>(List.of("asset", "bearing"));
+    places.removeIf(place -> found.contains(place) || !required().contains(place));
+    if (kind == MappingReader.Kind.TEMPERATURES && !places.isEmpty()) {
+      note("not found: " + String.join(" and ", places) + "; put in what the file is of:");
+      String fill =
+          String.join(", ", places.stream().map(name -> name + ": " + blank(name)).toList());
+      line("    constant: {" + fill + "}");
+      found.addAll(places);
+    }
     for (String required : required()) {
       if (!found.contains(required)) {
         note(
@@ -107,6 +120,11 @@ final class AdoptionBlock {
                         + ": …}"));
       }
     }
+  }
+
+  /** Stands where a name is to be put in. */
+  private static String blank(String column) {
+    return column.equals("asset") ? "ASSET" : "BEARING";
   }
 
   private List<String> required() {

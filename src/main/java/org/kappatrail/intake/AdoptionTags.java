@@ -63,24 +63,31 @@ final class AdoptionTags {
     return units;
   }
 
-  /** Lines of the settings, with comments. */
-  List<String> lines() {
+  /**
+   * Lines of the settings, with comments. Tags that are only taken for something by their values
+   * are comments too where others are sure.
+   *
+   * @param assetIsKnown true where a column names the asset
+   */
+  List<String> lines(boolean assetIsKnown) {
     List<String> lines = new ArrayList<>();
     lines.add(
-        "    # which bearing each tag belongs to is not in the file: put asset and bearing in, and"
-            + " take out the tags of no bearing");
+        "    # which bearing each tag belongs to is not in the file: put "
+            + (assetIsKnown ? "the bearing in" : "asset and bearing in")
+            + ", and take out the tags of no bearing");
     lines.add("    tags:");
+    boolean anySure =
+        guesses.values().stream().anyMatch(guess -> !guess.isSpeed() && guess.doubt().isEmpty());
+    String place = assetIsKnown ? "{bearing: BEARING" : "{asset: ASSET, bearing: BEARING";
     guesses.entrySet().stream()
         .limit(MOST_TAGS)
         .forEach(
             entry -> {
-              lines.add(
-                  "      "
-                      + AdoptionBlock.quoted(entry.getKey())
-                      + ": {asset: ASSET, bearing: BEARING, quantity: "
-                      + entry.getValue().quantity()
-                      + "}");
-              entry.getValue().doubt().ifPresent(doubt -> lines.add("    #   not sure: " + doubt));
+              TagGuess guess = entry.getValue();
+              boolean doubted = guess.doubt().isPresent();
+              String tag = AdoptionBlock.quoted(entry.getKey()) + ": " + place + ", quantity: ";
+              lines.add((anySure && doubted ? "    # " : "      ") + tag + guess.quantity() + "}");
+              guess.doubt().ifPresent(doubt -> lines.add("    #   not sure: " + doubt));
             });
     if (guesses.size() > MOST_TAGS) {
       lines.add("    # and " + (guesses.size() - MOST_TAGS) + " tags more");

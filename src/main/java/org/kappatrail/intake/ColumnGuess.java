@@ -51,6 +51,15 @@ record ColumnGuess(
       guesses.add(guess(header, position, found, taken, body));
     }
     splitTime(guesses, taken);
+    for (int index = 0; index < guesses.size(); index++) {
+      ColumnGuess guess = guesses.get(index);
+      if (guess.is("value") && !taken.contains("tag") && !taken.contains("temperature_c")) {
+        guesses.set(index, guess.as("temperature_c", "no other column holds a temperature"));
+      } else if (!taken.contains("asset") && guess.mayNameAssets()) {
+        taken.add("asset");
+        guesses.set(index, guess.as("asset", "they are texts that repeat"));
+      }
+    }
     if (!taken.contains("time")) {
       for (int index = 0; index < guesses.size(); index++) {
         ColumnGuess guess = guesses.get(index);
@@ -87,6 +96,16 @@ record ColumnGuess(
   /** True where all values are times of day without a day. */
   boolean isTimesOfDay() {
     return !values.isEmpty() && values.stream().allMatch(TIME_OF_DAY.asMatchPredicate());
+  }
+
+  /** True for texts of which few differ, in a column without a meaning. */
+  private boolean mayNameAssets() {
+    return canonical.isEmpty()
+        && values.size() > 2
+        && !isMostlyNumbers()
+        && !isTimesOfDay()
+        && new HashSet<>(values).size() * 3 <= values.size()
+        && DateGuess.of(values).isEmpty();
   }
 
   boolean isMostlyNumbers() {

@@ -77,7 +77,7 @@ record GridShape(int skipLines, List<RawRow> header, List<RawRow> body, Optional
   }
 
   private static int filled(RawRow row) {
-    return (int) row.cells().stream().filter(cell -> !Texts.clean(cell).isEmpty()).count();
+    return (int) row.cells().stream().filter(cell -> !Texts.isMissing(Texts.clean(cell))).count();
   }
 
   private static int commonWidth(List<RawRow> rows) {
@@ -90,12 +90,10 @@ record GridShape(int skipLines, List<RawRow> header, List<RawRow> body, Optional
   }
 
   private static boolean isData(RawRow row, int width) {
-    int filled = filled(row);
-    long values =
-        row.cells().stream()
-            .map(Texts::clean)
-            .filter(cell -> isNumber(cell) || isDate(cell))
-            .count();
+    List<String> cells =
+        row.cells().stream().map(Texts::clean).filter(cell -> !Texts.isMissing(cell)).toList();
+    int filled = cells.size();
+    long values = cells.stream().filter(cell -> isNumber(cell) || isDate(cell)).count();
     return filled * 2 >= width && values >= 1 && values * 4 >= filled && filled > 1;
   }
 

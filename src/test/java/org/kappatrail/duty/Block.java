@@ -45,6 +45,11 @@ final class Block {
     return this;
   }
 
+  Block tag(String name, Tag tag) {
+    tags.put(name, tag);
+    return this;
+  }
+
   Block tag(String name, BearingKey bearing, Tag.Quantity quantity) {
     tags.put(name, new Tag(bearing, quantity));
     return this;
