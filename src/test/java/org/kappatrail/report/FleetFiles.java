@@ -1,5 +1,7 @@
 package org.kappatrail.report;
 
+import static org.assertj.core.api.Assertions.assertThat;
+
 import de.siegmar.fastcsv.writer.CsvWriter;
 import java.io.IOException;
 import java.nio.file.Files;
@@ -8,6 +10,8 @@ import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.stream.Stream;
+import org.kappatrail.cli.Run;
 
 /** A small history folder with machines of any names; every third one's oil thins. */
 final class FleetFiles {
@@ -37,15 +41,30 @@ final class FleetFiles {
     write(folder, ids, names);
   }
 
+  /** Reviews a folder without charts and gives the pack's place. */
+  static Path review(Path site, Path out) throws IOException {
+    Run run = Run.of("review", site.toString(), "--no-charts", "--out", out.toString());
+    assertThat(run.err()).isEmpty();
+    try (Stream<Path> packs = Files.list(out)) {
+      return packs.findFirst().orElseThrow();
+    }
+  }
+
   static void write(Path folder, List<String> ids, List<String> names) throws IOException {
     Files.createDirectories(folder.resolve("samples"));
     Files.writeString(
         folder.resolve("kappatrail.yaml"),
-        "site: Tarn Hollow\nlimits: {kappa-floor: 1.0, water-ppm: 300, iso-4406: 18/16/13}\n");
+        """
+        site: Tarn Hollow
+        limits: {kappa-floor: 1.0, water-ppm: 300, iso-4406: 18/16/13}
+        """);
     Files.writeString(
         folder.resolve("oils.csv"),
-        "oil,viscosity_40c_cst,viscosity_index,grade_vg\n"
-            + "circulating-150,150,96,150\ncirculating-220,220,96,220\n");
+        """
+        oil,viscosity_40c_cst,viscosity_index,grade_vg
+        circulating-150,150,96,150
+        circulating-220,220,96,220
+        """);
     try (CsvWriter assets = CsvWriter.builder().build(folder.resolve("assets.csv"));
         CsvWriter bearings = CsvWriter.builder().build(folder.resolve("bearings.csv"));
         CsvWriter events = CsvWriter.builder().build(folder.resolve("events.csv"));

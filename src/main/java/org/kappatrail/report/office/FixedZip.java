@@ -12,10 +12,12 @@ import java.util.zip.ZipOutputStream;
 
 /**
  * Rewrites an office file, which is a ZIP, so that its bytes follow from its content alone: every
- * entry, also those of the workbooks within, carries the earliest time that a ZIP can hold.
+ * entry, also those of the workbooks within, carries one fixed time.
  */
 public final class FixedZip {
-  private static final LocalDateTime EARLIEST = LocalDateTime.of(1980, 1, 1, 0, 0);
+  /** The earliest time that a ZIP can hold, in 1980, would be written with the zone's own too. */
+  private static final LocalDateTime FIXED = LocalDateTime.of(1981, 1, 1, 0, 0);
+
   private static final String WORKBOOK = ".xlsx";
 
   private FixedZip() {}
@@ -30,7 +32,7 @@ public final class FixedZip {
     ZipInputStream entries = new ZipInputStream(office);
     for (ZipEntry entry = entries.getNextEntry(); entry != null; entry = entries.getNextEntry()) {
       ZipEntry fixed = new ZipEntry(entry.getName());
-      fixed.setTimeLocal(EARLIEST);
+      fixed.setTimeLocal(FIXED);
       zip.putNextEntry(fixed);
       if (entry.getName().endsWith(WORKBOOK)) {
         zip.write(of(entries.readAllBytes()));

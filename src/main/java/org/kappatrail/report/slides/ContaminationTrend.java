@@ -3,8 +3,10 @@ package org.kappatrail.report.slides;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalInt;
+import java.util.SortedMap;
 import java.util.TreeMap;
 import java.util.function.Function;
 import org.kappatrail.history.Sample;
@@ -26,12 +28,12 @@ final class ContaminationTrend {
     ChartSpan span = found.get();
     List<Sample> samples =
         asset.samples().stream().filter(sample -> span.covers(sample.day())).toList();
-    TreeMap<LocalDate, Double> water = new TreeMap<>();
+    SortedMap<LocalDate, Double> water = new TreeMap<>();
     for (Sample sample : samples) {
       sample.arithmetic(SampleColumns.WATER).ifPresent(value -> water.put(sample.day(), value));
     }
-    TreeMap<LocalDate, Double> fine = numbers(samples, CleanlinessCode::c6);
-    TreeMap<LocalDate, Double> coarse = numbers(samples, CleanlinessCode::c14);
+    SortedMap<LocalDate, Double> fine = numbers(samples, CleanlinessCode::c6);
+    SortedMap<LocalDate, Double> coarse = numbers(samples, CleanlinessCode::c14);
     boolean particles = !fine.isEmpty() || !coarse.isEmpty();
     if (water.isEmpty() && !particles) {
       return Optional.empty();
@@ -41,9 +43,9 @@ final class ContaminationTrend {
 
   private static NativeChart chart(
       ChartSpan span,
-      TreeMap<LocalDate, Double> water,
-      TreeMap<LocalDate, Double> fine,
-      TreeMap<LocalDate, Double> coarse) {
+      SortedMap<LocalDate, Double> water,
+      SortedMap<LocalDate, Double> fine,
+      SortedMap<LocalDate, Double> coarse) {
     ChartSheet sheet = new ChartSheet();
     List<ChartSeries> series = new ArrayList<>();
     if (!water.isEmpty()) {
@@ -68,7 +70,7 @@ final class ContaminationTrend {
             .max(Double::compare)
             .map(most -> ValueAxis.fromZero(Math.max(most, 1), Palette.WATER));
     // Days of both charts, so that their axes are one.
-    sheet.add("calendar", new TreeMap<>(java.util.Map.of(span.from(), 0.0, span.to(), 0.0)));
+    sheet.add("calendar", new TreeMap<>(Map.of(span.from(), 0.0, span.to(), 0.0)));
     return new NativeChart(
         "Contamination",
         "Water and cleanliness code (ISO 4406) of the same samples against time; the numbers are in the chart's data"
@@ -84,7 +86,7 @@ final class ContaminationTrend {
       ChartSheet sheet,
       List<ChartSeries> series,
       String name,
-      TreeMap<LocalDate, Double> codes,
+      SortedMap<LocalDate, Double> codes,
       String marker,
       boolean right) {
     if (codes.isEmpty()) {
@@ -95,9 +97,9 @@ final class ContaminationTrend {
     series.add(right ? line.onRight() : line);
   }
 
-  private static TreeMap<LocalDate, Double> numbers(
+  private static SortedMap<LocalDate, Double> numbers(
       List<Sample> samples, Function<CleanlinessCode, CleanlinessCode.Part> part) {
-    TreeMap<LocalDate, Double> numbers = new TreeMap<>();
+    SortedMap<LocalDate, Double> numbers = new TreeMap<>();
     for (Sample sample : samples) {
       OptionalInt number =
           sample

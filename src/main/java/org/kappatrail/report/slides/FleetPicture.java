@@ -226,7 +226,7 @@ final class FleetPicture {
         y += LEGEND_HEIGHT;
       }
       draw(mark, x, y);
-      leaf.box(x + mark.width, y - 8, width - mark.width, 17)
+      leaf.box(x + mark.width, y - 8, width - mark.width + MARK_GAP - 3, 17)
           .ink(Palette.INK)
           .line(mark.words, LEGEND_TEXT, false);
       x += width + MARK_GAP;

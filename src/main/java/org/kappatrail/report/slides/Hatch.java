@@ -10,16 +10,17 @@ import org.openxmlformats.schemas.presentationml.x2006.main.CTShape;
 
 /** Fills a shape with diagonal lines; set as XML, as the library has no call for it. */
 final class Hatch {
-  private static final String PATTERN =
-      "<a:pattFill xmlns:a=\"http://schemas.openxmlformats.org/drawingml/2006/main\""
-          + " prst=\"wdUpDiag\"><a:fgClr><a:srgbClr val=\"%s\"/></a:fgClr>"
-          + "<a:bgClr><a:srgbClr val=\"%s\"/></a:bgClr></a:pattFill>";
-
   private Hatch() {}
 
   /** Takes the place of the shape's solid fill. */
   static void fill(XSLFAutoShape shape, Color ink, Color paper) {
-    String pattern = String.format(Locale.ROOT, PATTERN, hex(ink), hex(paper));
+    String pattern =
+        "<a:pattFill xmlns:a=\"http://schemas.openxmlformats.org/drawingml/2006/main\""
+            + " prst=\"wdUpDiag\"><a:fgClr><a:srgbClr val=\""
+            + hex(ink)
+            + "\"/></a:fgClr><a:bgClr><a:srgbClr val=\""
+            + hex(paper)
+            + "\"/></a:bgClr></a:pattFill>";
     CTShape xml = (CTShape) shape.getXmlObject();
     try (XmlCursor place = xml.getSpPr().getSolidFill().newCursor();
         XmlCursor source = XmlObject.Factory.parse(pattern).newCursor()) {

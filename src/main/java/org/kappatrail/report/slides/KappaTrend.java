@@ -4,8 +4,10 @@ import java.awt.Color;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.SortedMap;
 import java.util.TreeMap;
 import java.util.function.ToDoubleFunction;
 import org.kappatrail.history.Charge;
@@ -55,9 +57,9 @@ final class KappaTrend {
   }
 
   private NativeChart chart() {
-    TreeMap<LocalDate, Double> kappa = films(shown, Film::kappa);
-    TreeMap<LocalDate, Double> low = films(shown, film -> film.uncertainty().low());
-    TreeMap<LocalDate, Double> high = films(shown, film -> film.uncertainty().high());
+    SortedMap<LocalDate, Double> kappa = films(shown, Film::kappa);
+    SortedMap<LocalDate, Double> low = films(shown, film -> film.uncertainty().low());
+    SortedMap<LocalDate, Double> high = films(shown, film -> film.uncertainty().high());
     List<FanPoint> fan = shown.trend().outlook().map(outlook -> outlook.fan()).orElse(List.of());
     ValueAxis axis = axis(low, high, fan);
     bands(axis);
@@ -69,7 +71,7 @@ final class KappaTrend {
     int floor =
         sheet.add(
             "floor " + Words.floor(shown.floor()),
-            new TreeMap<>(java.util.Map.of(span.from(), shown.floor(), span.to(), shown.floor())));
+            new TreeMap<>(Map.of(span.from(), shown.floor(), span.to(), shown.floor())));
     series.add(ChartSeries.line(floor, Palette.INK, 1.25).dashed("dash"));
     outlook(fan);
     changes(axis);
@@ -91,7 +93,7 @@ final class KappaTrend {
   }
 
   private ValueAxis axis(
-      TreeMap<LocalDate, Double> low, TreeMap<LocalDate, Double> high, List<FanPoint> fan) {
+      SortedMap<LocalDate, Double> low, SortedMap<LocalDate, Double> high, List<FanPoint> fan) {
     List<Double> values = new ArrayList<>(List.of(shown.floor(), 1.0));
     values.addAll(low.values());
     values.addAll(high.values());
@@ -123,13 +125,13 @@ final class KappaTrend {
       return;
     }
     double height = low > axis.low() ? high - low : high;
-    TreeMap<LocalDate, Double> band = new TreeMap<>();
+    SortedMap<LocalDate, Double> band = new TreeMap<>();
     band.put(span.from(), height);
     band.put(span.to(), height);
     series.add(ChartSeries.area(sheet.add(name + ", width of band", band), wash));
     double edge = Math.pow(axis.high() / axis.low(), NAME_SHARE);
     if (high / low > edge * edge) {
-      TreeMap<LocalDate, Double> place = new TreeMap<>();
+      SortedMap<LocalDate, Double> place = new TreeMap<>();
       place.put(span.to(), high == axis.high() ? high / edge : low * edge);
       series.add(ChartSeries.name(sheet.add(name, place), Palette.QUIET_INK, "l"));
     }
@@ -162,7 +164,7 @@ final class KappaTrend {
                 1.5)
             .dashed("sysDot"));
     for (boolean lower : new boolean[] {true, false}) {
-      TreeMap<LocalDate, Double> edge = fan(fan, point -> lower ? point.low() : point.high());
+      SortedMap<LocalDate, Double> edge = fan(fan, point -> lower ? point.low() : point.high());
       if (!edge.isEmpty()) {
         series.add(
             ChartSeries.line(
@@ -175,9 +177,9 @@ final class KappaTrend {
 
   /** Oil changes as lines over the whole height, named once. */
   private void changes(ValueAxis axis) {
-    TreeMap<LocalDate, Double> at = new TreeMap<>();
-    TreeMap<LocalDate, Double> up = new TreeMap<>();
-    TreeMap<LocalDate, Double> down = new TreeMap<>();
+    SortedMap<LocalDate, Double> at = new TreeMap<>();
+    SortedMap<LocalDate, Double> up = new TreeMap<>();
+    SortedMap<LocalDate, Double> down = new TreeMap<>();
     double height = axis.high() / Math.pow(axis.high() / axis.low(), NAME_SHARE);
     for (Charge charge : asset.charges()) {
       charge
@@ -204,13 +206,14 @@ final class KappaTrend {
                 sheet.add("oil changes, up", up),
                 sheet.add("oil changes, down", down),
                 Palette.QUIET_INK));
-    TreeMap<LocalDate, Double> named = new TreeMap<>(at.tailMap(last));
+    SortedMap<LocalDate, Double> named = new TreeMap<>(at.tailMap(last));
     series.add(
         ChartSeries.name(sheet.add("oil change", named), Palette.QUIET_INK, late ? "l" : "r"));
   }
 
-  private TreeMap<LocalDate, Double> films(BearingReview bearing, ToDoubleFunction<Film> quantity) {
-    TreeMap<LocalDate, Double> values = new TreeMap<>();
+  private SortedMap<LocalDate, Double> films(
+      BearingReview bearing, ToDoubleFunction<Film> quantity) {
+    SortedMap<LocalDate, Double> values = new TreeMap<>();
     for (KappaPoint point : bearing.trail()) {
       point
           .film()
@@ -224,17 +227,17 @@ final class KappaTrend {
     OptionalDouble of(FanPoint point);
   }
 
-  private static TreeMap<LocalDate, Double> fan(List<FanPoint> fan, Edge edge) {
-    TreeMap<LocalDate, Double> values = new TreeMap<>();
+  private static SortedMap<LocalDate, Double> fan(List<FanPoint> fan, Edge edge) {
+    SortedMap<LocalDate, Double> values = new TreeMap<>();
     for (FanPoint point : fan) {
       edge.of(point).ifPresent(value -> values.put(point.date(), value));
     }
     return values;
   }
 
-  private static TreeMap<LocalDate, Double> difference(
-      TreeMap<LocalDate, Double> more, TreeMap<LocalDate, Double> less) {
-    TreeMap<LocalDate, Double> values = new TreeMap<>();
+  private static SortedMap<LocalDate, Double> difference(
+      SortedMap<LocalDate, Double> more, SortedMap<LocalDate, Double> less) {
+    SortedMap<LocalDate, Double> values = new TreeMap<>();
     more.forEach((day, value) -> values.put(day, value - less.getOrDefault(day, value)));
     return values;
   }

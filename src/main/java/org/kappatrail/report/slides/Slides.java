@@ -20,6 +20,7 @@ import org.kappatrail.review.Review;
  */
 public final class Slides {
   private static final double LEVEL_TEXT = 18;
+  private static final double LEVEL_GAP = 30;
 
   private final Review review;
   private final Choice choice;
@@ -53,7 +54,7 @@ public final class Slides {
   public void write(Path file) throws IOException {
     Path folder = Optional.ofNullable(file.toAbsolutePath().getParent()).orElseThrow();
     Files.createDirectories(folder);
-    Path fresh = Files.createTempFile(folder, ".slides", ".new");
+    Path fresh = folder.resolve("." + file.getFileName() + ".new");
     try {
       try (OutputStream out = new BufferedOutputStream(Files.newOutputStream(fresh))) {
         make(out);
@@ -110,8 +111,9 @@ public final class Slides {
       String text = count(level) + " " + level.label();
       double width = leaf.fit().width(text, LEVEL_TEXT, true) + 2;
       LevelShape.draw(leaf.slide(), level, x + 8, y + 11, 14);
-      leaf.box(x + 22, y, width, LEVEL_TEXT * TextFit.LINE + 1).line(text, LEVEL_TEXT, true);
-      x += 22 + width + 26;
+      leaf.box(x + 22, y, width + LEVEL_GAP / 2, LEVEL_TEXT * TextFit.LINE + 1)
+          .line(text, LEVEL_TEXT, true);
+      x += 22 + width + LEVEL_GAP;
     }
   }
 

@@ -27,6 +27,8 @@ final class Themed {
     if (fill.isSetSrgbClr()) {
       fill.unsetSrgbClr();
     }
-    fill.addNewSchemeClr().setVal(STSchemeColorVal.TX_1);
+    if (!fill.isSetSchemeClr()) {
+      fill.addNewSchemeClr().setVal(STSchemeColorVal.TX_1);
+    }
   }
 }
