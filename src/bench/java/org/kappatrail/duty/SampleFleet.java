@@ -115,8 +115,8 @@ record SampleFleet(int assets, int samplesPerAsset, long seed) {
         3 + 2 * random.nextDouble(),
         400 - age + 8 * random.nextGaussian(),
         0.3 + 0.01 * age + 0.02 * random.nextDouble(),
-        58
-            + asset % 11
+        62
+            + asset % 29
             + 5 * Math.sin(2 * Math.PI * day.getDayOfYear() / 365.25)
             + random.nextGaussian());
   }

@@ -23,6 +23,7 @@ import org.kappatrail.intake.HistoryReader;
 import org.kappatrail.intake.Intake;
 import org.kappatrail.report.Manifest;
 import org.kappatrail.review.AssetReview;
+import org.kappatrail.review.CorrelationVariables;
 import org.kappatrail.review.Progress;
 import org.kappatrail.review.Review;
 import org.kappatrail.review.Reviewer;
@@ -92,7 +93,14 @@ final class HistoryLoad {
       files.addAll(log.accounts());
     }
     Optional<Since> since = earlier.map(day -> since(day, assets, progress));
-    return new Review(asOf, intake.settings(), assets, since, problems, files);
+    return new Review(
+        asOf,
+        intake.settings(),
+        assets,
+        since,
+        CorrelationVariables.correlate(assets),
+        problems,
+        files);
   }
 
   private Since since(LocalDate day, List<AssetReview> now, Progress progress) {

@@ -94,6 +94,10 @@ public final class Kappatrail implements Runnable {
   }
 
   private int failure(Exception problem, CommandLine line, ParseResult parsed) {
+    if (Thread.currentThread().isInterrupted()) {
+      err.println("kappatrail: stopped");
+      return ExitCodes.STOPPED;
+    }
     if (problem instanceof UnusableInputException) {
       err.println("kappatrail: " + problem.getMessage());
       return ExitCodes.UNUSABLE_INPUT;

@@ -30,6 +30,7 @@ public final class ReviewTables {
         kappaHistory(review),
         TrendTables.attribution(review),
         TrendTables.drift(review),
+        CorrelationTable.of(review),
         DecisionTables.verdicts(review),
         DecisionTables.remedies(review),
         findings(review),

@@ -8,9 +8,9 @@ import java.math.RoundingMode;
 public final class SixDigits {
   private static final MathContext SIX = new MathContext(6, RoundingMode.HALF_EVEN);
 
-  private static final int LEAST_POWER = -4;
-  private static final double[] POWERS = powers(LEAST_POWER, 9);
-  private static final double[] SCALES = powers(0, 9);
+  private static final int LEAST_POWER = -15;
+  private static final double[] POWERS = powers(LEAST_POWER, 15);
+  private static final double[] SCALES = powers(0, 20);
   private static final int DIGITS = 6;
 
   /** Nearer to the middle between two texts than this, only exact arithmetic tells them apart. */
