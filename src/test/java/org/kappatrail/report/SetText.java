@@ -7,6 +7,7 @@ import java.awt.font.TextAttribute;
 import java.text.AttributedString;
 import java.util.List;
 import java.util.Locale;
+import org.apache.poi.common.usermodel.fonts.FontGroup;
 import org.apache.poi.xslf.usermodel.XSLFTextParagraph;
 import org.apache.poi.xslf.usermodel.XSLFTextRun;
 import org.apache.poi.xslf.usermodel.XSLFTextShape;
@@ -49,7 +50,8 @@ final class SetText {
   /** The font named, a free one of the same widths, or the system's sans serif. */
   private static Font font(XSLFTextRun run) {
     int style = run.isBold() ? Font.BOLD : Font.PLAIN;
-    String named = run.getFontFamily() == null ? "" : run.getFontFamily();
+    String latin = run.getFontFamily(FontGroup.LATIN);
+    String named = latin == null ? "" : latin;
     for (String family : List.of(named, "Liberation Sans")) {
       Font font = new Font(family, style, 1);
       boolean twin = !family.equals("Liberation Sans") || named.equals("Arial");

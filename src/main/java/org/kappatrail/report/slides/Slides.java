@@ -7,7 +7,10 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.TreeMap;
+import org.kappatrail.report.chart.FleetRow;
 import org.kappatrail.report.office.OfficeProperties;
 import org.kappatrail.report.office.ShownText;
 import org.kappatrail.review.AssetReview;
@@ -92,7 +95,9 @@ public final class Slides {
         low == 0
             ? "Every bearing stands at or above its floor"
             : low + " of " + rows.size() + " bearings stand below their floor";
-    new FleetPicture(stage.leaf(headline), rows).draw();
+    Map<String, String> names = new TreeMap<>();
+    review.assets().forEach(asset -> names.put(asset.asset().id(), asset.asset().name()));
+    new FleetPicture(stage.leaf(headline), rows, names).draw();
   }
 
   private void opening(Stage stage, String site) {
