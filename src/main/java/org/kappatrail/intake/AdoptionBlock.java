@@ -157,6 +157,7 @@ final class AdoptionBlock {
       line("    units:");
       units.forEach((column, unit) -> line("      " + column + ": " + unit));
     }
+    tags.flatMap(AdoptionTags::unitDoubt).ifPresent(doubts::add);
     doubts.forEach(this::note);
   }
 
@@ -249,6 +250,8 @@ final class AdoptionBlock {
     for (ColumnGuess guess : columns) {
       if (guess.isMostlyNumbers()) {
         guess.values().stream().filter(value -> !GridShape.isNumber(value)).forEach(odd::add);
+      } else if (guess.is("iso_4406")) {
+        guess.values().stream().filter(value -> !ColumnGuess.isCode(value)).forEach(odd::add);
       }
     }
     if (!odd.isEmpty()) {

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.TreeMap;
 
 /** The tags of a log with a column per tag or a row per value, and what each seems to measure. */
@@ -13,6 +14,7 @@ final class AdoptionTags {
 
   private final Map<String, TagGuess> guesses = new LinkedHashMap<>();
   private final Map<String, RawTable.Header> headers = new LinkedHashMap<>();
+  private final List<String> temperatures = new ArrayList<>();
 
   private AdoptionTags() {}
 
@@ -21,9 +23,7 @@ final class AdoptionTags {
     AdoptionTags tags = new AdoptionTags();
     for (ColumnGuess guess : columns) {
       if (guess.canonical().isEmpty() && guess.isMostlyNumbers()) {
-        tags.headers.putIfAbsent(guess.header().name(), guess.header());
-        tags.guesses.putIfAbsent(
-            guess.header().name(), TagGuess.of(guess.header(), guess.values(), numbers));
+        tags.add(guess.header(), guess.values(), numbers);
       }
     }
     return tags;
@@ -43,13 +43,25 @@ final class AdoptionTags {
       }
     }
     AdoptionTags tags = new AdoptionTags();
-    values.forEach(
-        (name, found) -> {
-          RawTable.Header header = new RawTable.Header(name, List.of());
-          tags.headers.put(name, header);
-          tags.guesses.put(name, TagGuess.of(header, found, numbers));
-        });
+    values.forEach((name, found) -> tags.add(new RawTable.Header(name, List.of()), found, numbers));
     return tags;
+  }
+
+  private void add(RawTable.Header header, List<String> values, NumberText numbers) {
+    TagGuess guess = TagGuess.of(header, values, numbers);
+    headers.putIfAbsent(header.name(), header);
+    guesses.putIfAbsent(header.name(), guess);
+    if (!guess.isSpeed() && guess.doubt().isEmpty()) {
+      temperatures.addAll(values);
+    }
+  }
+
+  /** What the size of the temperatures says against °C; empty where a name states the unit. */
+  Optional<String> unitDoubt() {
+    boolean stated =
+        headers.values().stream()
+            .anyMatch(header -> SampleColumn.statedUnit("temperature_c", header).isPresent());
+    return stated ? Optional.empty() : UnitGuess.doubt("temperature_c", temperatures);
   }
 
   /** Units that the names state, where they are not the ones used inside. */

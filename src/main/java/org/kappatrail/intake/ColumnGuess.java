@@ -108,6 +108,11 @@ record ColumnGuess(
         && DateGuess.of(values).isEmpty();
   }
 
+  /** True for a text in the form of a cleanliness code. */
+  static boolean isCode(String text) {
+    return text.matches(CODE);
+  }
+
   boolean isMostlyNumbers() {
     long numbers = values.stream().filter(GridShape::isNumber).count();
     return !values.isEmpty() && numbers * 2 >= values.size();
