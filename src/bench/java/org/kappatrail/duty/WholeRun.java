@@ -1,7 +1,5 @@
 package org.kappatrail.duty;
 
-import java.io.File;
-import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -9,22 +7,18 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Map;
 import java.util.TreeMap;
-import java.util.concurrent.TimeUnit;
-import java.util.regex.Matcher;
-import java.util.regex.Pattern;
+import java.util.function.ToDoubleFunction;
+import java.util.stream.IntStream;
 
 /**
  * Times the packaged program's review of a made-up fleet against the bare statement over the same
- * files, each in a process of its own, in turn; prints the median times, their ratio, the
- * throughput and the peak memory of the review. Options: {@code --bearings 100 --days 365
- * --interval-seconds 60 --format csv|parquet --runs 3 --seed 1 --folder target/bench}. Peak memory
- * needs Linux.
+ * files, each in a process of its own, in turn; prints every run, the median times, the median of
+ * the ratios pair by pair, in time and in processor time, the throughput and the peak memory. On a
+ * machine that others use too, the ratio in processor time is the steadier one. Options: {@code
+ * --bearings 100 --days 365 --interval-seconds 60 --format csv|parquet --runs 3 --seed 1 --folder
+ * target/bench}.
  */
 public final class WholeRun {
-  private static final Pattern PEAK = Pattern.compile("VmHWM:\\s+(\\d+) kB");
-
-  private record Timed(double seconds, long peakKib) {}
-
   private WholeRun() {}
 
   public static void main(String[] args) throws Exception {
@@ -54,18 +48,26 @@ public final class WholeRun {
       fleet.write(folder);
     }
     int runs = Integer.parseInt(options.getOrDefault("--runs", "3"));
-    List<Timed> bare = new ArrayList<>();
-    List<Timed> whole = new ArrayList<>();
+    List<TimedProcess> bare = new ArrayList<>();
+    List<TimedProcess> whole = new ArrayList<>();
     for (int run = 0; run < runs; run++) {
-      bare.add(time(bareCommand(fleet, folder)));
-      whole.add(time(reviewCommand(folder)));
+      bare.add(TimedProcess.of(bareCommand(fleet, folder)));
+      whole.add(TimedProcess.of(TimedProcess.review(folder)));
+      System.out.printf(
+          Locale.ROOT,
+          "run %d: bare %.1f s (processor %.1f s), review %.1f s (processor %.1f s)%n",
+          run + 1,
+          bare.get(run).seconds(),
+          bare.get(run).cpuSeconds(),
+          whole.get(run).seconds(),
+          whole.get(run).cpuSeconds());
     }
     print(fleet, bare, whole);
   }
 
   private static List<String> bareCommand(Fleet fleet, Path folder) {
     return List.of(
-        java(),
+        TimedProcess.java(),
         "-cp",
         System.getProperty("java.class.path"),
         BareStatement.class.getName(),
@@ -74,71 +76,33 @@ public final class WholeRun {
         fleet.lastDay().toString());
   }
 
-  private static List<String> reviewCommand(Path folder) {
-    return List.of(
-        java(),
-        "-jar",
-        "target/kappatrail.jar",
-        "review",
-        folder.toString(),
-        "--out",
-        folder.resolveSibling(folder.getFileName() + "-pack").toString(),
-        "--no-charts");
-  }
-
-  private static String java() {
-    return Path.of(System.getProperty("java.home"), "bin", "java").toString();
-  }
-
-  private static Timed time(List<String> command) throws IOException, InterruptedException {
-    long start = System.nanoTime();
-    Process process =
-        new ProcessBuilder(command)
-            .redirectErrorStream(true)
-            .redirectOutput(new File("target/bench.log"))
-            .start();
-    Path status = Path.of("/proc", Long.toString(process.pid()), "status");
-    long peak = 0;
-    while (!process.waitFor(20, TimeUnit.MILLISECONDS)) {
-      peak = Math.max(peak, peak(status));
-    }
-    double seconds = (System.nanoTime() - start) / 1e9;
-    if (process.exitValue() != 0) {
-      throw new IllegalStateException(
-          "exit " + process.exitValue() + ": " + Files.readString(Path.of("target/bench.log")));
-    }
-    return new Timed(seconds, peak);
-  }
-
-  private static long peak(Path status) {
-    try {
-      Matcher peak = PEAK.matcher(Files.readString(status));
-      return peak.find() ? Long.parseLong(peak.group(1)) : 0;
-    } catch (IOException ended) {
-      return 0;
-    }
-  }
-
-  private static void print(Fleet fleet, List<Timed> bare, List<Timed> whole) {
-    double bareSeconds = median(bare);
-    double wholeSeconds = median(whole);
-    long peakKib = whole.stream().mapToLong(Timed::peakKib).max().orElse(0);
+  private static void print(Fleet fleet, List<TimedProcess> bare, List<TimedProcess> whole) {
+    double wholeSeconds = TimedProcess.median(whole, TimedProcess::seconds);
     System.out.printf(
         Locale.ROOT,
-        "%,d readings, %s%nbare statement %.1f s%nreview %.1f s, %.2f times the bare statement,"
-            + " %.2f million readings a second, peak memory %.0f MiB%n",
+        "%,d readings, %s%nbare statement %.1f s, processor %.1f s, peak memory %.0f MiB%n"
+            + "review %.1f s, processor %.1f s, peak memory %.0f MiB%n"
+            + "review over bare statement: %.2f in time, %.2f in processor time%n"
+            + "%.2f million readings a second%n",
         fleet.readings(),
         fleet.parquet() ? "Parquet" : "CSV",
-        bareSeconds,
+        TimedProcess.median(bare, TimedProcess::seconds),
+        TimedProcess.median(bare, TimedProcess::cpuSeconds),
+        TimedProcess.mostMib(bare),
         wholeSeconds,
-        wholeSeconds / bareSeconds,
-        fleet.readings() / wholeSeconds / 1e6,
-        peakKib / 1024.0);
+        TimedProcess.median(whole, TimedProcess::cpuSeconds),
+        TimedProcess.mostMib(whole),
+        medianRatio(whole, bare, TimedProcess::seconds),
+        medianRatio(whole, bare, TimedProcess::cpuSeconds),
+        fleet.readings() / wholeSeconds / 1e6);
   }
 
-  private static double median(List<Timed> runs) {
-    double[] seconds = runs.stream().mapToDouble(Timed::seconds).sorted().toArray();
-    int middle = seconds.length / 2;
-    return seconds.length % 2 == 1 ? seconds[middle] : (seconds[middle - 1] + seconds[middle]) / 2;
+  private static double medianRatio(
+      List<TimedProcess> over, List<TimedProcess> under, ToDoubleFunction<TimedProcess> figure) {
+    return TimedProcess.median(
+        IntStream.range(0, over.size())
+            .mapToDouble(
+                run -> figure.applyAsDouble(over.get(run)) / figure.applyAsDouble(under.get(run)))
+            .toArray());
   }
 }

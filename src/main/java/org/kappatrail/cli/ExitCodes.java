@@ -8,5 +8,8 @@ final class ExitCodes {
   static final int UNUSABLE_INPUT = 3;
   static final int BUG = 70;
 
+  /** As shells have it for a program ended by Ctrl-C. */
+  static final int STOPPED = 130;
+
   private ExitCodes() {}
 }

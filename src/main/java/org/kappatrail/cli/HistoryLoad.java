@@ -23,6 +23,7 @@ import org.kappatrail.intake.HistoryReader;
 import org.kappatrail.intake.Intake;
 import org.kappatrail.report.Manifest;
 import org.kappatrail.review.AssetReview;
+import org.kappatrail.review.CorrelationVariables;
 import org.kappatrail.review.Progress;
 import org.kappatrail.review.Review;
 import org.kappatrail.review.Reviewer;
@@ -44,14 +45,21 @@ final class HistoryLoad {
    * @throws UnusableInputException where there is no day that the review could be made for
    */
   HistoryLoad(HistoryOptions options, Clock clock) {
-    this(options, clock, Optional.empty());
+    this(options, clock, false, Optional.empty());
   }
 
-  private HistoryLoad(HistoryOptions options, Clock clock, Optional<LocalDate> otherwise) {
+  /** A load of the whole fleet, whatever assets are named; the names are checked all the same. */
+  static HistoryLoad ofWholeFleet(HistoryOptions options, Clock clock) {
+    return new HistoryLoad(options, clock, true, Optional.empty());
+  }
+
+  private HistoryLoad(
+      HistoryOptions options, Clock clock, boolean wholeFleet, Optional<LocalDate> otherwise) {
     folder = options.folder();
     intake =
         HistoryReader.read(folder, Optional.of(LocalDate.now(clock).plusDays(ZONE_MARGIN_DAYS)));
-    chosen = choose(intake.history(), options.assets());
+    PlantHistory named = choose(intake.history(), options.assets());
+    chosen = wholeFleet ? intake.history() : named;
     LocalDate given = options.asOf();
     asOf =
         given != null
@@ -69,7 +77,7 @@ final class HistoryLoad {
 
   /** Reads what is to be looked at, which may be a history without samples. */
   static HistoryLoad toCheck(HistoryOptions options, Clock clock) {
-    return new HistoryLoad(options, clock, Optional.of(LocalDate.now(clock)));
+    return new HistoryLoad(options, clock, false, Optional.of(LocalDate.now(clock)));
   }
 
   Intake intake() {
@@ -97,7 +105,14 @@ final class HistoryLoad {
       files.addAll(log.accounts());
     }
     Optional<Since> since = earlier.map(day -> since(day, assets, progress));
-    return new Review(asOf, intake.settings(), assets, since, problems, files);
+    return new Review(
+        asOf,
+        intake.settings(),
+        assets,
+        since,
+        CorrelationVariables.correlate(assets),
+        problems,
+        files);
   }
 
   private Since since(LocalDate day, List<AssetReview> now, Progress progress) {

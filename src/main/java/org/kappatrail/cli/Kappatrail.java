@@ -64,6 +64,7 @@ public final class Kappatrail implements Runnable {
         new CommandLine(this)
             .addSubcommand(new ReviewCommand(terminal))
             .addSubcommand(new CheckCommand(terminal))
+            .addSubcommand(new SlidesCommand(terminal))
             .addSubcommand(new WeighCommand(terminal))
             .addSubcommand(new AdoptCommand(terminal))
             .addSubcommand(new PointCommand(terminal))
@@ -94,6 +95,10 @@ public final class Kappatrail implements Runnable {
   }
 
   private int failure(Exception problem, CommandLine line, ParseResult parsed) {
+    if (Thread.currentThread().isInterrupted()) {
+      err.println("kappatrail: stopped");
+      return ExitCodes.STOPPED;
+    }
     if (problem instanceof UnusableInputException) {
       err.println("kappatrail: " + problem.getMessage());
       return ExitCodes.UNUSABLE_INPUT;

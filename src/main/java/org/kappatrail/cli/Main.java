@@ -13,7 +13,8 @@ public final class Main {
     System.setProperty("java.awt.headless", "true");
     PrintWriter out = new PrintWriter(System.out, false, StandardCharsets.UTF_8);
     PrintWriter err = new PrintWriter(System.err, true, StandardCharsets.UTF_8);
-    int code = new Kappatrail(out, err, onTerminal(), Clock.systemUTC()).run(args);
+    Kappatrail program = new Kappatrail(out, err, onTerminal(), Clock.systemUTC());
+    int code = EndInOrder.run(() -> program.run(args));
     out.flush();
     err.flush();
     System.exit(code);

@@ -3,11 +3,7 @@ package org.kappatrail.cli;
 import java.io.IOException;
 import java.io.PrintWriter;
 import java.time.Clock;
-import me.tongfei.progressbar.ConsoleProgressBarConsumer;
-import me.tongfei.progressbar.ProgressBar;
-import me.tongfei.progressbar.ProgressBarBuilder;
-import me.tongfei.progressbar.ProgressBarStyle;
-import org.jspecify.annotations.Nullable;
+import java.util.concurrent.CancellationException;
 import org.kappatrail.review.Progress;
 
 /**
@@ -25,47 +21,28 @@ record Terminal(PrintWriter out, PrintWriter err, boolean interactive, Clock clo
     void run(Progress progress) throws IOException;
   }
 
-  /** Runs something with a progress bar on a terminal, silently elsewhere. */
+  /**
+   * Runs something with a progress bar on a terminal, silently elsewhere. Work whose thread is
+   * interrupted ends at its next report.
+   */
   void withProgress(Work work) throws IOException {
     if (!interactive) {
-      work.run(Progress.SILENT);
+      work.run(untilInterrupted(Progress.SILENT));
       return;
     }
-    try (Bars bars = new Bars()) {
-      work.run(bars);
+    try (ProgressBars bars = ProgressBars.onStandardError()) {
+      work.run(untilInterrupted(bars));
     }
   }
 
-  /** One bar a phase. */
-  private static final class Bars implements Progress, AutoCloseable {
-    private @Nullable ProgressBar bar;
-
-    @Override
-    public synchronized void at(String phase, long done, long total) {
-      ProgressBar present = bar;
-      if (present == null || !present.getTaskName().equals(phase)) {
-        close();
-        present =
-            new ProgressBarBuilder()
-                .setTaskName(phase)
-                .setInitialMax(total)
-                .setStyle(ProgressBarStyle.ASCII)
-                .setUpdateIntervalMillis(200)
-                .clearDisplayOnFinish()
-                .setConsumer(new ConsoleProgressBarConsumer(System.err))
-                .build();
-        bar = present;
+  /** Reports from other threads go through: theirs is not the work that ends. */
+  private static Progress untilInterrupted(Progress progress) {
+    Thread worker = Thread.currentThread();
+    return (phase, done, total) -> {
+      if (Thread.currentThread() == worker && worker.isInterrupted()) {
+        throw new CancellationException("stopped");
       }
-      present.maxHint(total);
-      present.stepTo(done);
-    }
-
-    @Override
-    public synchronized void close() {
-      if (bar != null) {
-        bar.close();
-        bar = null;
-      }
-    }
+      progress.at(phase, done, total);
+    };
   }
 }

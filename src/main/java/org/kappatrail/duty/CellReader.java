@@ -1,7 +1,9 @@
 package org.kappatrail.duty;
 
 import java.sql.ResultSet;
+import java.sql.ResultSetMetaData;
 import java.sql.SQLException;
+import java.sql.Types;
 import java.util.List;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
@@ -14,10 +16,11 @@ final class CellReader {
   private final List<Bearing> bearings;
   private final Tally tally;
   private final ResultSet rows;
+  private final boolean[] narrow;
 
   private boolean ahead;
   private int bearing;
-  private DutyCells.Builder cells = new DutyCells.Builder();
+  private final DutyCells.Builder cells = new DutyCells.Builder();
   private long[] dropped = new long[ReadingState.values().length];
 
   private boolean cellOpen;
@@ -36,6 +39,7 @@ final class CellReader {
     this.bearings = bearings;
     this.tally = tally;
     this.rows = rows;
+    this.narrow = narrow(rows.getMetaData());
     this.ahead = rows.next();
   }
 
@@ -58,9 +62,9 @@ final class CellReader {
   private void add() throws SQLException {
     int rowState = rows.getInt(3);
     ReadingState kind = ReadingState.of(rowState);
-    long rowDay = rows.getLong(2);
-    long rowReadings = rows.getLong(7);
-    tally.add(rows.getInt(6), kind, rowDay / DAY_MS, rowReadings, rows.getLong(13));
+    long rowDay = whole(2);
+    long rowReadings = whole(7);
+    tally.add(rows.getInt(6), kind, rowDay / DAY_MS, rowReadings, whole(13));
     if (!kind.isReading()) {
       dropped[rowState] += rowReadings;
       return;
@@ -69,24 +73,37 @@ final class CellReader {
         cellOpen
             && rowDay == dayMs
             && rowState == state
-            && rows.getLong(4) == temperatureCell
-            && rows.getLong(5) == speedCell;
+            && whole(4) == temperatureCell
+            && whole(5) == speedCell;
     if (!same) {
       finishCell();
       cellOpen = true;
       dayMs = rowDay;
       state = rowState;
-      temperatureCell = rows.getLong(4);
-      speedCell = rows.getLong(5);
+      temperatureCell = whole(4);
+      speedCell = whole(5);
       lowest = Long.MAX_VALUE;
       highest = Long.MIN_VALUE;
     }
     readings += rowReadings;
-    ms += rows.getLong(8);
-    temperatureMs += rows.getLong(9);
-    lowest = Math.min(lowest, rows.getLong(10));
-    highest = Math.max(highest, rows.getLong(11));
-    speedMs += rows.getLong(12);
+    ms += whole(8);
+    temperatureMs += whole(9);
+    lowest = Math.min(lowest, whole(10));
+    highest = Math.max(highest, whole(11));
+    speedMs += whole(12);
+  }
+
+  /** Engines differ in the width of a column; read at another width than its own it is slow. */
+  private long whole(int column) throws SQLException {
+    return narrow[column] ? rows.getInt(column) : rows.getLong(column);
+  }
+
+  private static boolean[] narrow(ResultSetMetaData columns) throws SQLException {
+    boolean[] narrow = new boolean[columns.getColumnCount() + 1];
+    for (int column = 1; column < narrow.length; column++) {
+      narrow[column] = columns.getColumnType(column) == Types.INTEGER;
+    }
+    return narrow;
   }
 
   private void finishCell() {
@@ -117,7 +134,7 @@ final class CellReader {
     finishCell();
     DutyCells built = cells.build();
     DroppedReadings left = droppedReadings();
-    cells = new DutyCells.Builder();
+    cells.clear();
     dropped = new long[ReadingState.values().length];
     if (bearing == 0 || (built.size() == 0 && left.total() == 0)) {
       return Optional.empty();

@@ -90,12 +90,12 @@ final class DatabaseSource implements DutySource {
   }
 
   @Override
-  public void start() throws SQLException {
+  public void start(RowsRead progress) throws SQLException {
     stop();
     tally = new Tally(1);
     Statement statement = connection.createStatement();
     statement.setFetchSize(ROWS_AT_A_TIME);
-    running = new RunningStatement(statement, sql, bearings, tally);
+    running = new RunningStatement(statement, sql, bearings, tally, share -> {});
   }
 
   @Override

@@ -22,6 +22,7 @@ final class DuckEngine implements AutoCloseable {
     this.work = new WorkFolder(options.temporaryFolder());
     try {
       this.streaming = connect(true);
+      UnpackedLibrary.remove();
     } catch (SQLException | RuntimeException e) {
       work.close();
       throw e;
@@ -69,6 +70,17 @@ final class DuckEngine implements AutoCloseable {
     return columns;
   }
 
+  /** The one number of a query; 0 where there is none. */
+  long number(String sql) {
+    try (Connection plain = connect(false);
+        Statement statement = plain.createStatement();
+        ResultSet rows = statement.executeQuery(sql)) {
+      return rows.next() ? rows.getLong(1) : 0;
+    } catch (SQLException e) {
+      return 0;
+    }
+  }
+
   private Connection connect(boolean stream) throws SQLException {
     Properties properties = new Properties();
     properties.setProperty("jdbc_stream_results", Boolean.toString(stream));
@@ -95,6 +107,8 @@ final class DuckEngine implements AutoCloseable {
         "disabled_optimizers = 'join_order,build_side_probe_side,in_clause'",
         "autoinstall_known_extensions = false",
         "autoload_known_extensions = false",
+        "enable_progress_bar = true",
+        "enable_progress_bar_print = false",
         "TimeZone = 'UTC'");
   }
 

@@ -124,6 +124,11 @@ public final class DutyCells {
       return this;
     }
 
+    /** Starts anew. */
+    public void clear() {
+      size = 0;
+    }
+
     public DutyCells build() {
       return new DutyCells(this);
     }

@@ -15,6 +15,11 @@ public interface DutyLog extends AutoCloseable {
    */
   void forEachBearing(Consumer<BearingDuty> use);
 
+  /** The same, telling how far it has come where that is known. */
+  default void forEachBearing(Consumer<BearingDuty> use, RowsRead progress) {
+    forEachBearing(use);
+  }
+
   /** What became of every file; complete after {@link #forEachBearing}. */
   List<FileAccount> accounts();
 

@@ -10,7 +10,7 @@ import org.kappatrail.history.Problem;
 /** One place that readings come from: the files of a history, or a table of a database. */
 interface DutySource extends AutoCloseable {
   /** Runs the statement. */
-  void start() throws SQLException;
+  void start(RowsRead progress) throws SQLException;
 
   /** The next bearing in the order of the keys; null after the last one. */
   @Nullable BearingDuty next() throws SQLException;

@@ -28,6 +28,7 @@ final class FileSource implements DutySource {
   private final List<LogGroup> groups;
   private final List<FileReadings> readings;
   private final boolean[] serial;
+  private final long rowEstimate;
   private Tally tally;
   private @Nullable RunningStatement running;
 
@@ -58,6 +59,7 @@ final class FileSource implements DutySource {
         tables.add(Utf8Copy.of(header(file), engine.work().path(), tables.size()));
       }
       this.groups = LogGroup.of(tables);
+      this.rowEstimate = RowEstimate.of(tables, engine);
       this.readings =
           groups.stream().map(group -> new FileReadings(group, bearings, settings)).toList();
       this.serial = new boolean[groups.size()];
@@ -70,15 +72,16 @@ final class FileSource implements DutySource {
   }
 
   @Override
-  public void start() throws SQLException {
+  public void start(RowsRead progress) throws SQLException {
     stop();
+    tell(0, progress);
     try {
-      running = run();
+      running = run(progress);
     } catch (SQLException e) {
       if (Thread.currentThread().isInterrupted() || !canBeRetried(e)) {
         throw e;
       }
-      running = run();
+      running = run(progress);
     }
   }
 
@@ -157,9 +160,14 @@ final class FileSource implements DutySource {
     return DayCellsStatement.over(relation, bearings, settings, asOf);
   }
 
-  private RunningStatement run() throws SQLException {
+  private RunningStatement run(RowsRead progress) throws SQLException {
     tally = new Tally(tally.sources());
-    return new RunningStatement(engine.statement(), statement(), bearings, tally);
+    return new RunningStatement(
+        engine.statement(), statement(), bearings, tally, share -> tell(share, progress));
+  }
+
+  private void tell(double share, RowsRead progress) {
+    progress.at(Math.round(share * rowEstimate), rowEstimate);
   }
 
   private void stop() throws SQLException {

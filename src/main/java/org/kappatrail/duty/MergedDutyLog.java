@@ -33,11 +33,16 @@ final class MergedDutyLog implements DutyLog {
 
   @Override
   public void forEachBearing(Consumer<BearingDuty> use) {
+    forEachBearing(use, RowsRead.UNHEARD);
+  }
+
+  @Override
+  public void forEachBearing(Consumer<BearingDuty> use, RowsRead progress) {
     List<Problem> found = new ArrayList<>(firstProblems);
     Map<Integer, Long> unneeded = new TreeMap<>();
     List<@Nullable BearingDuty> heads = new ArrayList<>();
     for (DutySource source : sources) {
-      heads.add(first(source));
+      heads.add(first(source, progress));
     }
     BearingKey last = null;
     int least = least(heads);
@@ -99,9 +104,9 @@ final class MergedDutyLog implements DutyLog {
     sources.forEach(DutySource::close);
   }
 
-  private static @Nullable BearingDuty first(DutySource source) {
+  private static @Nullable BearingDuty first(DutySource source, RowsRead progress) {
     try {
-      source.start();
+      source.start(progress);
       return source.next();
     } catch (SQLException e) {
       throw explain(source, e);

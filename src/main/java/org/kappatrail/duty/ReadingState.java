@@ -20,6 +20,8 @@ public enum ReadingState {
   NEGATIVE_SPEED(13, "speed below 0"),
   JOINED(14, "used within another reading of the instant");
 
+  private static final ReadingState[] BY_CODE = values();
+
   private final int code;
   private final String label;
 
@@ -50,6 +52,6 @@ public enum ReadingState {
 
   /** The state of a code of the statement. */
   static ReadingState of(int code) {
-    return values()[code];
+    return BY_CODE[code];
   }
 }

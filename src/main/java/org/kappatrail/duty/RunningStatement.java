@@ -4,6 +4,7 @@ import java.sql.ResultSet;
 import java.sql.SQLException;
 import java.sql.Statement;
 import java.util.List;
+import java.util.function.DoubleConsumer;
 import org.jspecify.annotations.Nullable;
 import org.kappatrail.history.Bearing;
 
@@ -13,11 +14,12 @@ final class RunningStatement implements AutoCloseable {
   private final ResultSet rows;
   private final CellReader cells;
 
-  RunningStatement(Statement statement, String sql, List<Bearing> bearings, Tally tally)
+  RunningStatement(
+      Statement statement, String sql, List<Bearing> bearings, Tally tally, DoubleConsumer progress)
       throws SQLException {
     this.statement = statement;
     try {
-      this.rows = CancelOnInterrupt.run(statement, () -> statement.executeQuery(sql));
+      this.rows = QueryWatch.run(statement, progress, () -> statement.executeQuery(sql));
       this.cells = new CellReader(bearings, tally, rows);
     } catch (SQLException | RuntimeException e) {
       statement.close();

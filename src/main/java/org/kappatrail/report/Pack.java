@@ -1,23 +1,22 @@
 package org.kappatrail.report;
 
 import java.io.IOException;
+import java.io.InterruptedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
-import java.util.ArrayList;
-import java.util.Comparator;
+import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
-import java.util.stream.Stream;
-import org.kappatrail.report.chart.AssetChart;
 import org.kappatrail.report.chart.ChartFiles;
-import org.kappatrail.report.chart.Drawing;
-import org.kappatrail.report.page.FileNames;
+import org.kappatrail.report.json.ReviewJson;
 import org.kappatrail.report.page.Page;
+import org.kappatrail.report.page.Picture;
+import org.kappatrail.report.page.Pictures;
 import org.kappatrail.report.table.CsvFile;
 import org.kappatrail.report.table.ReviewTables;
-import org.kappatrail.review.AssetReview;
+import org.kappatrail.report.workbook.ReviewWorkbook;
 import org.kappatrail.review.Progress;
 import org.kappatrail.review.Review;
 import tech.tablesaw.api.Table;
@@ -54,95 +53,68 @@ public final class Pack {
    * @return the pack's folder
    */
   public Path writeTo(Path directory) throws IOException {
-    Files.createDirectories(directory);
-    Path place = directory.resolve(review.asOf().toString());
-    Path fresh = Files.createTempDirectory(directory, "." + review.asOf() + ".new-");
-    try {
-      write(fresh);
-      swap(fresh, place);
-    } finally {
-      deleteTree(fresh);
+    try (Draft draft = new Draft(directory, review.asOf())) {
+      write(draft.pack());
+      return draft.publish();
     }
-    return place;
   }
 
   private void write(Path folder) throws IOException {
-    for (Table table : ReviewTables.all(review)) {
+    progress.at("tables and page", 0, 1);
+    List<Table> tables = ReviewTables.all(review);
+    for (Table table : tables) {
       CsvFile.write(table, folder.resolve(table.name() + ".csv"));
     }
+    CsvFile.write(ReviewTables.kappaDaily(review), folder.resolve("kappa-daily.csv"));
+    new ReviewWorkbook(review, tables).write(folder.resolve("review.xlsx"));
+    new ReviewJson(review, manifest.programVersion()).write(folder.resolve("review.json"));
     manifest.write(folder.resolve("manifest.json"), review);
-    Map<String, String> pictures = charts ? writeCharts(folder) : Map.of();
-    Files.writeString(folder.resolve("index.html"), new Page(review, pictures).html());
+    Pictures pictures = charts ? writeCharts(folder) : Pictures.none();
+    new Page(review, pictures).write(folder);
   }
 
-  /** Writes the charts and gives each asset's SVG text for the page. */
-  private Map<String, String> writeCharts(Path folder) throws IOException {
+  /** Writes the charts; the page reads them again when their turn comes. */
+  private Pictures writeCharts(Path folder) throws IOException {
     Path place = Files.createDirectory(folder.resolve("charts"));
-    List<AssetReview> assets = review.assets();
-    Map<String, String> names = FileNames.of(assets.stream().map(a -> a.asset().id()).toList());
-    Map<String, String> pictures = new TreeMap<>();
-    List<Job> jobs = new ArrayList<>();
-    for (AssetReview asset : assets) {
-      Optional<Drawing> drawing = AssetChart.of(review, asset);
-      drawing.ifPresent(
-          found ->
-              jobs.add(
-                  new Job(
-                      asset.asset().id(), names.getOrDefault(asset.asset().id(), "asset"), found)));
-    }
-    List<Result> results = jobs.parallelStream().map(job -> draw(job, place)).toList();
+    List<ChartJob> jobs = ChartJob.of(review);
+    Thread caller = Thread.currentThread();
+    List<Result> results = jobs.parallelStream().map(job -> draw(job, place, caller)).toList();
+    Map<ChartJob.Kind, Map<String, Picture>> found = new EnumMap<>(ChartJob.Kind.class);
     int done = 0;
     for (Result result : results) {
       if (result.failure().isPresent()) {
         throw result.failure().get();
       }
-      pictures.put(result.asset(), result.svg());
+      found
+          .computeIfAbsent(result.job().kind(), kind -> new TreeMap<>())
+          .put(result.job().subject(), result.picture());
       progress.at("charts", ++done, results.size());
     }
-    return pictures;
+    return new Pictures(
+        found.getOrDefault(ChartJob.Kind.TRAIL, Map.of()),
+        found.getOrDefault(ChartJob.Kind.CORRELATION, Map.of()),
+        only(found, ChartJob.Kind.FLEET),
+        only(found, ChartJob.Kind.FLEET_CORRELATION));
   }
 
-  private record Job(String asset, String fileName, Drawing drawing) {}
+  private static Optional<Picture> only(
+      Map<ChartJob.Kind, Map<String, Picture>> found, ChartJob.Kind kind) {
+    return found.getOrDefault(kind, Map.of()).values().stream().findFirst();
+  }
 
-  private record Result(String asset, String svg, Optional<IOException> failure) {}
+  private record Result(ChartJob job, Picture picture, Optional<IOException> failure) {}
 
-  private static Result draw(Job job, Path place) {
+  private static Result draw(ChartJob job, Path place, Thread caller) {
+    Path file = place.resolve(job.fileName() + ".svg");
     try {
-      String svg = ChartFiles.svg(job.drawing());
-      Files.writeString(place.resolve(job.fileName() + ".svg"), svg);
-      ChartFiles.writePng(job.drawing(), place.resolve(job.fileName() + ".png"));
-      return new Result(job.asset(), svg, Optional.empty());
-    } catch (IOException e) {
-      return new Result(job.asset(), "", Optional.of(e));
-    }
-  }
-
-  private static void swap(Path fresh, Path place) throws IOException {
-    if (!Files.exists(place)) {
-      Files.move(fresh, place);
-      return;
-    }
-    Path old = Files.createTempDirectory(place.getParent(), "." + place.getFileName() + ".old-");
-    Path aside = old.resolve("pack");
-    Files.move(place, aside);
-    try {
-      Files.move(fresh, place);
-    } catch (IOException e) {
-      Files.move(aside, place);
-      throw e;
-    } finally {
-      deleteTree(old);
-    }
-  }
-
-  private static void deleteTree(Path folder) throws IOException {
-    if (!Files.exists(folder)) {
-      return;
-    }
-    try (Stream<Path> tree = Files.walk(folder)) {
-      for (Path path : tree.sorted(Comparator.reverseOrder()).toList()) {
-        Files.delete(path);
+      if (caller.isInterrupted()) {
+        throw new InterruptedIOException("the drawing of charts was stopped");
       }
+      Files.writeString(file, ChartFiles.svg(job.drawing()));
+      ChartFiles.writePng(job.drawing(), place.resolve(job.fileName() + ".png"));
+      return new Result(job, Picture.ofFile(file, job.drawing().spots()), Optional.empty());
+    } catch (IOException e) {
+      return new Result(job, Picture.ofText(""), Optional.of(e));
     }
   }
 }

@@ -49,8 +49,12 @@ public record BearingReview(
   }
 
   private Optional<KappaPoint> film(int back) {
-    List<KappaPoint> films = trail.stream().filter(point -> point.film().isPresent()).toList();
-    int index = films.size() - 1 - back;
-    return index < 0 ? Optional.empty() : Optional.of(films.get(index));
+    int left = back;
+    for (int i = trail.size() - 1; i >= 0; i--) {
+      if (trail.get(i).film().isPresent() && left-- == 0) {
+        return Optional.of(trail.get(i));
+      }
+    }
+    return Optional.empty();
   }
 }

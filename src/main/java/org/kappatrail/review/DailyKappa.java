@@ -16,22 +16,31 @@ import org.kappatrail.tribology.ViscosityRatio;
 final class DailyKappa {
   private static final double MS_PER_HOUR = 3_600_000.0;
 
-  private DailyKappa() {}
+  private final Bearing bearing;
+  private final DutyCells cells;
+  private final WeightedCells temperatures = new WeightedCells(0);
+  private final WeightedCells kappas = new WeightedCells(0);
+  private double mixedMillis;
+
+  private DailyKappa(Bearing bearing, DutyCells cells) {
+    this.bearing = bearing;
+    this.cells = cells;
+  }
 
   /** Days with running hours, in time. */
   static List<DayKappa> of(Bearing bearing, DutyCells cells, OilTimeline oil) {
+    DailyKappa daily = new DailyKappa(bearing, cells);
     List<DayKappa> days = new ArrayList<>();
     for (int row = 0; row < cells.size(); ) {
       int end = DayRows.endOfDay(cells, row);
-      day(bearing, cells, row, end, oil.on(cells.epochDay(row))).ifPresent(days::add);
+      daily.day(row, end, oil.on(cells.epochDay(row))).ifPresent(days::add);
       row = end;
     }
     return days;
   }
 
-  private static Optional<DayKappa> day(
-      Bearing bearing, DutyCells cells, int from, int to, Optional<OilViscosity> oil) {
-    WeightedCells temperatures = new WeightedCells(to - from);
+  private Optional<DayKappa> day(int from, int to, Optional<OilViscosity> oil) {
+    temperatures.clear();
     double millis = 0;
     double speedMillis = 0;
     for (int row = from; row < to; row++) {
@@ -44,67 +53,66 @@ final class DailyKappa {
             cells.readings(row),
             weight);
         millis += weight;
-        speedMillis += weight * speedRpm(bearing, cells, row);
+        speedMillis += weight * speedRpm(row);
       }
     }
     if (millis == 0) {
       return Optional.empty();
     }
-    Optional<Kappas> kappas = oil.flatMap(viscosity -> kappas(bearing, cells, from, to, viscosity));
+    boolean known = oil.isPresent() && findKappas(from, to, oil.get());
     return Optional.of(
         new DayKappa(
             LocalDate.ofEpochDay(cells.epochDay(from)),
             millis / MS_PER_HOUR,
             temperatures.median().getAsDouble() + bearing.temperatureOffsetC(),
             speedMillis / millis,
-            quantile(kappas, 0.5),
-            quantile(kappas, 0.05),
-            quantile(kappas, 0.95),
-            kappas
-                .map(found -> OptionalDouble.of(found.mixedMillis() / MS_PER_HOUR))
-                .orElse(OptionalDouble.empty())));
+            known ? kappas.quantile(0.5) : OptionalDouble.empty(),
+            known ? kappas.quantile(0.05) : OptionalDouble.empty(),
+            known ? kappas.quantile(0.95) : OptionalDouble.empty(),
+            known ? OptionalDouble.of(mixedMillis / MS_PER_HOUR) : OptionalDouble.empty()));
   }
 
-  private record Kappas(WeightedCells values, double mixedMillis) {}
-
-  private static Optional<Kappas> kappas(
-      Bearing bearing, DutyCells cells, int from, int to, OilViscosity oil) {
-    WeightedCells values = new WeightedCells(to - from);
-    double mixedMillis = 0;
+  /** False where the oil's law does not hold for every cell. */
+  private boolean findKappas(int from, int to, OilViscosity oil) {
+    kappas.clear();
+    mixedMillis = 0;
     try {
       for (int row = from; row < to; row++) {
         if (cells.running(row)) {
-          double kappa = kappa(bearing, cells, row, cells.temperatureC(row), oil);
-          values.add(
-              kappa(bearing, cells, row, cells.highestC(row), oil),
-              kappa,
-              kappa(bearing, cells, row, cells.lowestC(row), oil),
-              cells.readings(row),
-              (double) cells.millis(row));
-          if (kappa < LubricationRegime.FULL_FILM_FROM) {
-            mixedMillis += cells.millis(row);
-          }
+          addKappas(row, oil);
         }
       }
+      return true;
     } catch (IllegalArgumentException outsideTheLaw) {
-      return Optional.empty();
+      return false;
     }
-    return Optional.of(new Kappas(values, mixedMillis));
   }
 
-  /** κ of one cell at a logged temperature of it. */
-  private static double kappa(
-      Bearing bearing, DutyCells cells, int row, double loggedC, OilViscosity oil) {
-    return ViscosityRatio.kappa(
-        oil.viscosityCst(loggedC + bearing.temperatureOffsetC()),
-        Iso281RatedViscosity.ratedViscosityCst(speedRpm(bearing, cells, row), bearing.pitchMm()));
+  private void addKappas(int row, OilViscosity oil) {
+    double ratedCst = Iso281RatedViscosity.ratedViscosityCst(speedRpm(row), bearing.pitchMm());
+    double kappa = kappa(cells.temperatureC(row), oil, ratedCst);
+    double millis = cells.millis(row);
+    if (cells.lowestC(row) == cells.highestC(row)) {
+      kappas.add(kappa, kappa, kappa, cells.readings(row), millis);
+    } else {
+      kappas.add(
+          kappa(cells.highestC(row), oil, ratedCst),
+          kappa,
+          kappa(cells.lowestC(row), oil, ratedCst),
+          cells.readings(row),
+          millis);
+    }
+    if (kappa < LubricationRegime.FULL_FILM_FROM) {
+      mixedMillis += millis;
+    }
   }
 
-  private static double speedRpm(Bearing bearing, DutyCells cells, int row) {
+  /** κ at a logged temperature. */
+  private double kappa(double loggedC, OilViscosity oil, double ratedCst) {
+    return ViscosityRatio.kappa(oil.viscosityCst(loggedC + bearing.temperatureOffsetC()), ratedCst);
+  }
+
+  private double speedRpm(int row) {
     return cells.speedLogged(row) ? cells.speedRpm(row) : bearing.speedRpm();
-  }
-
-  private static OptionalDouble quantile(Optional<Kappas> kappas, double share) {
-    return kappas.isPresent() ? kappas.get().values().quantile(share) : OptionalDouble.empty();
   }
 }

@@ -7,6 +7,7 @@ import java.util.Optional;
 import org.kappatrail.history.FileAccount;
 import org.kappatrail.history.Problem;
 import org.kappatrail.history.Settings;
+import org.kappatrail.review.correlation.CorrelationResults;
 
 /**
  * The whole review of a site; everything that is reported is in it.
@@ -15,6 +16,7 @@ import org.kappatrail.history.Settings;
  * @param settings settings in force
  * @param assets assets in the order of the register
  * @param since what changed since an earlier day, where that was asked for
+ * @param correlations what goes with what in their samples
  * @param problems inputs that could not be used
  * @param files what became of every input file
  */
@@ -23,6 +25,7 @@ public record Review(
     Settings settings,
     List<AssetReview> assets,
     Optional<Since> since,
+    CorrelationResults correlations,
     List<Problem> problems,
     List<FileAccount> files) {
 

@@ -108,10 +108,12 @@ public final class Reviewer {
             review(duty, bearings, logFindings);
           }
           progress.at("bearings", bearings.size(), total);
-        });
+        },
+        (rows, ofRows) -> progress.at("log rows", rows, ofRows));
     for (Bearing bearing : history.bearings()) {
       if (!bearings.containsKey(bearing.key())) {
         review(BearingDuty.none(bearing.key()), bearings, logFindings);
+        progress.at("bearings", bearings.size(), total);
       }
     }
     progress.at("bearings", total, total);

@@ -1,7 +1,6 @@
 package org.kappatrail.review;
 
 import java.util.Arrays;
-import java.util.Comparator;
 import java.util.OptionalDouble;
 
 /**
@@ -22,6 +21,7 @@ final class WeightedCells {
   private long[] readings;
   private int size;
   private boolean sorted;
+  private final StableOrder order = new StableOrder();
 
   WeightedCells(int capacity) {
     int room = Math.max(capacity, 4);
@@ -30,6 +30,12 @@ final class WeightedCells {
     highest = new double[room];
     weights = new double[room];
     readings = new long[room];
+  }
+
+  /** Takes all cells out. */
+  void clear() {
+    size = 0;
+    sorted = false;
   }
 
   void add(double value, double weight) {
@@ -65,20 +71,24 @@ final class WeightedCells {
     if (size == 0) {
       return OptionalDouble.empty();
     }
-    sort();
+    if (!sorted) {
+      order.sort(means, size);
+      sorted = true;
+    }
     double total = 0;
-    for (int i = 0; i < size; i++) {
-      total += weights[i];
+    for (int rank = 0; rank < size; rank++) {
+      total += weights[order.place(rank)];
     }
     double target = share * total;
     double below = 0;
-    for (int i = 0; i < size; i++) {
-      if (below + weights[i] >= target) {
-        return OptionalDouble.of(within(i, Math.max(0, (target - below) / weights[i])));
+    for (int rank = 0; rank < size; rank++) {
+      int cell = order.place(rank);
+      if (below + weights[cell] >= target) {
+        return OptionalDouble.of(within(cell, Math.max(0, (target - below) / weights[cell])));
       }
-      below += weights[i];
+      below += weights[cell];
     }
-    return OptionalDouble.of(highest[size - 1]);
+    return OptionalDouble.of(highest[order.place(size - 1)]);
   }
 
   /** The value up to which a share of a cell's weight lies. */
@@ -98,29 +108,5 @@ final class WeightedCells {
     }
     double bend = Math.min(high, Math.max(low, 2 * mean - (low + high) / 2));
     return share <= 0.5 ? low + 2 * share * (bend - low) : bend + (2 * share - 1) * (high - bend);
-  }
-
-  private void sort() {
-    if (sorted) {
-      return;
-    }
-    Integer[] order = new Integer[size];
-    Arrays.setAll(order, i -> i);
-    Arrays.sort(order, Comparator.comparingDouble(i -> means[i]));
-    lowest = pick(lowest, order);
-    highest = pick(highest, order);
-    weights = pick(weights, order);
-    long[] counts = readings.clone();
-    Arrays.setAll(readings, i -> i < order.length ? counts[order[i]] : 0);
-    means = pick(means, order);
-    sorted = true;
-  }
-
-  private static double[] pick(double[] values, Integer[] order) {
-    double[] picked = new double[order.length];
-    for (int i = 0; i < order.length; i++) {
-      picked[i] = values[order[i]];
-    }
-    return picked;
   }
 }

@@ -1,9 +1,6 @@
 package org.kappatrail.statistics;
 
 import java.util.Arrays;
-import org.apache.commons.math3.stat.ranking.NaNStrategy;
-import org.apache.commons.math3.stat.ranking.NaturalRanking;
-import org.apache.commons.math3.stat.ranking.TiesStrategy;
 
 /** Ranks from 1 (least) to n, equal values sharing the mean of their ranks. */
 public final class AverageRanks {
@@ -16,10 +13,27 @@ public final class AverageRanks {
    */
   public static double[] rank(double[] values) {
     Inputs.requireFinite(values, "values");
-    if (values.length == 0) {
-      return new double[0];
+    double[] sorted = new double[values.length];
+    for (int i = 0; i < values.length; i++) {
+      sorted[i] = values[i] + 0.0;
     }
-    double[] oneZero = Arrays.stream(values).map(value -> value + 0.0).toArray();
-    return new NaturalRanking(NaNStrategy.FAILED, TiesStrategy.AVERAGE).rank(oneZero);
+    Arrays.sort(sorted);
+    double[] distinct = new double[values.length];
+    double[] ranks = new double[values.length];
+    int groups = 0;
+    for (int from = 0; from < sorted.length; ) {
+      int to = from;
+      while (to < sorted.length && sorted[to] == sorted[from]) {
+        to++;
+      }
+      distinct[groups] = sorted[from];
+      ranks[groups++] = (from + 1 + to) / 2.0;
+      from = to;
+    }
+    double[] inOrder = new double[values.length];
+    for (int i = 0; i < values.length; i++) {
+      inOrder[i] = ranks[Arrays.binarySearch(distinct, 0, groups, values[i] + 0.0)];
+    }
+    return inOrder;
   }
 }

@@ -64,6 +64,11 @@ public record CorrelationTest(
     return notBelow(leastOfRanks(Math.max(0, nEffective - 1)), of(coefficient, nEffective));
   }
 
+  /** The same with a p that is no smaller than another bound on it, from 0 to 1. */
+  public CorrelationTest withLeastP(double least) {
+    return notBelow(least, this);
+  }
+
   private static double leastOfRanks(double pairs) {
     return Math.min(1, 2 * Math.exp(-Gamma.logGamma(pairs + 1)));
   }

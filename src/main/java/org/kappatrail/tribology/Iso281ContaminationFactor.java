@@ -1,8 +1,11 @@
 package org.kappatrail.tribology;
 
+import java.util.EnumMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalInt;
+import java.util.stream.Collectors;
 
 /**
  * Contamination factor e_C from the cleanliness code of the oil: min(1, c1 κ^0.68 Dpw^0.55) (1 −
@@ -24,7 +27,20 @@ public final class Iso281ContaminationFactor {
 
   private Iso281ContaminationFactor() {}
 
-  private record OilClass(OilSupply supply, int highest6, int highest14, double c1, double c2) {
+  private static final Map<OilSupply, List<OilClass>> BY_SUPPLY =
+      CLASSES.stream()
+          .collect(
+              Collectors.groupingBy(
+                  OilClass::supply, () -> new EnumMap<>(OilSupply.class), Collectors.toList()));
+
+  private record OilClass(
+      OilSupply supply,
+      int highest6,
+      int highest14,
+      double c1,
+      double c2,
+      String within,
+      String beyond) {
     boolean covers(int number6, int number14) {
       return number6 <= highest6 && number14 <= highest14;
     }
@@ -44,27 +60,21 @@ public final class Iso281ContaminationFactor {
     if (number6.isEmpty() || number14.isEmpty()) {
       return Optional.empty();
     }
-    List<OilClass> classes =
-        CLASSES.stream().filter(candidate -> candidate.supply() == supply).toList();
-    Optional<OilClass> covering =
-        classes.stream()
-            .filter(candidate -> candidate.covers(number6.getAsInt(), number14.getAsInt()))
-            .findFirst();
-    OilClass used = covering.orElseGet(() -> classes.get(classes.size() - 1));
+    List<OilClass> classes = BY_SUPPLY.getOrDefault(supply, List.of());
+    OilClass used = classes.get(classes.size() - 1);
+    boolean dirtier = true;
+    for (OilClass candidate : classes) {
+      if (candidate.covers(number6.getAsInt(), number14.getAsInt())) {
+        used = candidate;
+        dirtier = false;
+        break;
+      }
+    }
     double clipped =
         Math.min(ViscosityRatio.HIGHEST_FOR_LIFE, Math.max(ViscosityRatio.LOWEST_FOR_LIFE, kappa));
     return Optional.of(
         new ContaminationFactor(
-            used.factor(clipped, pitchMm), covering.isEmpty(), basis(used, covering.isEmpty())));
-  }
-
-  private static String basis(OilClass used, boolean dirtier) {
-    return supplyName(used.supply())
-        + ", "
-        + (dirtier ? "dirtier than -/" : "up to -/")
-        + used.highest6()
-        + "/"
-        + used.highest14();
+            used.factor(clipped, pitchMm), dirtier, dirtier ? used.beyond() : used.within()));
   }
 
   private static String supplyName(OilSupply supply) {
@@ -72,11 +82,17 @@ public final class Iso281ContaminationFactor {
   }
 
   private static OilClass oilClass(List<String> row) {
+    OilSupply supply = OilSupply.parse(row.get(0)).orElseThrow();
+    int highest6 = PublishedTable.whole(row, 1);
+    int highest14 = PublishedTable.whole(row, 2);
+    String limit = highest6 + "/" + highest14;
     return new OilClass(
-        OilSupply.parse(row.get(0)).orElseThrow(),
-        PublishedTable.whole(row, 1),
-        PublishedTable.whole(row, 2),
+        supply,
+        highest6,
+        highest14,
         PublishedTable.number(row, 4),
-        PublishedTable.number(row, 5));
+        PublishedTable.number(row, 5),
+        supplyName(supply) + ", up to -/" + limit,
+        supplyName(supply) + ", dirtier than -/" + limit);
   }
 }

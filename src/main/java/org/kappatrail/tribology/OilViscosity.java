@@ -20,12 +20,6 @@ public record OilViscosity(
   private static final double COOL_C = 40;
   private static final double HOT_C = 100;
 
-  /**
-   * Half the step in ln ν40 over which the sensitivity is taken, about one σ of a laboratory. The
-   * linear interpolation in the table of ASTM D2270 has kinks; a far smaller step would show them.
-   */
-  private static final double HALF_STEP_LN = 0.005;
-
   /** Where a viscosity at 100 °C comes from, most direct first. */
   public enum Source {
     MEASURED("measured"),
@@ -135,16 +129,7 @@ public record OilViscosity(
    * is undefined.
    */
   public double sensitivityToV40(double temperatureC) {
-    double thickerV40 = viscosity40Cst * Math.exp(HALF_STEP_LN);
-    double thinnerV40 = viscosity40Cst * Math.exp(-HALF_STEP_LN);
-    OilViscosity thicker = withIndexOf(thickerV40, this);
-    OilViscosity thinner = withIndexOf(thinnerV40, this);
-    if (thicker.source != thinner.source) {
-      thicker = withSlope(thickerV40, law.b());
-      thinner = withSlope(thinnerV40, law.b());
-    }
-    return Math.log(thicker.viscosityCst(temperatureC) / thinner.viscosityCst(temperatureC))
-        / (2 * HALF_STEP_LN);
+    return OilSensitivity.of(this).at(temperatureC);
   }
 
   /** ∂lnν/∂T at a temperature, per °C, below 0. */
@@ -156,7 +141,7 @@ public record OilViscosity(
     return new OilViscosity(v40, v100, source, AstmD341.through(COOL_C, v40, HOT_C, v100));
   }
 
-  private static OilViscosity withSlope(double v40, double b) {
+  static OilViscosity withSlope(double v40, double b) {
     AstmD341 law = AstmD341.withSlope(b, COOL_C, v40);
     return new OilViscosity(v40, law.viscosityCst(HOT_C), Source.SLOPE, law);
   }

@@ -26,6 +26,7 @@ import org.kappatrail.history.Sample;
 import org.kappatrail.history.SampleColumns;
 import org.kappatrail.history.Settings;
 import org.kappatrail.history.SourceLine;
+import org.kappatrail.review.decision.Cleanliness;
 import org.kappatrail.tribology.BearingType;
 import org.kappatrail.tribology.CleanlinessCode;
 import org.kappatrail.tribology.OilSupply;
@@ -36,6 +37,7 @@ public final class OneBearing {
   private static final long DAY_MS = 86_400_000;
 
   private final String id;
+  private OptionalDouble volumeL = OptionalDouble.empty();
   private Asset asset;
   private Bearing bearing;
   private final List<Oil> oils = new ArrayList<>();
@@ -73,7 +75,7 @@ public final class OneBearing {
         "",
         oil,
         OilSupply.BATH,
-        OptionalDouble.empty(),
+        volumeL,
         OptionalDouble.empty(),
         change,
         cooling,
@@ -106,6 +108,7 @@ public final class OneBearing {
   }
 
   public OneBearing otherOil(Oil oil) {
+    oils.removeIf(known -> known.id().equals(oil.id()));
     oils.add(oil);
     return this;
   }
@@ -144,6 +147,32 @@ public final class OneBearing {
     return this;
   }
 
+  /** The register of this asset again, without samples, days and events. */
+  public OneBearing copy() {
+    OneBearing other = new OneBearing(id);
+    other.asset = asset;
+    other.bearing = bearing;
+    other.oils.clear();
+    other.oils.addAll(oils);
+    return other;
+  }
+
+  public OneBearing withoutCosts() {
+    asset =
+        asset(asset.oil(), OptionalDouble.empty(), OptionalDouble.empty(), OptionalDouble.empty());
+    return this;
+  }
+
+  public Bearing bearing() {
+    return bearing;
+  }
+
+  /** What the contamination factor rests on: the code that every sample here carries. */
+  public Cleanliness cleanliness() {
+    return new Cleanliness(
+        OptionalDouble.empty(), CleanlinessCode.find("18/16/13"), asset.supply());
+  }
+
   /** A day of 24 running hours at one temperature and the nominal speed. */
   public OneBearing day(LocalDate date, double temperatureC) {
     days.put(date, new double[] {temperatureC, bearing.speedRpm()});
@@ -174,15 +203,40 @@ public final class OneBearing {
   }
 
   public OneBearing oilChange(LocalDate date) {
+    return oilChange(date, asset.oil());
+  }
+
+  public OneBearing oilChange(LocalDate date, String oil) {
     events.add(
         new Event(
             id,
             date,
             EventKind.OIL_CHANGE,
-            Optional.empty(),
+            Optional.of(oil),
             OptionalDouble.empty(),
             Optional.empty(),
             ""));
+    return this;
+  }
+
+  /** A top-up of an oil that the record does not name. */
+  public OneBearing topUp(LocalDate date, double litres) {
+    events.add(
+        new Event(
+            id,
+            date,
+            EventKind.TOP_UP,
+            Optional.empty(),
+            OptionalDouble.of(litres),
+            Optional.empty(),
+            ""));
+    return this;
+  }
+
+  /** Volume of a charge, litres. */
+  public OneBearing volume(double litres) {
+    volumeL = OptionalDouble.of(litres);
+    asset = asset(asset.oil(), asset.changeCost(), asset.coolingCost(), asset.failureCost());
     return this;
   }
 

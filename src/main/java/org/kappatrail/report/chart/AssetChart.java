@@ -49,10 +49,17 @@ public final class AssetChart {
                     .map(DayKappa::date))
             .sorted()
             .toList();
-    return days.isEmpty()
-        ? Optional.empty()
-        : Optional.of(
-            new TimeSpan(days.get(0).minusDays(6), days.get(days.size() - 1).plusDays(6)));
+    if (days.isEmpty()) {
+      return Optional.empty();
+    }
+    LocalDate last = days.get(days.size() - 1).plusDays(6);
+    LocalDate foreseen =
+        shown(asset)
+            .flatMap(TrendOnPanel::lastDay)
+            .map(day -> LocalDate.ofEpochDay(day).plusDays(2))
+            .orElse(last);
+    return Optional.of(
+        new TimeSpan(days.get(0).minusDays(6), foreseen.isAfter(last) ? foreseen : last));
   }
 
   private PanelStack stack(Review review) {
@@ -64,10 +71,12 @@ public final class AssetChart {
             (site.isEmpty() ? "" : site + "; ")
                 + "oil samples and bearing logs up to "
                 + review.asOf()
-                + "; κ by ISO 281 from viscosity by ASTM D341; whiskers: 95 % interval",
+                + "; κ by ISO 281 from viscosity by ASTM D341; whiskers: 95 % interval; fan: Theil–Sen slope"
+                + " of the oil at the present operating point",
             span,
             EventMark.of(asset));
-    Optional<BearingReview> shown = shown();
+    stack.samples(asset.samples());
+    Optional<BearingReview> shown = shown(asset);
     shown.ifPresent(bearing -> KappaPanel.of(asset, bearing, span).ifPresent(stack::add));
     stack.add(viscosity());
     shown.ifPresent(bearing -> stack.add(temperature(bearing)));
@@ -89,7 +98,7 @@ public final class AssetChart {
     return bearing + rest + "; oil " + asset.oil().id();
   }
 
-  private Optional<BearingReview> shown() {
+  private static Optional<BearingReview> shown(AssetReview asset) {
     Optional<BearingReview> governing = asset.governing();
     return governing.isPresent() ? governing : asset.bearings().stream().findFirst();
   }

@@ -16,6 +16,7 @@ import javax.imageio.ImageIO;
 import javax.imageio.ImageWriteParam;
 import javax.imageio.ImageWriter;
 import javax.imageio.stream.ImageOutputStream;
+import javax.imageio.stream.MemoryCacheImageOutputStream;
 
 /** Writes a drawing as PNG at twice its size, and as SVG. */
 public final class ChartFiles {
@@ -49,7 +50,7 @@ public final class ChartFiles {
   private static byte[] encode(BufferedImage image) throws IOException {
     ByteArrayOutputStream bytes = new ByteArrayOutputStream();
     ImageWriter writer = ImageIO.getImageWritersByFormatName("png").next();
-    try (ImageOutputStream out = ImageIO.createImageOutputStream(bytes)) {
+    try (ImageOutputStream out = new MemoryCacheImageOutputStream(bytes)) {
       ImageWriteParam param = writer.getDefaultWriteParam();
       param.setCompressionMode(ImageWriteParam.MODE_EXPLICIT);
       param.setCompressionQuality(FAST_COMPRESSION);
@@ -70,6 +71,6 @@ public final class ChartFiles {
             .getDocument(g.getCommands(), new PageSize(0, 0, drawing.width(), drawing.height()));
     ByteArrayOutputStream bytes = new ByteArrayOutputStream();
     document.writeTo(bytes);
-    return bytes.toString(StandardCharsets.UTF_8);
+    return SvgText.compact(bytes.toString(StandardCharsets.UTF_8));
   }
 }

@@ -19,6 +19,11 @@ public final class Palette {
   public static final Color PARTICLES = new Color(0x70, 0x68, 0x91);
   public static final Color IRON = new Color(0x5E, 0x40, 0x26);
 
+  /** Coefficients of what moves together, and of what moves against each other. */
+  public static final Color TOGETHER = new Color(0x3F, 0x7A, 0x35);
+
+  public static final Color AGAINST = new Color(0x97, 0x35, 0x70);
+
   /** Washes behind κ, from the boundary regime to the full film. */
   public static final Color BOUNDARY_WASH = new Color(0xD6, 0xDF, 0xEA);
 

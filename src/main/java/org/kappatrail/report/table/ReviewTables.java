@@ -4,8 +4,10 @@ import java.util.List;
 import java.util.OptionalDouble;
 import java.util.function.Function;
 import java.util.function.ToDoubleFunction;
+import java.util.stream.Stream;
 import org.kappatrail.history.Problem;
 import org.kappatrail.history.SampleColumns;
+import org.kappatrail.review.AssetReview;
 import org.kappatrail.review.BearingReview;
 import org.kappatrail.review.DayKappa;
 import org.kappatrail.review.Film;
@@ -22,13 +24,13 @@ import tech.tablesaw.api.Table;
 public final class ReviewTables {
   private ReviewTables() {}
 
-  /** Every table of the pack; a table's name is its file's. */
+  /** Every table of the pack but that of the days; a table's name is its file's. */
   public static List<Table> all(Review review) {
     return List.of(
         kappaHistory(review),
-        kappaDaily(review),
         TrendTables.attribution(review),
         TrendTables.drift(review),
+        CorrelationTable.of(review),
         DecisionTables.verdicts(review),
         DecisionTables.remedies(review),
         findings(review),
@@ -95,12 +97,22 @@ public final class ReviewTables {
         .from(rows);
   }
 
-  /** A row per running day and bearing. */
-  public static Table kappaDaily(Review review) {
-    List<DayRow> rows =
-        bearings(review)
-            .flatMap(bearing -> bearing.days().stream().map(day -> new DayRow(bearing, day)))
-            .toList();
+  /**
+   * A row per running day and bearing, a table for each asset after one without rows: a site has
+   * too many days to hold them all twice.
+   */
+  public static Stream<Table> kappaDaily(Review review) {
+    TableOf<DayRow> table = daily();
+    return Stream.concat(Stream.of(List.<AssetReview>of()), review.assets().stream().map(List::of))
+        .map(assets -> table.from(assets.stream().flatMap(ReviewTables::days).toList()));
+  }
+
+  private static Stream<DayRow> days(AssetReview asset) {
+    return asset.bearings().stream()
+        .flatMap(bearing -> bearing.days().stream().map(day -> new DayRow(bearing, day)));
+  }
+
+  private static TableOf<DayRow> daily() {
     return new TableOf<DayRow>("kappa-daily")
         .text("asset", row -> row.bearing().bearing().asset())
         .text("bearing", row -> row.bearing().bearing().id())
@@ -111,8 +123,7 @@ public final class ReviewTables {
         .number("kappa", row -> row.day().kappa())
         .number("kappa_p05", row -> row.day().kappaP05())
         .number("kappa_p95", row -> row.day().kappaP95())
-        .number("mixed_hours", row -> row.day().mixedHours())
-        .from(rows);
+        .number("mixed_hours", row -> row.day().mixedHours());
   }
 
   public static Table findings(Review review) {
@@ -147,7 +158,7 @@ public final class ReviewTables {
         .orElse(OptionalDouble.empty());
   }
 
-  private static java.util.stream.Stream<BearingReview> bearings(Review review) {
+  private static Stream<BearingReview> bearings(Review review) {
     return review.assets().stream().flatMap(asset -> asset.bearings().stream());
   }
 }

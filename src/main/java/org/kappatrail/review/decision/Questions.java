@@ -13,7 +13,6 @@ import org.kappatrail.tribology.LubricationRegime;
 /** Answers the five questions, each with the figures that made the answer. */
 final class Questions {
   private static final double TWICE = 2;
-  private static final double NORMAL_95 = 1.96;
 
   private final AssetCase asset;
   private final BearingCase governing;
@@ -50,8 +49,16 @@ final class Questions {
   }
 
   boolean causeWorthMore() {
+    return cure.filter(this::worthMoreThanFreshOil).isPresent();
+  }
+
+  /** By net saving where both have one, else by worth, else by κ. */
+  private boolean worthMoreThanFreshOil(Remedy act) {
+    if (act.netSaving().isPresent() && fresh.netSaving().isPresent()) {
+      return act.netSaving().getAsDouble() > fresh.netSaving().getAsDouble();
+    }
     String bearing = governing.bearing().id();
-    return cure.filter(act -> Cause.value(act, bearing) > Cause.value(fresh, bearing)).isPresent();
+    return Cause.value(act, bearing) > Cause.value(fresh, bearing);
   }
 
   /** 1. Is the drop real? */
@@ -133,12 +140,8 @@ final class Questions {
           "what moved κ is unknown: no temperature is known for the charge's first sample");
     }
     Attribution parts = found.get();
-    double measurable =
-        asset.sigmaLnV40()
-            * NORMAL_95
-            * governing.now().oil().sensitivityToV40(governing.now().temperatureC());
     boolean oil =
-        parts.oil() < -measurable && parts.oil() <= Math.min(parts.temperature(), parts.speed());
+        shifted() && parts.oil() < 0 && parts.oil() <= Math.min(parts.temperature(), parts.speed());
     String moved =
         text(
             "since fresh oil at the charge's first operating point: oil %s, temperature %s,"
@@ -157,6 +160,13 @@ final class Questions {
               moved));
     }
     return new Reply(oil ? Answer.YES : Answer.NO, moved);
+  }
+
+  /** The latest sample is off the registered oil by more than measuring alone makes. */
+  private boolean shifted() {
+    List<Double> shifts = asset.record().lastShifts();
+    return !shifts.isEmpty()
+        && Math.abs(shifts.get(shifts.size() - 1)) > asset.record().limitPercent() / 100;
   }
 
   /** 4. Would fresh oil cure it? */

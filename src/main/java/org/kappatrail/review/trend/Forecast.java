@@ -2,15 +2,14 @@ package org.kappatrail.review.trend;
 
 import java.time.LocalDate;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
-import java.util.Map;
-import java.util.NavigableMap;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.TreeMap;
-import org.apache.commons.math3.stat.descriptive.rank.Median;
 import org.jspecify.annotations.Nullable;
 import org.kappatrail.statistics.TheilSen;
+import org.kappatrail.tribology.OilSensitivity;
 import org.kappatrail.tribology.OilViscosity;
 
 /**
@@ -46,6 +45,24 @@ public final class Forecast {
   private final double sigmaC;
   private final TreeMap<Long, FilmState> lastYear = new TreeMap<>();
   private final OptionalDouble yearAgoC;
+  private final OilSensitivity sensitivity;
+  private final double start;
+
+  /** By day of last year; 0 is the present point. */
+  private final @Nullable Pull[] pulls = new Pull[YEAR_DAYS + 1];
+
+  /**
+   * What the oil's drift does at an operating point.
+   *
+   * @param lnKappa ln κ of the oil as it is
+   * @param weight how much a drift at reference conditions counts there
+   */
+  private record Pull(double lnKappa, double weight) {
+    /** ln κ some days after the latest sample, the oil drifting on from a start by a slope. */
+    double lnKappaAfter(double days, double start, double slope) {
+      return lnKappa + (start + slope * days) * weight;
+    }
+  }
 
   /**
    * Prepares a forecast.
@@ -79,6 +96,11 @@ public final class Forecast {
     this.fresh = fresh;
     this.sigmaC = sigmaC;
     this.yearAgoC = readLastYear(days);
+    this.sensitivity = OilSensitivity.of(present.oil());
+    this.start =
+        drift.line().isPresent()
+            ? drift.line().get().at((double) lastSample.toEpochDay()) - reference.lnKappa(pitchMm)
+            : 0;
   }
 
   /**
@@ -131,11 +153,12 @@ public final class Forecast {
   }
 
   private Optional<LocalDate> reachedAtPresentPoint(double slope) {
-    double above = lnKappaOn(present, 0, slope) - lnFloor;
+    Pull pull = pullAtPresent();
+    double above = pull.lnKappaAfter(0, start, slope) - lnFloor;
     if (above <= 0) {
       return Optional.of(lastSample);
     }
-    double perDay = slope * weight(present);
+    double perDay = slope * pull.weight();
     if (perDay >= 0 || above / -perDay > FARTHEST_DAYS) {
       return Optional.empty();
     }
@@ -144,28 +167,34 @@ public final class Forecast {
 
   private Optional<LocalDate> reachedWithLastYear(double slope) {
     for (int ahead = 0; ahead <= FARTHEST_DAYS; ahead++) {
-      FilmState then = ahead == 0 ? present : ofLastYear(ahead);
-      if (then != null && lnKappaOn(then, ahead, slope) <= lnFloor) {
+      Pull then = ahead == 0 ? pullAtPresent() : pullOfLastYear(ahead);
+      if (then != null && then.lnKappaAfter(ahead, start, slope) <= lnFloor) {
         return Optional.of(lastSample.plusDays(ahead));
       }
     }
     return Optional.empty();
   }
 
-  /** ln κ of a state some days after the latest sample, the oil drifting on by a slope. */
-  private double lnKappaOn(FilmState state, double ahead, double slope) {
-    double start = 0;
-    if (drift.line().isPresent()) {
-      double onLine = drift.line().get().at((double) lastSample.toEpochDay());
-      start = onLine - reference.lnKappa(pitchMm);
-    }
-    return state.lnKappa(pitchMm) + (start + slope * ahead) * weight(state);
+  private Pull pullAtPresent() {
+    return pull(0, present);
   }
 
-  /** How much a drift at reference conditions counts at another temperature. */
-  private double weight(FilmState state) {
-    return state.oil().sensitivityToV40(state.temperatureC())
-        / reference.oil().sensitivityToV40(reference.temperatureC());
+  private @Nullable Pull pullOfLastYear(int ahead) {
+    FilmState then = ofLastYear(ahead);
+    return then == null ? null : pull(back(ahead), then);
+  }
+
+  /** Every state comes up again for every year ahead and every slope. */
+  private Pull pull(int place, FilmState state) {
+    Pull known = pulls[place];
+    if (known == null) {
+      known =
+          new Pull(
+              state.lnKappa(pitchMm),
+              sensitivity.at(state.temperatureC()) / sensitivity.at(reference.temperatureC()));
+      pulls[place] = known;
+    }
+    return known;
   }
 
   private List<FanPoint> fan(int horizonDays) {
@@ -179,7 +208,7 @@ public final class Forecast {
           new FanPoint(
               lastSample.plusDays(ahead),
               fan(ahead, line.slopeLow()),
-              Math.exp(lnKappaOn(present, ahead, line.slope())),
+              Math.exp(pullAtPresent().lnKappaAfter(ahead, start, line.slope())),
               fan(ahead, line.slopeHigh())));
     }
     return fan;
@@ -187,7 +216,8 @@ public final class Forecast {
 
   private OptionalDouble fan(int ahead, OptionalDouble slope) {
     return slope.isPresent()
-        ? OptionalDouble.of(Math.exp(lnKappaOn(present, ahead, slope.getAsDouble())))
+        ? OptionalDouble.of(
+            Math.exp(pullAtPresent().lnKappaAfter(ahead, start, slope.getAsDouble())))
         : OptionalDouble.empty();
   }
 
@@ -226,39 +256,62 @@ public final class Forecast {
   }
 
   private @Nullable FilmState ofLastYear(int ahead) {
-    int back = Math.floorMod(ahead - 1, YEAR_DAYS) + 1;
-    return lastYear.get(lastSample.toEpochDay() - YEAR_DAYS + back);
+    return lastYear.get(lastSample.toEpochDay() - YEAR_DAYS + back(ahead));
+  }
+
+  /** Day of last year that stands for a day ahead, from 1. */
+  private static int back(int ahead) {
+    return Math.floorMod(ahead - 1, YEAR_DAYS) + 1;
   }
 
   private OptionalDouble readLastYear(List<DayPoint> days) {
     long last = lastSample.toEpochDay();
     long from = last - YEAR_DAYS;
-    TreeMap<Long, DayPoint> byDay = new TreeMap<>();
-    days.forEach(day -> byDay.put(day.epochDay(), day));
-    var before = byDay.headMap(from + SMOOTH_DAYS, true);
-    if (before.isEmpty() || byDay.subMap(from, last + 1).size() < LEAST_RUNNING_DAYS) {
+    int first = firstFrom(days, from);
+    boolean reachesBack = !days.isEmpty() && days.get(0).epochDay() <= from + SMOOTH_DAYS;
+    if (!reachesBack || days.size() - first < LEAST_RUNNING_DAYS) {
       return OptionalDouble.empty();
     }
-    OptionalDouble then = median(byDay, from, SEASON_DAYS);
+    OptionalDouble then = median(days, from, SEASON_DAYS);
     if (then.isEmpty()) {
       return then;
     }
-    for (Map.Entry<Long, DayPoint> day : byDay.subMap(from + 1, last + 1).entrySet()) {
-      double temperature = median(byDay, day.getKey(), SMOOTH_DAYS).getAsDouble();
-      if (day.getValue().speedRpm() > 0) {
-        lastYear.put(day.getKey(), present.at(temperature, day.getValue().speedRpm()));
+    for (DayPoint day : days.subList(first, days.size())) {
+      if (day.epochDay() > from && day.speedRpm() > 0) {
+        double temperature = median(days, day.epochDay(), SMOOTH_DAYS).getAsDouble();
+        lastYear.put(day.epochDay(), present.at(temperature, day.speedRpm()));
       }
     }
     return then;
   }
 
-  private static OptionalDouble median(NavigableMap<Long, DayPoint> days, long centre, int width) {
-    double[] around =
-        days.subMap(centre - width / 2, centre + width / 2 + 1).values().stream()
-            .mapToDouble(DayPoint::temperatureC)
-            .toArray();
+  /** Place of the first day from a day on; the days are in time. */
+  private static int firstFrom(List<DayPoint> days, long epochDay) {
+    int low = 0;
+    int high = days.size();
+    while (low < high) {
+      int middle = (low + high) / 2;
+      if (days.get(middle).epochDay() < epochDay) {
+        low = middle + 1;
+      } else {
+        high = middle;
+      }
+    }
+    return low;
+  }
+
+  private static OptionalDouble median(List<DayPoint> days, long centre, int width) {
+    int from = firstFrom(days, centre - width / 2);
+    int to = firstFrom(days, centre + width / 2 + 1);
+    double[] around = new double[to - from];
+    for (int i = from; i < to; i++) {
+      around[i - from] = days.get(i).temperatureC();
+    }
+    Arrays.sort(around);
+    int half = around.length / 2;
     return around.length == 0
         ? OptionalDouble.empty()
-        : OptionalDouble.of(new Median().evaluate(around));
+        : OptionalDouble.of(
+            around.length % 2 == 1 ? around[half] : (around[half - 1] + around[half]) / 2);
   }
 }
