@@ -66,6 +66,7 @@ public final class Kappatrail implements Runnable {
             .addSubcommand(new CheckCommand(terminal))
             .addSubcommand(new SlidesCommand(terminal))
             .addSubcommand(new WeighCommand(terminal))
+            .addSubcommand(new AdoptCommand(terminal))
             .addSubcommand(new PointCommand(terminal))
             .setOut(out)
             .setErr(err)

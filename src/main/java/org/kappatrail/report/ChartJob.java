@@ -9,6 +9,7 @@ import java.util.Set;
 import org.kappatrail.report.chart.AssetChart;
 import org.kappatrail.report.chart.CorrelationChart;
 import org.kappatrail.report.chart.Drawing;
+import org.kappatrail.report.chart.FleetChart;
 import org.kappatrail.report.page.FileNames;
 import org.kappatrail.review.AssetReview;
 import org.kappatrail.review.Review;
@@ -32,6 +33,7 @@ record ChartJob(Kind kind, String subject, String fileName, Drawing drawing) {
   enum Kind {
     TRAIL,
     CORRELATION,
+    FLEET,
     FLEET_CORRELATION
   }
 
@@ -43,6 +45,8 @@ record ChartJob(Kind kind, String subject, String fileName, Drawing drawing) {
     names.values().forEach(name -> taken.add(name.toLowerCase(Locale.ROOT)));
     Map<String, List<PairCorrelation>> correlations = review.correlations().byAsset();
     List<ChartJob> jobs = new ArrayList<>();
+    FleetChart.of(review)
+        .ifPresent(found -> jobs.add(new ChartJob(Kind.FLEET, FLEET, free(taken, FLEET), found)));
     CorrelationChart.ofFleet(review)
         .ifPresent(
             found ->

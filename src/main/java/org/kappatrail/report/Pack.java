@@ -13,6 +13,7 @@ import java.util.TreeMap;
 import org.kappatrail.report.chart.ChartFiles;
 import org.kappatrail.report.json.ReviewJson;
 import org.kappatrail.report.page.Page;
+import org.kappatrail.report.page.Picture;
 import org.kappatrail.report.page.Pictures;
 import org.kappatrail.report.table.CsvFile;
 import org.kappatrail.report.table.ReviewTables;
@@ -64,7 +65,7 @@ public final class Pack {
     Pictures pictures = charts ? writeCharts(folder) : Pictures.none();
     List<Table> tables = ReviewTables.all(review);
     List<Output> outputs = new ArrayList<>();
-    outputs.add(() -> new Page(review, pictures).write(folder.resolve("index.html")));
+    outputs.add(() -> new Page(review, pictures).write(folder));
     outputs.add(
         () ->
             new ReviewJson(review, manifest.programVersion()).write(folder.resolve("review.json")));
@@ -104,44 +105,48 @@ public final class Pack {
     }
   }
 
-  /** Writes the charts and gives their SVG texts for the page. */
+  /** Writes the charts; the page reads them again when their turn comes. */
   private Pictures writeCharts(Path folder) throws IOException {
     Path place = Files.createDirectory(folder.resolve("charts"));
     List<ChartJob> jobs = ChartJob.of(review);
     Thread caller = Thread.currentThread();
     List<Result> results = jobs.parallelStream().map(job -> draw(job, place, caller)).toList();
-    Map<ChartJob.Kind, Map<String, String>> texts = new EnumMap<>(ChartJob.Kind.class);
+    Map<ChartJob.Kind, Map<String, Picture>> found = new EnumMap<>(ChartJob.Kind.class);
     int done = 0;
     for (Result result : results) {
       if (result.failure().isPresent()) {
         throw result.failure().get();
       }
-      texts
+      found
           .computeIfAbsent(result.job().kind(), kind -> new TreeMap<>())
-          .put(result.job().subject(), result.svg());
+          .put(result.job().subject(), result.picture());
       progress.at("charts", ++done, results.size());
     }
     return new Pictures(
-        texts.getOrDefault(ChartJob.Kind.TRAIL, Map.of()),
-        texts.getOrDefault(ChartJob.Kind.CORRELATION, Map.of()),
-        texts
-            .getOrDefault(ChartJob.Kind.FLEET_CORRELATION, Map.of())
-            .getOrDefault(ChartJob.FLEET, ""));
+        found.getOrDefault(ChartJob.Kind.TRAIL, Map.of()),
+        found.getOrDefault(ChartJob.Kind.CORRELATION, Map.of()),
+        only(found, ChartJob.Kind.FLEET),
+        only(found, ChartJob.Kind.FLEET_CORRELATION));
   }
 
-  private record Result(ChartJob job, String svg, Optional<IOException> failure) {}
+  private static Optional<Picture> only(
+      Map<ChartJob.Kind, Map<String, Picture>> found, ChartJob.Kind kind) {
+    return found.getOrDefault(kind, Map.of()).values().stream().findFirst();
+  }
+
+  private record Result(ChartJob job, Picture picture, Optional<IOException> failure) {}
 
   private static Result draw(ChartJob job, Path place, Thread caller) {
+    Path file = place.resolve(job.fileName() + ".svg");
     try {
       if (caller.isInterrupted()) {
         throw new InterruptedIOException("the drawing of charts was stopped");
       }
-      String svg = ChartFiles.svg(job.drawing());
-      Files.writeString(place.resolve(job.fileName() + ".svg"), svg);
+      Files.writeString(file, ChartFiles.svg(job.drawing()));
       ChartFiles.writePng(job.drawing(), place.resolve(job.fileName() + ".png"));
-      return new Result(job, svg, Optional.empty());
+      return new Result(job, Picture.ofFile(file, job.drawing().spots()), Optional.empty());
     } catch (IOException e) {
-      return new Result(job, "", Optional.of(e));
+      return new Result(job, Picture.ofText(""), Optional.of(e));
     }
   }
 }

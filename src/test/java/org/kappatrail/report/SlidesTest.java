@@ -23,6 +23,7 @@ import org.apache.poi.xslf.usermodel.XSLFSlide;
 import org.apache.poi.xslf.usermodel.XSLFTextRun;
 import org.apache.poi.xslf.usermodel.XSLFTextShape;
 import org.apache.poi.xssf.usermodel.XSSFSheet;
+import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -38,6 +39,7 @@ class SlidesTest {
 
   @TempDir Path folder;
 
+  @Tag("slow")
   @ParameterizedTest
   @ValueSource(ints = {1, 5, 20})
   void everyChosenAssetHasASlideWithItsChartsAndTheirNumbers(int assets)
@@ -75,6 +77,7 @@ class SlidesTest {
     }
   }
 
+  @Tag("slow")
   @Test
   void hostileNamesStandAsTextAndLongOnesAreShortened() throws IOException {
     FleetFiles.write(folder.resolve("site"), FleetFiles.HOSTILE);
@@ -106,6 +109,7 @@ class SlidesTest {
     assertThat(Files.mismatch(folder.resolve("a.pptx"), folder.resolve("b.pptx"))).isEqualTo(-1);
   }
 
+  @Tag("slow")
   @Test
   void withoutANameTheAssetsThatNeedADecisionAreShown() throws IOException {
     List<String> names = Collections.nCopies(42, "Pump");
@@ -199,9 +203,9 @@ class SlidesTest {
         }
       }
       for (XSLFTextShape shape : texts(slide)) {
-        assertThat(shape.getTextHeight())
-            .as("text of its box: %s", shape.getText())
-            .isLessThanOrEqualTo(shape.getAnchor().getHeight() + 3);
+        assertThat(SetText.height(shape))
+            .as("height of '%s'", shape.getText())
+            .isLessThanOrEqualTo(shape.getAnchor().getHeight() + 0.5);
       }
     }
   }

@@ -62,26 +62,6 @@ public final class AssetChart {
         new TimeSpan(days.get(0).minusDays(6), foreseen.isAfter(last) ? foreseen : last));
   }
 
-  /**
-   * Where a day stands across the chart's width, 0 to 1, by asset; empty for an asset without a
-   * chart.
-   */
-  public static Optional<DayPlace> places(AssetReview asset) {
-    return span(asset)
-        .map(
-            span ->
-                day -> {
-                  double share = (day.toEpochDay() - span.fromX()) / (span.toX() - span.fromX());
-                  double plot = PanelStack.WIDTH - Panel.LEFT - Panel.RIGHT;
-                  return (Panel.LEFT + share * plot) / PanelStack.WIDTH;
-                });
-  }
-
-  /** Place of a day. */
-  public interface DayPlace {
-    double share(LocalDate day);
-  }
-
   private PanelStack stack(Review review) {
     String site = review.settings().site();
     PanelStack stack =
@@ -95,6 +75,7 @@ public final class AssetChart {
                 + " of the oil at the present operating point",
             span,
             EventMark.of(asset));
+    stack.samples(asset.samples());
     Optional<BearingReview> shown = shown(asset);
     shown.ifPresent(bearing -> KappaPanel.of(asset, bearing, span).ifPresent(stack::add));
     stack.add(viscosity());

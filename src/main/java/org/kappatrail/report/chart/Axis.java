@@ -17,7 +17,10 @@ import java.util.List;
 record Axis(double low, double high, boolean logarithmic, List<Double> ticks) {
   private static final double[] LOG_STEPS = {1, 2, 5};
   private static final double[] CLOSE_LOG_STEPS = {1, 1.2, 1.5, 2, 2.5, 3, 4, 5, 6, 7, 8, 9};
+  private static final double[] WIDE_LOG_STEPS = {1, 1.5, 2, 3, 4, 5, 7};
   private static final double SHORT_LOG = 4;
+  private static final double WIDE_LOG = 60;
+  private static final double MARGIN = 1.12;
 
   Axis {
     ticks = List.copyOf(ticks);
@@ -45,11 +48,21 @@ record Axis(double low, double high, boolean logarithmic, List<Double> ticks) {
    * one.
    */
   static Axis log(double least, double most) {
-    double low = least / 1.12;
-    double high = most * 1.12;
+    return log(
+        least, most, most / least * MARGIN * MARGIN < SHORT_LOG ? CLOSE_LOG_STEPS : LOG_STEPS);
+  }
+
+  /** A wide log axis: room for ticks at 1, 1.5, 2, 3, 4, 5 and 7 of every decade. */
+  static Axis wideLog(double least, double most) {
+    return log(least, most, most / least < WIDE_LOG ? WIDE_LOG_STEPS : LOG_STEPS);
+  }
+
+  private static Axis log(double least, double most, double[] steps) {
+    double low = least / MARGIN;
+    double high = most * MARGIN;
     List<Double> ticks = new ArrayList<>();
     for (int decade = -4; decade <= 7; decade++) {
-      for (double step : high / low < SHORT_LOG ? CLOSE_LOG_STEPS : LOG_STEPS) {
+      for (double step : steps) {
         double tick = step * Math.pow(10, decade);
         if (tick >= low && tick <= high) {
           ticks.add(tick);

@@ -99,6 +99,26 @@ final class Canvas {
     g.draw(ring);
   }
 
+  /** A bar from one place to another, centred on a height, px. */
+  void bar(double from, double to, double y, double thick, Color colour) {
+    double left = Math.min(from, to);
+    double right = Math.max(from, to);
+    g.setColor(colour);
+    g.fill(new Rectangle2D.Double(left, y - thick / 2, right - left, thick));
+  }
+
+  /** A filled diamond, place and half width in px. */
+  void diamond(double x, double y, double half, Color colour) {
+    Path2D shape = new Path2D.Double();
+    shape.moveTo(x, y - half);
+    shape.lineTo(x + half, y);
+    shape.lineTo(x, y + half);
+    shape.lineTo(x - half, y);
+    shape.closePath();
+    g.setColor(colour);
+    g.fill(shape);
+  }
+
   void line(double x1, double y1, double x2, double y2, Color colour, BasicStroke stroke) {
     g.setColor(colour);
     g.setStroke(stroke);
@@ -108,7 +128,7 @@ final class Canvas {
   void text(String text, double x, double y, Color colour, float size) {
     g.setColor(colour);
     g.setFont(ChartFont.of(size));
-    g.drawString(text, (float) x, (float) y);
+    g.drawString(PlainText.of(text), (float) x, (float) y);
   }
 
   /** Text that ends at x. */

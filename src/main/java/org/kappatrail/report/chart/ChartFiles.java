@@ -71,6 +71,6 @@ public final class ChartFiles {
             .getDocument(g.getCommands(), new PageSize(0, 0, drawing.width(), drawing.height()));
     ByteArrayOutputStream bytes = new ByteArrayOutputStream();
     document.writeTo(bytes);
-    return bytes.toString(StandardCharsets.UTF_8);
+    return SvgText.compact(bytes.toString(StandardCharsets.UTF_8));
   }
 }

@@ -1,6 +1,7 @@
 package org.kappatrail.report.chart;
 
 import java.awt.Graphics2D;
+import java.util.List;
 
 /** Something that can be painted at a fixed size, as raster or vector. */
 public interface Drawing {
@@ -11,4 +12,9 @@ public interface Drawing {
   int height();
 
   void paint(Graphics2D g);
+
+  /** Places that stand for something, in reading order. */
+  default List<Spot> spots() {
+    return List.of();
+  }
 }

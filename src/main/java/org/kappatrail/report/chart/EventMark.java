@@ -17,12 +17,26 @@ import org.kappatrail.review.AssetReview;
  * @param label what it is called
  */
 record EventMark(LocalDate day, Kind kind, String label) {
+  private static final int LONGEST_NOTE = 28;
+
   /** Ways of drawing. */
   enum Kind {
     OIL_CHANGE,
     INFERRED_CHANGE,
     BEARING_REPLACED,
     SHORT
+  }
+
+  /** What was noted, cut where it is long. */
+  private static String other(String note) {
+    String plain = PlainText.of(note).strip();
+    if (plain.isEmpty()) {
+      return EventKind.OTHER.label();
+    }
+    int[] points = plain.codePoints().toArray();
+    return points.length <= LONGEST_NOTE
+        ? plain
+        : new String(points, 0, LONGEST_NOTE - 1).stripTrailing() + "…";
   }
 
   static List<EventMark> of(AssetReview asset) {
@@ -35,7 +49,7 @@ record EventMark(LocalDate day, Kind kind, String label) {
                 new EventMark(event.date(), Kind.BEARING_REPLACED, "new bearing");
             case TOP_UP -> new EventMark(event.date(), Kind.SHORT, "top-up");
             case FILTER_CHANGED -> new EventMark(event.date(), Kind.SHORT, "filter");
-            case OTHER -> new EventMark(event.date(), Kind.SHORT, EventKind.OTHER.label());
+            case OTHER -> new EventMark(event.date(), Kind.SHORT, other(event.note()));
           });
     }
     for (Charge charge : asset.charges()) {

@@ -7,7 +7,8 @@ final class Fitted {
   private Fitted() {}
 
   /** The text, or its beginning with an ellipsis where it is wider than a number of px. */
-  static String to(Graphics2D g, String text, double width) {
+  static String to(Graphics2D g, String anyText, double width) {
+    String text = PlainText.of(anyText);
     if (g.getFontMetrics().stringWidth(text) <= width) {
       return text;
     }

@@ -67,6 +67,7 @@ final class KappaPanel {
             .filter(bearing -> !AssetChart.kappaPoints(bearing).isEmpty())
             .limit(MOST_OTHERS)
             .toList();
+    TrendOnPanel trend = new TrendOnPanel(shown);
     Panel panel =
         new Panel(
                 "κ, viscosity ratio (" + shown.bearing().id() + ")",
@@ -76,8 +77,9 @@ final class KappaPanel {
                 axis(others))
             .under(this::washes)
             .under(canvas -> daily(canvas))
-            .under(new TrendOnPanel(shown)::under)
-            .over(new TrendOnPanel(shown)::over)
+            .under(trend::under)
+            .over(trend::over)
+            .note(trend.note(span))
             .over(this::regimeNames)
             .over(this::floor)
             .over(this::whiskers);
@@ -148,7 +150,7 @@ final class KappaPanel {
     double[] x = days.stream().mapToDouble(day -> day.date().toEpochDay() + 0.5).toArray();
     double[] low = days.stream().mapToDouble(day -> day.kappaP05().getAsDouble()).toArray();
     double[] high = days.stream().mapToDouble(day -> day.kappaP95().getAsDouble()).toArray();
-    DayLine.ribbon(canvas, x, low, high, Palette.wash(Palette.KAPPA, 0.26));
+    DayLine.ribbon(canvas, x, low, high, Palette.wash(Palette.KAPPA, 0.22));
   }
 
   private void floor(Canvas canvas) {

@@ -14,6 +14,7 @@ import org.knowm.xchart.XYChart;
 import org.knowm.xchart.XYChartBuilder;
 import org.knowm.xchart.XYSeries;
 import org.knowm.xchart.style.Styler.ChartTheme;
+import org.knowm.xchart.style.lines.SeriesLines;
 import org.knowm.xchart.style.markers.Marker;
 import org.knowm.xchart.style.markers.SeriesMarkers;
 
@@ -33,6 +34,7 @@ final class Panel {
   private final XYChart chart;
   private final TimeSpan span;
   private int seriesCount;
+  private String note = "";
   private Consumer<Canvas> under = canvas -> {};
   private Consumer<Canvas> over = canvas -> {};
 
@@ -106,10 +108,13 @@ final class Panel {
     series.setLineStyle(
         width > 0
             ? new BasicStroke(width, BasicStroke.CAP_ROUND, BasicStroke.JOIN_ROUND)
-            : new BasicStroke(0));
-    if (width == 0) {
-      series.setLineColor(CLEAR);
-    }
+            : SeriesLines.NONE);
+    return this;
+  }
+
+  /** Says something at the right of the panel's title. */
+  Panel note(String text) {
+    note = text;
     return this;
   }
 
@@ -190,13 +195,27 @@ final class Panel {
   }
 
   /** Writes the panel's title on paper, over whatever runs through; the origin as for painting. */
-  void paintTitle(Graphics2D g) {
+  void paintTitle(Graphics2D g, int panelWidth) {
     g.setFont(ChartFont.bold(12.5f));
-    double width = g.getFontMetrics().stringWidth(label);
+    String shown = Fitted.to(g, label, 420);
+    double width = g.getFontMetrics().stringWidth(shown);
     g.setColor(Palette.PAPER);
     g.fill(new Rectangle2D.Double(LEFT, 1, width + 4, TOP - 3));
     g.setColor(colour);
-    g.drawString(label, LEFT, TOP - 6);
+    g.drawString(shown, LEFT, TOP - 6);
+    if (!note.isEmpty()) {
+      paintNote(g, panelWidth - RIGHT, panelWidth - RIGHT - LEFT - width - 24);
+    }
+  }
+
+  private void paintNote(Graphics2D g, double right, double room) {
+    g.setFont(ChartFont.of(11f));
+    String text = Fitted.to(g, note, room);
+    double width = g.getFontMetrics().stringWidth(text);
+    g.setColor(Palette.PAPER);
+    g.fill(new Rectangle2D.Double(right - width - 2, 1, width + 4, TOP - 3));
+    g.setColor(Palette.QUIET_INK);
+    g.drawString(text, (float) (right - width), TOP - 6);
   }
 
   /** No marker. */

@@ -3,18 +3,20 @@ package org.kappatrail.report.chart;
 import java.awt.BasicStroke;
 import java.awt.Color;
 import java.awt.Graphics2D;
-import java.awt.RenderingHints;
 import java.awt.geom.Line2D;
 import java.awt.geom.Rectangle2D;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
+import org.kappatrail.history.Sample;
 
 /** Panels under each other on one shared time axis, with marks of events through all of them. */
 final class PanelStack implements Drawing {
   static final int WIDTH = 1180;
   private static final int HEAD = 66;
   private static final int FOOT = 62;
+  private static final double HALF_STRIP = 14;
+  private static final double LEAST_HALF_STRIP = 3;
 
   private final String title;
   private final String subtitle;
@@ -22,6 +24,7 @@ final class PanelStack implements Drawing {
   private final TimeSpan span;
   private final List<Panel> panels = new ArrayList<>();
   private final List<EventMark> marks;
+  private List<Sample> samples = List.of();
 
   /**
    * A stack.
@@ -47,6 +50,33 @@ final class PanelStack implements Drawing {
     }
   }
 
+  /** Says which sample stands at which day; each gets a strip through all panels. */
+  void samples(List<Sample> inTime) {
+    samples = List.copyOf(inTime);
+  }
+
+  @Override
+  public List<Spot> spots() {
+    List<Spot> spots = new ArrayList<>();
+    double top = HEAD;
+    double height = panels.stream().mapToInt(Panel::height).sum();
+    for (int i = 0; i < samples.size(); i++) {
+      double x = x(samples.get(i).day());
+      double left = x - HALF_STRIP;
+      double right = x + HALF_STRIP;
+      if (i > 0) {
+        left = Math.max(left, (x(samples.get(i - 1).day()) + x) / 2);
+      }
+      if (i + 1 < samples.size()) {
+        right = Math.min(right, (x(samples.get(i + 1).day()) + x) / 2);
+      }
+      left = Math.min(left, x - LEAST_HALF_STRIP);
+      right = Math.max(right, x + LEAST_HALF_STRIP);
+      spots.add(new Spot(samples.get(i).id(), left, top, right - left, height));
+    }
+    return spots;
+  }
+
   List<Panel> panels() {
     return List.copyOf(panels);
   }
@@ -63,12 +93,7 @@ final class PanelStack implements Drawing {
 
   @Override
   public void paint(Graphics2D g) {
-    g.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
-    g.setRenderingHint(
-        RenderingHints.KEY_TEXT_ANTIALIASING, RenderingHints.VALUE_TEXT_ANTIALIAS_ON);
-    g.setRenderingHint(
-        RenderingHints.KEY_FRACTIONALMETRICS, RenderingHints.VALUE_FRACTIONALMETRICS_ON);
-    g.setRenderingHint(RenderingHints.KEY_STROKE_CONTROL, RenderingHints.VALUE_STROKE_PURE);
+    Quality.set(g);
     g.setColor(Palette.PAPER);
     g.fill(new Rectangle2D.Double(0, 0, width(), height()));
     head(g);
@@ -84,14 +109,14 @@ final class PanelStack implements Drawing {
     titles(g);
     g.setFont(ChartFont.of(11));
     g.setColor(Palette.QUIET_INK);
-    g.drawString(source, Panel.LEFT, height() - 12);
+    g.drawString(Fitted.to(g, source, WIDTH - Panel.LEFT - 20), Panel.LEFT, height() - 12);
   }
 
   private void titles(Graphics2D g) {
     int top = HEAD;
     for (Panel panel : panels) {
       g.translate(0, top);
-      panel.paintTitle(g);
+      panel.paintTitle(g, WIDTH);
       g.translate(0, -top);
       top += panel.height();
     }

@@ -1,12 +1,16 @@
 package org.kappatrail.report.chart;
 
 import java.awt.BasicStroke;
+import java.time.LocalDate;
+import java.util.ArrayList;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.kappatrail.review.BearingReview;
 import org.kappatrail.review.KappaPoint;
 import org.kappatrail.review.trend.ChargeDrift;
+import org.kappatrail.review.trend.Crossing;
 import org.kappatrail.review.trend.Drift;
 import org.kappatrail.review.trend.FanPoint;
 import org.kappatrail.review.trend.Outlook;
@@ -56,6 +60,8 @@ final class TrendOnPanel {
         fan.stream().mapToDouble(FanPoint::likely).toArray(),
         Palette.KAPPA,
         AssetChart.dashed(1.3f));
+    beginOfOutlook(canvas);
+    crossing(canvas);
     bearing.trend().outlook().flatMap(Outlook::dip).ifPresent(dip -> dip(canvas, dip));
   }
 
@@ -71,7 +77,8 @@ final class TrendOnPanel {
         Palette.wash(Palette.KAPPA, 0.2));
   }
 
-  private record Charge(Drift drift, double from, double to) {}
+  /** The present charge: its drift, first, median and last day. */
+  private record Charge(Drift drift, double from, double middle, double to) {}
 
   private Optional<Charge> charge() {
     Optional<KappaPoint> latest = bearing.latestFilm();
@@ -79,19 +86,20 @@ final class TrendOnPanel {
       return Optional.empty();
     }
     int number = latest.get().charge().number();
-    double from =
+    double[] days =
         bearing.trail().stream()
             .filter(point -> point.film().isPresent() && point.charge().number() == number)
             .mapToDouble(point -> point.sample().day().toEpochDay())
-            .min()
-            .orElseThrow();
+            .toArray();
+    double from = days[0];
+    double middle = (days[(days.length - 1) / 2] + days[days.length / 2]) / 2;
     double to = latest.get().sample().day().toEpochDay();
     return bearing
         .trend()
         .drift(number)
         .map(ChargeDrift::achieved)
         .filter(drift -> drift.slopePer30Days().isPresent())
-        .map(drift -> new Charge(drift, from, to));
+        .map(drift -> new Charge(drift, from, middle, to));
   }
 
   private void limits(Canvas canvas) {
@@ -106,7 +114,7 @@ final class TrendOnPanel {
     if (low.isEmpty() || high.isEmpty()) {
       return;
     }
-    double middle = (charge.from() + charge.to()) / 2;
+    double middle = charge.middle();
     double[] days = new double[STEPS + 1];
     double[] bottom = new double[STEPS + 1];
     double[] top = new double[STEPS + 1];
@@ -118,7 +126,10 @@ final class TrendOnPanel {
       bottom[i] = Math.exp(Math.min(steep, flat));
       top[i] = Math.exp(Math.max(steep, flat));
     }
-    canvas.ribbon(days, bottom, top, Palette.wash(Palette.KAPPA, 0.14));
+    canvas.ribbon(days, bottom, top, Palette.wash(Palette.KAPPA, 0.12));
+    BasicStroke hair = new BasicStroke(0.5f);
+    canvas.polyline(days, bottom, Palette.wash(Palette.KAPPA, 0.5), hair);
+    canvas.polyline(days, top, Palette.wash(Palette.KAPPA, 0.5), hair);
   }
 
   private static double at(Drift drift, double day) {
@@ -149,5 +160,91 @@ final class TrendOnPanel {
     double y = canvas.y(bearing.floor());
     canvas.line(from, y, to, y, Palette.TEMPERATURE, new BasicStroke(4f));
     canvas.textCentred("season", (from + to) / 2, y - 7, Palette.TEMPERATURE, 11f);
+  }
+
+  /** When the floor is reached: a bar from earliest to latest, a diamond where it is likely. */
+  private void crossing(Canvas canvas) {
+    Crossing crossing =
+        bearing.trend().outlook().map(Outlook::atPresentPoint).orElse(Crossing.NONE);
+    LocalDate last = bearing.latestFilm().map(point -> point.sample().day()).orElse(LocalDate.MIN);
+    double right = canvas.plot().getMaxX();
+    double y = canvas.y(bearing.floor());
+    if (crossing.earliest().isPresent() && crossing.earliest().get().isAfter(last)) {
+      double from = canvas.x((double) crossing.earliest().get().toEpochDay());
+      double to =
+          crossing
+              .latest()
+              .map(day -> Math.min(right, canvas.x((double) day.toEpochDay())))
+              .orElse(right);
+      if (from < right) {
+        canvas.line(from, y, to, y, Palette.KAPPA, new BasicStroke(3f));
+      }
+    }
+    if (crossing.likely().isPresent() && crossing.likely().get().isAfter(last)) {
+      double at = canvas.x((double) crossing.likely().get().toEpochDay());
+      if (at < right) {
+        canvas.diamond(at, y, 4.5, Palette.KAPPA);
+      }
+    }
+  }
+
+  private void beginOfOutlook(Canvas canvas) {
+    List<FanPoint> fan = fan(bearing);
+    if (fan.isEmpty()) {
+      return;
+    }
+    double x = canvas.x((double) fan.get(0).date().toEpochDay());
+    double right = canvas.plot().getMaxX();
+    String label = "outlook";
+    if (right - x > canvas.widthOf(label, 11.5f) + 12) {
+      canvas.text(label, x + 8, canvas.plot().getMaxY() - 5, Palette.QUIET_INK, 11.5f);
+    }
+    canvas.line(
+        x + 3,
+        canvas.plot().getMinY(),
+        x + 3,
+        canvas.plot().getMaxY(),
+        Palette.QUIET_INK,
+        new BasicStroke(0.8f, 0, 0, 10, new float[] {1.5f, 4}, 0));
+  }
+
+  /** The trend in words, and the season's dip where it lies beyond the time shown. */
+  String note(TimeSpan span) {
+    List<String> parts = new ArrayList<>();
+    charge().map(Charge::drift).ifPresent(drift -> parts.add(words(drift)));
+    bearing
+        .trend()
+        .outlook()
+        .flatMap(Outlook::dip)
+        .filter(dip -> dip.from().isAfter(span.to()))
+        .ifPresent(
+            dip ->
+                parts.add(
+                    String.format(
+                        Locale.ROOT,
+                        "season brings κ %.2f between %s and %s",
+                        dip.leastKappa(),
+                        dip.from(),
+                        dip.to())));
+    return String.join("; ", parts);
+  }
+
+  private static String words(Drift drift) {
+    String slope = "trend of this charge " + percent(drift.slopePer30Days()) + " in 30 days";
+    String limits =
+        drift.slopeLowPer30Days().isPresent() && drift.slopeHighPer30Days().isPresent()
+            ? " ("
+                + percent(drift.slopeLowPer30Days())
+                + " to "
+                + percent(drift.slopeHighPer30Days())
+                + ")"
+            : "";
+    return slope + limits + ", " + drift.direction().label();
+  }
+
+  private static String percent(OptionalDouble lnPer30Days) {
+    String number =
+        String.format(Locale.ROOT, "%+.1f %%", 100 * Math.expm1(lnPer30Days.getAsDouble()));
+    return number.matches("[+-]0\\.0 %") ? "0 %" : number.replace('-', '−');
   }
 }

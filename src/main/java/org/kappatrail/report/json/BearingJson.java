@@ -91,15 +91,11 @@ final class BearingJson {
   }
 
   private void trail(Drift drift) throws IOException {
-    OptionalDouble score =
-        drift.test().isPresent()
-            ? OptionalDouble.of((double) drift.test().get().s())
-            : OptionalDouble.empty();
     json.whole("samples", drift.samples())
         .number("slope_per_30d", drift.slopePer30Days())
         .number("slope_low", drift.slopeLowPer30Days())
         .number("slope_high", drift.slopeHighPer30Days())
-        .number("mann_kendall_s", score)
+        .whole("mann_kendall_s", drift.score())
         .number("p", drift.p())
         .text("direction", drift.direction().label());
   }

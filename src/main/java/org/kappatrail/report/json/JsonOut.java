@@ -14,6 +14,7 @@ import java.nio.charset.StandardCharsets;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.OptionalLong;
 import org.kappatrail.report.table.SixDigits;
 
 /** Writes JSON field by field: numbers with six significant digits, the unknown as null. */
@@ -63,6 +64,10 @@ final class JsonOut implements AutoCloseable {
   JsonOut whole(String name, long value) throws IOException {
     json.writeNumberField(name, value);
     return this;
+  }
+
+  JsonOut whole(String name, OptionalLong value) throws IOException {
+    return value.isPresent() ? whole(name, value.getAsLong()) : unknown(name);
   }
 
   JsonOut flag(String name, boolean value) throws IOException {

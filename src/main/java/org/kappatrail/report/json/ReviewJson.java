@@ -7,13 +7,17 @@ import java.io.OutputStream;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.LocalDate;
+import java.util.List;
 import java.util.Optional;
+import java.util.stream.Stream;
 import org.kappatrail.history.Problem;
 import org.kappatrail.history.Settings;
 import org.kappatrail.review.Finding;
 import org.kappatrail.review.Level;
 import org.kappatrail.review.Review;
 import org.kappatrail.review.Since;
+import org.kappatrail.review.correlation.Link;
+import org.kappatrail.review.correlation.PairCorrelation;
 
 /**
  * The review as one JSON document, for programs. Its schema lies beside it in the pack; within one
@@ -60,8 +64,33 @@ public final class ReviewJson {
         .text("timezone", settings.zone().getId())
         .object("limits", () -> limits(json, settings.limits()))
         .objects("assets", review.assets(), asset -> new AssetJson(json, asset).write())
+        .objects("correlations", called(), test -> correlation(json, test))
         .object("since", review.since(), since -> since(json, since))
         .objects("problems", review.problems(), problem -> problem(json, problem));
+  }
+
+  /** What is called; the table has every test. */
+  private List<PairCorrelation> called() {
+    return Stream.concat(
+            review.correlations().fleet().stream(), review.correlations().assets().stream())
+        .filter(test -> test.q().isPresent() && test.q().getAsDouble() <= Link.LIMIT)
+        .toList();
+  }
+
+  private static void correlation(JsonOut json, PairCorrelation test) throws IOException {
+    json.text("scope", test.scope().label())
+        .text("asset", test.asset())
+        .text("x", test.x())
+        .text("y", test.y())
+        .whole("lag", test.lag())
+        .text("form", test.form().label())
+        .whole("n", test.n())
+        .number("n_effective", test.nEffective())
+        .number("coefficient", test.coefficient())
+        .number("low", test.low())
+        .number("high", test.high())
+        .number("p", test.p())
+        .number("q", test.q());
   }
 
   private static void limits(JsonOut json, Settings.Limits limits) throws IOException {

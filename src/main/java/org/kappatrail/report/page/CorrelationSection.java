@@ -17,17 +17,17 @@ final class CorrelationSection {
   private static final int LEAST_ROWS = 6;
 
   private final List<Link> links;
-  private final String picture;
+  private final Optional<Picture> picture;
   private final boolean fleet;
 
-  CorrelationSection(List<PairCorrelation> tests, String picture, boolean fleet) {
+  CorrelationSection(List<PairCorrelation> tests, Optional<Picture> picture, boolean fleet) {
     this.links = Link.of(tests);
     this.picture = picture;
     this.fleet = fleet;
   }
 
   /** Writes what belongs under a heading that stands already. */
-  void write(Html html, String of) {
+  void write(Html html, String of, String pictureId) {
     List<String> sentences = CorrelationSentences.of(links);
     html.raw("<ul class=\"findings\">\n");
     sentences.stream()
@@ -47,7 +47,11 @@ final class CorrelationSection {
                 + " many independent pairs the samples are worth; q is p adjusted for every test of"
                 + " this review.")
         .raw("\n");
-    Figure.write(html, picture, "Correlations of " + of + "; all numbers are in correlations.csv");
+    Figure.write(
+        html,
+        picture,
+        pictureId,
+        "Correlations of " + of + "; all numbers are in correlations.csv");
     table(html);
   }
 
@@ -58,7 +62,8 @@ final class CorrelationSection {
     }
     html.raw("<details><summary>")
         .text("The " + rows.size() + " surest pairs in numbers")
-        .raw("</summary>\n<div class=\"scroll\"><table>\n<thead><tr><th>x</th><th>y</th>")
+        .raw(
+            "</summary>\n<div class=\"scroll\"><table data-name=\"correlations\">\n<thead><tr><th>x</th><th>y</th>")
         .raw(fleet ? "<th class=\"n\">assets</th>" : "<th class=\"n\">y later by, samples</th>")
         .raw("<th class=\"n\">n</th><th class=\"n\">N*</th><th class=\"n\">coefficient</th>")
         .raw("<th class=\"n\">95 % interval</th><th class=\"n\">p</th><th class=\"n\">q</th>")

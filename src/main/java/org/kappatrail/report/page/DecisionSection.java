@@ -34,7 +34,7 @@ final class DecisionSection {
         .raw("</b>: ")
         .text(decision.reason())
         .raw(".</p>\n");
-    html.raw("<div class=\"scroll\"><table class=\"questions\"><tbody>\n");
+    html.raw("<div class=\"scroll\"><table class=\"questions\" data-name=\"questions\"><tbody>\n");
     question(html, "Is the drop real?", decision.real());
     question(html, "Does it matter?", decision.matters());
     question(html, "Is it the oil's doing?", decision.oilToBlame());

@@ -1,45 +1,62 @@
 package org.kappatrail.report.page;
 
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import org.kappatrail.history.Sample;
 import org.kappatrail.history.SampleColumns;
 import org.kappatrail.review.AssetReview;
 import org.kappatrail.review.BearingReview;
 import org.kappatrail.review.Film;
 import org.kappatrail.review.KappaPoint;
+import org.kappatrail.review.Level;
 import org.kappatrail.review.Review;
+import org.kappatrail.review.decision.Decision;
+import org.kappatrail.review.decision.Verdict;
 
-/** The fleet, worst first: a row per asset with its governing bearing. */
+/**
+ * The fleet, worst first: a row per asset with its governing bearing. A cell that is sorted by
+ * something else than what it shows carries that in {@code data-v}.
+ */
 final class FleetTable {
-  private final Review review;
-  private final Map<String, String> anchors;
+  /** Level of an asset without a κ. */
+  static final String NO_KAPPA = "no κ";
 
-  FleetTable(Review review, Map<String, String> anchors) {
+  private static final List<Level> LEVELS = List.of(Level.values());
+  private static final List<Verdict> VERDICTS = List.of(Verdict.values());
+
+  private final Review review;
+  private final Map<String, String> links;
+
+  FleetTable(Review review, Map<String, String> links) {
     this.review = review;
-    this.anchors = anchors;
+    this.links = links;
   }
 
   void write(Html html) {
     html.around(
         "section id=\"fleet\"",
         () -> {
-          html.element("h2", "The fleet, worst first");
-          html.raw("<div class=\"scroll\"><table class=\"fleet\">\n<thead><tr>")
-              .raw("<th>asset</th><th>bearing</th><th class=\"n\">κ</th>")
-              .raw("<th class=\"n\">95 % interval</th><th>regime</th><th>level</th>")
-              .raw("<th>κ over its samples</th><th>verdict</th>")
-              .raw(
-                  "<th class=\"n\">κ since the sample before</th><th class=\"n\">water, mg/kg</th>")
-              .raw("<th>code</th><th class=\"n\">mixed regime, h</th><th>last sample</th>")
-              .raw("</tr></thead>\n<tbody>\n");
+          html.element("h2", "The fleet, worst first").raw("\n");
+          new FleetControls(review).write(html);
+          html.raw("<div class=\"scroll\"><table class=\"fleet\" data-name=\"fleet\">\n<thead><tr>")
+              .raw("<th data-sort=\"text\">asset</th><th data-sort=\"text\">bearing</th>")
+              .raw("<th>κ over its samples</th><th class=\"n\" data-sort=\"number\">κ</th>")
+              .raw("<th class=\"n\">95 % interval</th><th data-sort=\"number\">level</th>")
+              .raw("<th data-sort=\"number\">verdict</th>")
+              .raw("<th class=\"n\" data-sort=\"number\">κ since the sample before</th>")
+              .raw("<th class=\"n\" data-sort=\"number\">water, mg/kg</th>")
+              .raw("<th data-sort=\"text\">code</th>")
+              .raw("<th class=\"n\" data-sort=\"number\">mixed regime, h</th>")
+              .raw("<th data-sort=\"text\">last sample</th></tr></thead>\n<tbody>\n");
           review.worstFirst().forEach(asset -> row(html, asset));
           html.raw("</tbody></table></div>\n")
               .element(
                   "p class=\"note\"",
-                  "The bearing is the one with the least κ over its floor. Mixed regime: hours with"
-                      + " κ below 1 between the last sample and the one before it. κ stands for the"
-                      + " latest sample that has one.");
+                  "The bearing is the one with the least κ over its floor (dashed). Mixed regime:"
+                      + " hours with κ below 1 between the last sample and the one before it. κ"
+                      + " stands for the latest sample that has one.");
         });
   }
 
@@ -51,33 +68,74 @@ final class FleetTable {
         asset.samples().isEmpty()
             ? Optional.empty()
             : Optional.of(asset.samples().get(asset.samples().size() - 1));
-    html.raw("<tr><td class=\"name\"><a href=\"#")
-        .text(anchors.getOrDefault(asset.asset().id(), ""))
-        .raw("\">")
+    begin(html, asset);
+    html.raw("<td class=\"name\" data-v=\"")
         .text(asset.asset().id())
-        .raw("</a> <span class=\"quiet\">")
-        .text(asset.asset().name().equals(asset.asset().id()) ? "" : asset.asset().name())
-        .raw("</span></td>")
-        .element("td", governing.map(bearing -> bearing.bearing().id()).orElse(""))
+        .raw("\"><a href=\"")
+        .text(links.getOrDefault(asset.asset().id(), "#fleet"))
+        .raw("\"><bdi>")
+        .text(asset.asset().id())
+        .raw("</bdi></a>");
+    if (!asset.asset().name().equals(asset.asset().id())) {
+      html.raw(" <bdi class=\"quiet\">").text(asset.asset().name()).raw("</bdi>");
+    }
+    html.raw("</td>")
+        .element("td class=\"any\"", governing.map(bearing -> bearing.bearing().id()).orElse(""))
+        .raw("<td>" + governing.map(Sparkline::of).orElse("") + "</td>")
         .element(
             "td class=\"n deciding\"",
             film.map(known -> Numbers.significant(known.kappa(), 3)).orElse(""))
         .element("td class=\"n\"", film.map(FleetTable::interval).orElse(""))
-        .element("td class=\"word\"", film.map(known -> known.regime().label()).orElse(""))
-        .raw("<td>" + film.map(known -> LevelMark.of(known.level())).orElse("no κ") + "</td>")
-        .raw("<td>" + governing.map(Sparkline::of).orElse("") + "</td>")
-        .element(
-            "td class=\"word\"",
-            asset.decision().map(decision -> decision.verdict().label()).orElse(""))
-        .element("td class=\"n\"", governing.map(FleetTable::change).orElse(""))
+        .raw("<td data-v=\"" + film.map(known -> LEVELS.indexOf(known.level())).orElse(-1) + "\">")
+        .raw(film.map(known -> LevelMark.of(known.level())).orElse(NO_KAPPA) + "</td>")
+        .raw("<td class=\"word\" data-v=\"")
+        .raw(asset.decision().map(found -> VERDICTS.indexOf(found.verdict())).orElse(-1) + "\">")
+        .text(verdict(asset))
+        .raw("</td>");
+    OptionalDouble change = governing.map(FleetTable::change).orElse(OptionalDouble.empty());
+    html.raw("<td class=\"n\" data-v=\"")
+        .raw(change.isPresent() ? Numbers.significant(change.getAsDouble(), 6) : "")
+        .raw("\">")
+        .text(change.isPresent() ? Numbers.percent(change.getAsDouble()) : "")
+        .raw("</td>")
         .element(
             "td class=\"n\"",
             sample.map(known -> Measured.text(known, SampleColumns.WATER, 3)).orElse(""))
-        .element("td", sample.flatMap(Sample::cleanliness).map(Object::toString).orElse(""))
+        .element(
+            "td class=\"word\"",
+            sample.flatMap(Sample::cleanliness).map(Object::toString).orElse(""))
         .element(
             "td class=\"n\"", latest.map(point -> Numbers.fixed(point.mixedHours(), 0)).orElse(""))
         .element("td class=\"date\"", sample.map(known -> known.day().toString()).orElse("none"))
         .raw("</tr>\n");
+  }
+
+  /** What a row is filtered and found by. */
+  private static void begin(Html html, AssetReview asset) {
+    html.raw("<tr data-level=\"")
+        .text(level(asset))
+        .raw("\" data-area=\"")
+        .text(asset.asset().area())
+        .raw("\" data-verdict=\"")
+        .text(verdict(asset))
+        .raw("\" data-find=\"")
+        .text(
+            String.join(
+                " ",
+                asset.asset().id(),
+                asset.asset().name(),
+                asset.asset().area(),
+                asset.oil().id(),
+                asset.governing().map(bearing -> bearing.bearing().id()).orElse("")))
+        .raw("\">");
+  }
+
+  static String level(AssetReview asset) {
+    return asset.level().map(Level::label).orElse(NO_KAPPA);
+  }
+
+  static String verdict(AssetReview asset) {
+    return asset.decision().map(Decision::verdict).map(found -> found.label()).orElse("");
   }
 
   static String interval(Film film) {
@@ -86,11 +144,11 @@ final class FleetTable {
         + Numbers.significant(film.uncertainty().high(), 3);
   }
 
-  private static String change(BearingReview bearing) {
+  private static OptionalDouble change(BearingReview bearing) {
     Optional<Film> now = bearing.latestFilm().flatMap(KappaPoint::film);
     Optional<Film> before = bearing.previousFilm().flatMap(KappaPoint::film);
     return now.isPresent() && before.isPresent()
-        ? Numbers.percent(now.get().kappa() / before.get().kappa() - 1)
-        : "";
+        ? OptionalDouble.of(now.get().kappa() / before.get().kappa() - 1)
+        : OptionalDouble.empty();
   }
 }

@@ -8,7 +8,10 @@ import java.io.Writer;
 final class Html {
   private final StringBuilder text = new StringBuilder();
 
-  /** Text as it can stand in element content and in quoted attributes. */
+  /**
+   * Text as it can stand in element content and in quoted attributes. Control characters show as
+   * U+FFFD; overrides of the writing direction, which would turn the text around it, go.
+   */
   static String escape(String text) {
     StringBuilder safe = new StringBuilder(text.length() + 16);
     for (int i = 0; i < text.length(); i++) {
@@ -20,12 +23,18 @@ final class Html {
         case '"' -> safe.append("&quot;");
         case '\'' -> safe.append("&#39;");
         default -> {
-          boolean control = c < ' ' && c != '\n' && c != '\t';
-          safe.append(control || c == 0x7F ? '\uFFFD' : c);
+          if (!turnsDirection(c)) {
+            boolean control = Character.isISOControl(c) && c != '\n' && c != '\t';
+            safe.append(control ? '\uFFFD' : c);
+          }
         }
       }
     }
     return safe.toString();
+  }
+
+  private static boolean turnsDirection(char c) {
+    return (c >= '\u202A' && c <= '\u202E') || (c >= '\u2066' && c <= '\u2069');
   }
 
   /** Adds markup of the program's own. */

@@ -1,24 +1,29 @@
 package org.kappatrail.report.page;
 
 import java.io.IOException;
-import java.io.InputStream;
 import java.io.UncheckedIOException;
 import java.io.Writer;
-import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.TreeMap;
-import org.kappatrail.history.Problem;
 import org.kappatrail.review.AssetReview;
-import org.kappatrail.review.Level;
 import org.kappatrail.review.Review;
 import org.kappatrail.review.correlation.PairCorrelation;
 
-/** The review as one self-contained page: nothing is loaded from anywhere. */
+/**
+ * The review to read: one self-contained page, or for a large fleet an index with a page for every
+ * asset behind it. Nothing is loaded from anywhere.
+ */
 public final class Page {
-  private static final int MOST_PROBLEMS = 200;
+  /** Assets beyond which each gets a page of its own. */
+  public static final int MOST_ON_ONE_PAGE = 60;
+
+  /** Folder of the assets' own pages. */
+  private static final String PAGES = "pages";
 
   /**
    * Rows of samples beyond which earlier ones are left to the table: what a browser still opens.
@@ -27,7 +32,11 @@ public final class Page {
 
   private final Review review;
   private final Pictures pictures;
-  private final Map<String, String> anchors;
+  private final String title;
+  private final boolean one;
+  private final List<AssetReview> worstFirst;
+  private final Map<String, String> names;
+  private final Map<String, List<PairCorrelation>> correlations;
 
   /**
    * A page.
@@ -38,58 +47,126 @@ public final class Page {
   public Page(Review review, Pictures pictures) {
     this.review = review;
     this.pictures = pictures;
-    this.anchors = FileNames.of(review.assets().stream().map(asset -> asset.asset().id()).toList());
+    String site = review.settings().site();
+    title = (site.isEmpty() ? "Oil film review" : site + ": oil film review");
+    one = review.assets().size() <= MOST_ON_ONE_PAGE;
+    worstFirst = review.worstFirst();
+    names = FileNames.of(review.assets().stream().map(asset -> asset.asset().id()).toList());
+    correlations = review.correlations().byAsset();
   }
 
-  /** Writes the page asset by asset. */
-  public void write(Path file) throws IOException {
-    try (Writer out = Files.newBufferedWriter(file)) {
-      write(out);
+  /** Writes {@code index.html} into a folder, asset by asset, and the assets' pages. */
+  public void write(Path folder) throws IOException {
+    try (Writer out = Files.newBufferedWriter(folder.resolve("index.html"))) {
+      index(out);
     } catch (UncheckedIOException e) {
       throw e.getCause();
     }
+    if (!one) {
+      writePages(Files.createDirectories(folder.resolve(PAGES)));
+    }
   }
 
-  private void write(Writer out) {
+  private void index(Writer out) {
+    List<Picture> shown = new ArrayList<>();
+    pictures.fleet().ifPresent(shown::add);
+    pictures.fleetCorrelation().ifPresent(shown::add);
+    if (one) {
+      shown.addAll(pictures.assets().values());
+      shown.addAll(pictures.correlations().values());
+    }
+    Shell shell = new Shell(DarkCharts.rules(shown));
     Html html = new Html();
-    String site = review.settings().site();
-    String title = (site.isEmpty() ? "Oil film review" : site + ": oil film review");
-    html.raw("<!DOCTYPE html>\n<html lang=\"en\">\n<head>\n<meta charset=\"utf-8\">\n")
-        .raw(
-            "<meta http-equiv=\"Content-Security-Policy\" content=\"default-src 'none'; img-src"
-                + " data:; style-src 'unsafe-inline'; script-src 'unsafe-inline'\">\n")
-        .raw("<meta name=\"viewport\" content=\"width=device-width, initial-scale=1\">\n")
-        .element("title", title + ", " + review.asOf())
-        .raw("\n<style>\n")
-        .raw(resource("page.css"))
-        .raw("</style>\n</head>\n<body>\n");
-    html.around("header", () -> head(html, title));
-    boolean earlierSamples = sampleRows() <= MOST_SAMPLE_ROWS;
+    shell.begin(html, title + ", " + review.asOf());
+    Map<String, String> links = links();
+    html.around("header", () -> new Opening(review, title).write(html));
     html.around(
         "main",
         () -> {
-          review.since().ifPresent(since -> new SinceSection(since, links()).write(html));
-          new FleetTable(review, anchors).write(html);
-          Map<String, List<PairCorrelation>> correlations = review.correlations().byAsset();
-          for (AssetReview asset : review.worstFirst()) {
-            String id = asset.asset().id();
-            new AssetSection(
-                    asset,
-                    anchorOf(asset),
-                    pictures.assets().getOrDefault(id, ""),
-                    earlierSamples,
-                    new CorrelationSection(
-                        correlations.getOrDefault(id, List.of()),
-                        pictures.correlations().getOrDefault(id, ""),
-                        false))
-                .write(html);
-            html.drainTo(out);
+          review.since().ifPresent(since -> new SinceSection(since, links).write(html));
+          pictures.fleet().ifPresent(found -> new FleetFigure(review, links).write(html, found));
+          new FleetTable(review, links).write(html);
+          if (one) {
+            boolean earlierSamples = sampleRows() <= MOST_SAMPLE_ROWS;
+            for (AssetReview asset : worstFirst) {
+              section(asset, earlierSamples).write(html);
+              html.drainTo(out);
+            }
           }
           html.around("section id=\"correlations\"", () -> fleetCorrelations(html));
-          problems(html);
-          html.raw(resource("method.html"));
+          ProblemsSection.write(html, review.problems());
+          html.raw(Shell.resource("method.html")).raw(Shell.resource("cautions.html"));
         });
-    html.raw("</body>\n</html>\n").drainTo(out);
+    shell.end(html);
+    html.drainTo(out);
+  }
+
+  private void writePages(Path folder) throws IOException {
+    for (int i = 0; i < worstFirst.size(); i++) {
+      AssetReview asset = worstFirst.get(i);
+      Optional<AssetReview> before = i == 0 ? Optional.empty() : Optional.of(worstFirst.get(i - 1));
+      Optional<AssetReview> after =
+          i + 1 == worstFirst.size() ? Optional.empty() : Optional.of(worstFirst.get(i + 1));
+      String text;
+      try {
+        text = page(asset, before, after);
+      } catch (UncheckedIOException e) {
+        throw e.getCause();
+      }
+      Files.writeString(folder.resolve(name(asset) + ".html"), text);
+    }
+  }
+
+  private String page(
+      AssetReview asset, Optional<AssetReview> before, Optional<AssetReview> after) {
+    List<Picture> shown = new ArrayList<>();
+    pictures.asset(asset.asset().id()).ifPresent(shown::add);
+    pictures.correlation(asset.asset().id()).ifPresent(shown::add);
+    Shell shell = new Shell(DarkCharts.rules(shown));
+    Html html = new Html();
+    shell.begin(html, asset.asset().id() + ", " + title + ", " + review.asOf());
+    html.around(
+        "header",
+        () -> {
+          html.element("h1", title + ", " + review.asOf()).raw("\n");
+          html.raw("<nav aria-label=\"pages\"><a href=\"../index.html#fleet\">the fleet</a>");
+          before.ifPresent(other -> neighbour(html, "worse", other));
+          after.ifPresent(other -> neighbour(html, "better", other));
+          html.raw("</nav>\n");
+        });
+    html.around(
+        "main",
+        () -> {
+          section(asset, true).write(html);
+          html.raw(Shell.resource("cautions.html"));
+        });
+    shell.end(html);
+    return html.toString();
+  }
+
+  private void neighbour(Html html, String which, AssetReview other) {
+    html.raw(" <a href=\"")
+        .text(name(other) + ".html")
+        .raw("\">next " + which + ": <bdi>")
+        .text(other.asset().id())
+        .raw("</bdi></a>");
+  }
+
+  private AssetSection section(AssetReview asset, boolean earlierSamples) {
+    String id = asset.asset().id();
+    return new AssetSection(
+        asset,
+        name(asset),
+        pictures.asset(id),
+        earlierSamples,
+        new CorrelationSection(
+            correlations.getOrDefault(id, List.of()), pictures.correlation(id), false));
+  }
+
+  private void fleetCorrelations(Html html) {
+    html.element("h2", "What goes with what in the fleet").raw("\n");
+    new CorrelationSection(review.correlations().fleet(), pictures.fleetCorrelation(), true)
+        .write(html, "the fleet", "fleet-correlation");
   }
 
   private long sampleRows() {
@@ -101,88 +178,12 @@ public final class Page {
 
   private Map<String, String> links() {
     Map<String, String> links = new TreeMap<>();
-    anchors.forEach((asset, anchor) -> links.put(asset, "#" + anchor));
+    names.forEach(
+        (asset, name) -> links.put(asset, one ? "#a-" + name : PAGES + "/" + name + ".html"));
     return links;
   }
 
-  private void fleetCorrelations(Html html) {
-    html.element("h2", "What goes with what in the fleet").raw("\n");
-    new CorrelationSection(review.correlations().fleet(), pictures.fleetCorrelation(), true)
-        .write(html, "the fleet");
-  }
-
-  private String anchorOf(AssetReview asset) {
-    return anchors.getOrDefault(asset.asset().id(), "");
-  }
-
-  private void head(Html html, String title) {
-    html.element("h1", title).raw("\n");
-    long alarms = count(Level.ALARM);
-    long alerts = count(Level.ALERT);
-    long unknown = review.assets().stream().filter(asset -> asset.level().isEmpty()).count();
-    html.element(
-        "p class=\"lead\"",
-        "State of "
-            + review.asOf()
-            + ". Of "
-            + review.assets().size()
-            + (review.assets().size() == 1 ? " asset, " : " assets, ")
-            + alarms
-            + (alarms == 1 ? " has" : " have")
-            + " a bearing below its κ floor, "
-            + alerts
-            + (alerts == 1 ? " has" : " have")
-            + " one whose interval reaches below it"
-            + (unknown == 0 ? "." : ", and of " + unknown + " no κ is known."));
-    if (!review.problems().isEmpty()) {
-      html.raw("<p><a href=\"#problems\">")
-          .text(review.problems().size() + " problems in the inputs")
-          .raw("</a> were left out of what follows.</p>\n");
-    }
-  }
-
-  private long count(Level level) {
-    return review.assets().stream()
-        .filter(asset -> asset.level().filter(found -> found == level).isPresent())
-        .count();
-  }
-
-  private void problems(Html html) {
-    List<Problem> problems = review.problems();
-    if (problems.isEmpty()) {
-      return;
-    }
-    html.around(
-        "section id=\"problems\"",
-        () -> {
-          html.element("h2", "Problems in the inputs");
-          html.raw("<div class=\"scroll\"><table>\n<thead><tr><th>file</th><th class=\"n\">line")
-              .raw("</th><th>column</th><th>value</th><th>problem</th></tr></thead>\n<tbody>\n");
-          for (Problem problem : problems.subList(0, Math.min(MOST_PROBLEMS, problems.size()))) {
-            long line = problem.source().line();
-            html.raw("<tr>")
-                .element("td", problem.source().file())
-                .element("td class=\"n\"", line > 0 ? Long.toString(line) : "")
-                .element("td", problem.column())
-                .element("td", problem.value())
-                .element("td", problem.text())
-                .raw("</tr>\n");
-          }
-          html.raw("</tbody></table></div>\n");
-          if (problems.size() > MOST_PROBLEMS) {
-            html.element("p", problems.size() - MOST_PROBLEMS + " more are in problems.csv.");
-          }
-        });
-  }
-
-  private static String resource(String name) {
-    try (InputStream in = Page.class.getResourceAsStream(name)) {
-      if (in == null) {
-        throw new IllegalStateException("the program lacks its file " + name);
-      }
-      return new String(in.readAllBytes(), StandardCharsets.UTF_8);
-    } catch (IOException e) {
-      throw new UncheckedIOException(e);
-    }
+  private String name(AssetReview asset) {
+    return names.getOrDefault(asset.asset().id(), "asset");
   }
 }

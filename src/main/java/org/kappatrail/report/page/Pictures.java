@@ -1,16 +1,21 @@
 package org.kappatrail.report.page;
 
 import java.util.Map;
+import java.util.Optional;
 
 /**
- * SVG texts for the page; where one is missing, the page does without it.
+ * Charts for the page; where one is missing, the page does without it.
  *
  * @param assets charts over time by asset
  * @param correlations pictures of correlations by asset
- * @param fleetCorrelation the fleet's; empty text where there is none
+ * @param fleet where every bearing stands
+ * @param fleetCorrelation the fleet's correlations
  */
 public record Pictures(
-    Map<String, String> assets, Map<String, String> correlations, String fleetCorrelation) {
+    Map<String, Picture> assets,
+    Map<String, Picture> correlations,
+    Optional<Picture> fleet,
+    Optional<Picture> fleetCorrelation) {
 
   public Pictures {
     assets = Map.copyOf(assets);
@@ -19,6 +24,14 @@ public record Pictures(
 
   /** A page without pictures. */
   public static Pictures none() {
-    return new Pictures(Map.of(), Map.of(), "");
+    return new Pictures(Map.of(), Map.of(), Optional.empty(), Optional.empty());
+  }
+
+  Optional<Picture> asset(String id) {
+    return Optional.ofNullable(assets.get(id));
+  }
+
+  Optional<Picture> correlation(String id) {
+    return Optional.ofNullable(correlations.get(id));
   }
 }

@@ -3,11 +3,13 @@ package org.kappatrail.report.slides;
 import java.awt.Color;
 import java.awt.geom.Rectangle2D;
 import java.util.List;
+import java.util.Map;
 import org.apache.poi.sl.usermodel.ShapeType;
 import org.apache.poi.sl.usermodel.TextParagraph.TextAlign;
 import org.apache.poi.xslf.usermodel.XSLFAutoShape;
 import org.apache.poi.xslf.usermodel.XSLFConnectorShape;
 import org.apache.poi.xslf.usermodel.XSLFSlide;
+import org.kappatrail.report.chart.FleetRow;
 import org.kappatrail.report.chart.Palette;
 import org.kappatrail.report.page.Numbers;
 import org.kappatrail.tribology.LubricationRegime;
@@ -35,16 +37,24 @@ final class FleetPicture {
   private final Leaf leaf;
   private final XSLFSlide slide;
   private final List<FleetRow> rows;
+  private final Map<String, String> names;
   private final int shown;
   private final double labelWidth;
   private final double rowHeight;
   private final LogScale scale;
   private final Rectangle2D plot;
 
-  FleetPicture(Leaf leaf, List<FleetRow> rows) {
+  /**
+   * A picture to be drawn.
+   *
+   * @param rows the bearings, worst first
+   * @param names names of the assets by id
+   */
+  FleetPicture(Leaf leaf, List<FleetRow> rows, Map<String, String> names) {
     this.leaf = leaf;
     this.slide = leaf.slide();
-    this.rows = rows;
+    this.rows = List.copyOf(rows);
+    this.names = Map.copyOf(names);
     Rectangle2D room = leaf.room();
     labelWidth = Math.min(MOST_LABEL_WIDTH, LABEL_SHARE * room.getWidth());
     double height =
@@ -128,7 +138,11 @@ final class FleetPicture {
   private void row(FleetRow row, double y) {
     LevelShape.draw(slide, row.film().level(), plot.getMinX() - labelWidth + 7, y, 10);
     String label =
-        Words.name(row.asset()) + " " + Words.name(row.bearing()) + " · " + Words.name(row.name());
+        Words.name(row.asset())
+            + " "
+            + Words.name(row.bearing())
+            + " · "
+            + Words.name(names.getOrDefault(row.asset(), row.asset()));
     leaf.box(plot.getMinX() - labelWidth + 20, y - 9, labelWidth - 28, TEXT * TextFit.LINE + 1)
         .line(label, TEXT, false);
     double floor = scale.x(row.floor());
@@ -226,7 +240,7 @@ final class FleetPicture {
         y += LEGEND_HEIGHT;
       }
       draw(mark, x, y);
-      leaf.box(x + mark.width, y - 8, width - mark.width, 17)
+      leaf.box(x + mark.width, y - 8, width - mark.width + MARK_GAP - 3, 17)
           .ink(Palette.INK)
           .line(mark.words, LEGEND_TEXT, false);
       x += width + MARK_GAP;

@@ -7,7 +7,10 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.nio.file.StandardCopyOption;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.TreeMap;
+import org.kappatrail.report.chart.FleetRow;
 import org.kappatrail.report.office.OfficeProperties;
 import org.kappatrail.report.office.ShownText;
 import org.kappatrail.review.AssetReview;
@@ -20,6 +23,7 @@ import org.kappatrail.review.Review;
  */
 public final class Slides {
   private static final double LEVEL_TEXT = 18;
+  private static final double LEVEL_GAP = 30;
 
   private final Review review;
   private final Choice choice;
@@ -91,7 +95,9 @@ public final class Slides {
         low == 0
             ? "Every bearing stands at or above its floor"
             : low + " of " + rows.size() + " bearings stand below their floor";
-    new FleetPicture(stage.leaf(headline), rows).draw();
+    Map<String, String> names = new TreeMap<>();
+    review.assets().forEach(asset -> names.put(asset.asset().id(), asset.asset().name()));
+    new FleetPicture(stage.leaf(headline), rows, names).draw();
   }
 
   private void opening(Stage stage, String site) {
@@ -110,8 +116,9 @@ public final class Slides {
       String text = count(level) + " " + level.label();
       double width = leaf.fit().width(text, LEVEL_TEXT, true) + 2;
       LevelShape.draw(leaf.slide(), level, x + 8, y + 11, 14);
-      leaf.box(x + 22, y, width, LEVEL_TEXT * TextFit.LINE + 1).line(text, LEVEL_TEXT, true);
-      x += 22 + width + 26;
+      leaf.box(x + 22, y, width + LEVEL_GAP / 2, LEVEL_TEXT * TextFit.LINE + 1)
+          .line(text, LEVEL_TEXT, true);
+      x += 22 + width + LEVEL_GAP;
     }
   }
 

@@ -110,8 +110,9 @@ final class TextFit {
   private String ended(String text, double width, double points, boolean strong) {
     String kept = text.stripTrailing();
     boolean whole = width(kept + ELLIPSIS, points, strong) <= width;
-    while (!kept.isEmpty() && width(kept + ELLIPSIS, points, strong) > width) {
-      kept = kept.substring(0, kept.offsetByCodePoints(kept.length(), -1)).stripTrailing();
+    if (!whole) {
+      double room = width - width(ELLIPSIS, points, strong);
+      kept = kept.substring(0, fitting(kept, room, points, strong)).stripTrailing();
     }
     int blank = kept.lastIndexOf(' ');
     boolean within = kept.length() < text.length() && text.charAt(kept.length()) != ' ';
@@ -149,17 +150,29 @@ final class TextFit {
   private void breakWithin(
       StringBuilder line, List<String> lines, double width, double points, boolean strong) {
     while (width(line.toString().stripTrailing(), points, strong) > width) {
-      int fits = line.codePointCount(0, line.length());
-      while (fits > 1
-          && width(line.substring(0, line.offsetByCodePoints(0, fits)), points, strong) > width) {
-        fits--;
-      }
-      int cut = line.offsetByCodePoints(0, fits);
+      int first = line.offsetByCodePoints(0, 1);
+      int cut = Math.max(first, fitting(line.toString(), width, points, strong));
       if (cut >= line.length()) {
         return;
       }
       lines.add(line.substring(0, cut));
       line.delete(0, cut);
     }
+  }
+
+  /** Length of the longest beginning that is no wider; found by halving. */
+  private int fitting(String text, double width, double points, boolean strong) {
+    int fits = 0;
+    int beyond = text.codePointCount(0, text.length()) + 1;
+    while (beyond - fits > 1) {
+      int middle = (fits + beyond) / 2;
+      String beginning = text.substring(0, text.offsetByCodePoints(0, middle));
+      if (width(beginning, points, strong) <= width) {
+        fits = middle;
+      } else {
+        beyond = middle;
+      }
+    }
+    return text.offsetByCodePoints(0, fits);
   }
 }

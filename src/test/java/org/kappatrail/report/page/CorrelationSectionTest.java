@@ -15,23 +15,28 @@ class CorrelationSectionTest {
 
   @Test
   void sentencesNumbersAndTheCautionStandTogether() {
-    String html = html(List.of(pair(Form.MEASURED, 0.02), pair(Form.DETRENDED, 0.04)), "<svg/>");
+    String html =
+        html(
+            List.of(pair(Form.MEASURED, 0.02), pair(Form.DETRENDED, 0.04)),
+            Optional.of(Picture.ofText("<svg></svg>")));
     assertThat(html)
         .contains("<li>Lead&lt;b&gt; follows κ by one sample (−0.61, N* 22, q 0.02).</li>")
         .contains("Correlation is not cause")
-        .contains("data:image/svg+xml;base64,")
+        .contains("<svg class=\"chart\" role=\"img\" aria-label=\"Correlations of PM-DRY;")
         .contains("<td class=\"n\">−0.81 to −0.20</td>")
         .doesNotContain("<b> follows");
   }
 
   @Test
   void withoutAnyTestOnlyThatIsSaid() {
-    assertThat(html(List.of(), "")).contains("Too few samples").doesNotContain("<table");
+    assertThat(html(List.of(), Optional.empty()))
+        .contains("Too few samples")
+        .doesNotContain("<table");
   }
 
-  private static String html(List<PairCorrelation> tests, String picture) {
+  private static String html(List<PairCorrelation> tests, Optional<Picture> picture) {
     Html html = new Html();
-    new CorrelationSection(tests, picture, false).write(html, "PM-DRY");
+    new CorrelationSection(tests, picture, false).write(html, "PM-DRY", "c1");
     return html.toString();
   }
 
