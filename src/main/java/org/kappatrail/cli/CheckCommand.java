@@ -7,9 +7,8 @@ import java.util.concurrent.Callable;
 import org.kappatrail.duty.BearingDuty;
 import org.kappatrail.duty.DutyCells;
 import org.kappatrail.duty.DutyLog;
-import org.kappatrail.history.FileAccount;
-import org.kappatrail.history.Problem;
 import org.kappatrail.intake.HistoryCheck;
+import org.kappatrail.intake.LogAccount;
 import org.kappatrail.intake.LogSpan;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -32,17 +31,15 @@ final class CheckCommand implements Callable<Integer> {
 
   @Override
   public Integer call() throws IOException {
-    HistoryLoad load = new HistoryLoad(options, terminal.clock());
+    HistoryLoad load = HistoryLoad.toCheck(options, terminal.clock());
     List<LogSpan> spans = new ArrayList<>();
-    List<Problem> logProblems = new ArrayList<>();
-    List<FileAccount> logs = new ArrayList<>();
+    LogAccount logs;
     try (DutyLog log = load.openLog()) {
       log.forEachBearing(duty -> span(duty, spans));
-      logProblems.addAll(log.problems());
-      logs.addAll(log.accounts());
+      logs = new LogAccount(log.accounts(), log.problems(), spans, log.unknownBearings());
     }
-    terminal.out().print(HistoryCheck.text(load.intake(), logs, logProblems, spans));
-    boolean clean = load.intake().problems().isEmpty() && logProblems.isEmpty();
+    terminal.out().print(HistoryCheck.text(load.intake().upTo(load.asOf()), logs));
+    boolean clean = load.intake().problems().isEmpty() && logs.problems().isEmpty();
     return clean ? ExitCodes.DONE : ExitCodes.FOUND;
   }
 

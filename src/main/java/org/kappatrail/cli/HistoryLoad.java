@@ -39,16 +39,33 @@ final class HistoryLoad {
   private final PlantHistory chosen;
   private final LocalDate asOf;
 
+  /**
+   * Reads what is to be reviewed.
+   *
+   * @throws UnusableInputException where there is no day that the review could be made for
+   */
   HistoryLoad(HistoryOptions options, Clock clock) {
+    this(options, clock, false, Optional.empty());
+  }
+
+  /** A load of the whole fleet, whatever assets are named; the names are checked all the same. */
+  static HistoryLoad ofWholeFleet(HistoryOptions options, Clock clock) {
+    return new HistoryLoad(options, clock, true, Optional.empty());
+  }
+
+  private HistoryLoad(
+      HistoryOptions options, Clock clock, boolean wholeFleet, Optional<LocalDate> otherwise) {
     folder = options.folder();
     intake =
         HistoryReader.read(folder, Optional.of(LocalDate.now(clock).plusDays(ZONE_MARGIN_DAYS)));
-    chosen = choose(intake.history(), options.assets());
+    PlantHistory named = choose(intake.history(), options.assets());
+    chosen = wholeFleet ? intake.history() : named;
     LocalDate given = options.asOf();
     asOf =
         given != null
             ? given
             : Reviewer.latestSampling(intake.history())
+                .or(() -> otherwise)
                 .orElseThrow(
                     () ->
                         new UnusableInputException(
@@ -56,6 +73,11 @@ final class HistoryLoad {
                                 + ": no oil sample that can be used, so there is nothing to"
                                 + " review; put the laboratory's files into samples/, or give"
                                 + " --as-of to look at the logs alone"));
+  }
+
+  /** Reads what is to be looked at, which may be a history without samples. */
+  static HistoryLoad toCheck(HistoryOptions options, Clock clock) {
+    return new HistoryLoad(options, clock, false, Optional.of(LocalDate.now(clock)));
   }
 
   Intake intake() {
@@ -75,7 +97,7 @@ final class HistoryLoad {
   Review review(Optional<LocalDate> earlier, Progress progress) {
     List<AssetReview> assets;
     List<Problem> problems = new ArrayList<>(intake.problems());
-    List<FileAccount> files = new ArrayList<>(intake.files());
+    List<FileAccount> files = new ArrayList<>(intake.upTo(asOf).files());
     try (DutyLog log = openLog(asOf)) {
       assets =
           new Reviewer(chosen, intake.history(), intake.settings(), asOf, progress).review(log);

@@ -83,7 +83,8 @@ final class CellFinder {
   private List<Cell> cells(CellFault fault, CsvRecord row) {
     return switch (fault) {
       case CELLS -> overflows(row) ? List.of(new Cell("", "")) : List.of();
-      case BEARING -> List.of(new Cell(fault.column(), bearing(row)));
+      case TIME -> List.of(new Cell(fault.column(), time(row)));
+      case BEARING -> bearings(row).stream().map(name -> new Cell(fault.column(), name)).toList();
       default -> {
         List<Cell> cells = new ArrayList<>();
         layout
@@ -102,10 +103,32 @@ final class CellFinder {
     return layout.tagColumns().containsKey(index) ? table.columns().get(index) : fault.column();
   }
 
-  private String bearing(CsvRecord row) {
-    return layout.form() == LogLayout.Form.TAGGED
-        ? cell(LogLayout.TAG, row) + OddTexts.BETWEEN
-        : cell(LogLayout.ASSET, row) + OddTexts.BETWEEN + cell(LogLayout.BEARING, row);
+  private String time(CsvRecord row) {
+    String day = cell(LogLayout.TIME, row);
+    if (!layout.splitsTime()) {
+      return day;
+    }
+    String time = cell(LogLayout.TIME_OF_DAY, row).strip();
+    return day.strip() + ' ' + (time.isEmpty() ? "?" : time);
+  }
+
+  private List<String> bearings(CsvRecord row) {
+    String asset = cell(LogLayout.ASSET, row);
+    return switch (layout.form()) {
+      case LONG -> List.of(asset + OddTexts.BETWEEN + cell(LogLayout.BEARING, row));
+      case WIDE ->
+          layout.bearingsOfRowAsset().stream()
+              .map(name -> asset + OddTexts.BETWEEN + name)
+              .toList();
+      case TAGGED -> {
+        String tag = cell(LogLayout.TAG, row);
+        yield List.of(
+            layout
+                .bearingOfRowAsset(tag.strip())
+                .map(name -> asset + OddTexts.BETWEEN + name)
+                .orElse(tag + OddTexts.BETWEEN));
+      }
+    };
   }
 
   private boolean overflows(CsvRecord row) {

@@ -9,6 +9,8 @@ import java.sql.Statement;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
+import java.util.OptionalLong;
 import java.util.Properties;
 import org.jspecify.annotations.Nullable;
 import org.kappatrail.history.Bearing;
@@ -38,6 +40,7 @@ final class DatabaseSource implements DutySource {
   private List<FileAccount> accounts = List.of();
   private List<ReadingFates> fates = List.of();
   private List<Problem> problems = List.of();
+  private Map<String, Long> unknown = Map.of();
 
   /**
    * Connects and looks at the columns.
@@ -105,8 +108,10 @@ final class DatabaseSource implements DutySource {
     stop();
     ReadingFates fate = new ReadingFates(name, tally.counts(0));
     fates = List.of(fate);
-    accounts = List.of(tally.account(0, fate, readings.layout().unused()));
-    problems = tally.count(0, ReadingState.UNKNOWN_BEARING) > 0 ? unknownBearings() : List.of();
+    accounts = List.of(tally.account(0, fate, OptionalLong.empty(), readings.layout().unused()));
+    UnknownBearings found = unknown();
+    unknown = found.readings();
+    problems = found.problems();
   }
 
   @Override
@@ -117,6 +122,11 @@ final class DatabaseSource implements DutySource {
   @Override
   public List<ReadingFates> fates() {
     return fates;
+  }
+
+  @Override
+  public Map<String, Long> unknownBearings() {
+    return unknown;
   }
 
   @Override
@@ -182,13 +192,16 @@ final class DatabaseSource implements DutySource {
     return String.join(".", parts);
   }
 
-  private List<Problem> unknownBearings() throws SQLException {
+  private UnknownBearings unknown() throws SQLException {
+    UnknownBearings unknown = new UnknownBearings(bearings.stream().map(Bearing::key).toList());
+    if (tally.count(0, ReadingState.UNKNOWN_BEARING) == 0) {
+      return unknown;
+    }
     String query =
         "SELECT asset_text, bearing_text, COUNT(*) FROM ("
             + readings.sql(zone)
             + ") r WHERE fault = 6 GROUP BY asset_text, bearing_text"
             + " ORDER BY asset_text, bearing_text";
-    UnknownBearings unknown = new UnknownBearings(bearings.stream().map(Bearing::key).toList());
     try (Statement statement = connection.createStatement()) {
       statement.setMaxRows(MOST_UNKNOWN);
       try (ResultSet rows = statement.executeQuery(query)) {
@@ -200,7 +213,7 @@ final class DatabaseSource implements DutySource {
         }
       }
     }
-    return unknown.problems();
+    return unknown;
   }
 
   private void stop() throws SQLException {

@@ -1,5 +1,7 @@
 package org.kappatrail.duty;
 
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Map;
 import org.kappatrail.history.UnusableInputException;
 
@@ -45,13 +47,56 @@ final class DateFormatSql {
     if (format.startsWith("epoch-")) {
       return TimeSql.epoch("TRY_CAST(" + column + " AS DOUBLE)", format, place);
     }
-    String specifiers = specifiers(format);
+    List<String> specifiers =
+        variants(format).stream().map(DateFormatSql::specifiers).distinct().toList();
+    boolean zoned = specifiers.stream().anyMatch(each -> each.contains("%z"));
+    if (zoned && !specifiers.stream().allMatch(each -> each.contains("%z"))) {
+      throw new UnusableInputException(
+          "kappatrail.yaml: temperatures: date-format '"
+              + format
+              + "': an offset cannot be optional in a log");
+    }
     String text = "trim(" + column + ")";
     if (format.contains("X")) {
       text = "regexp_replace(" + text + ", 'Z$', '+00')";
     }
-    String parsed = "try_strptime(" + text + ", " + SqlText.literal(specifiers) + ")";
-    return new TimeSql("epoch_ms(" + parsed + ")", specifiers.contains("%z") ? "TRUE" : "FALSE");
+    String parsed = "try_strptime(" + text + ", [" + SqlText.literals(specifiers) + "])";
+    return new TimeSql("epoch_ms(" + parsed + ")", zoned ? "TRUE" : "FALSE");
+  }
+
+  /** The patterns with and without each part in square brackets, the longest first. */
+  private static List<String> variants(String format) {
+    int open = indexOutsideQuotes(format, '[', 0);
+    if (open < 0) {
+      return List.of(format);
+    }
+    int close = indexOutsideQuotes(format, ']', open);
+    int nested = indexOutsideQuotes(format, '[', open + 1);
+    if (close < 0 || (nested >= 0 && nested < close)) {
+      throw new UnusableInputException(
+          "kappatrail.yaml: temperatures: date-format '"
+              + format
+              + "': brackets close and do not nest");
+    }
+    String before = format.substring(0, open);
+    String part = format.substring(open + 1, close);
+    List<String> variants = new ArrayList<>();
+    for (String rest : variants(format.substring(close + 1))) {
+      variants.add(before + part + rest);
+      variants.add(before + rest);
+    }
+    return variants;
+  }
+
+  private static int indexOutsideQuotes(String format, char sign, int from) {
+    boolean quoted = false;
+    for (int at = from; at < format.length(); at++) {
+      quoted ^= format.charAt(at) == '\'';
+      if (!quoted && format.charAt(at) == sign) {
+        return at;
+      }
+    }
+    return -1;
   }
 
   private static String specifiers(String format) {

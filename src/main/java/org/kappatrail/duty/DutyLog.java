@@ -1,6 +1,7 @@
 package org.kappatrail.duty;
 
 import java.util.List;
+import java.util.Map;
 import java.util.function.Consumer;
 import org.kappatrail.history.FileAccount;
 import org.kappatrail.history.Problem;
@@ -24,6 +25,14 @@ public interface DutyLog extends AutoCloseable {
 
   /** Rows that could not be used; complete after {@link #forEachBearing}. */
   List<Problem> problems();
+
+  /**
+   * Readings of bearings that the register does not have, by asset and bearing as the logs name
+   * them; complete after {@link #forEachBearing}.
+   */
+  default Map<String, Long> unknownBearings() {
+    return Map.of();
+  }
 
   /** Why readings were left out, file by file; complete after {@link #forEachBearing}. */
   default List<ReadingFates> fates() {

@@ -2,6 +2,7 @@ package org.kappatrail.duty;
 
 import java.sql.SQLException;
 import java.util.List;
+import java.util.Map;
 import org.jspecify.annotations.Nullable;
 import org.kappatrail.history.FileAccount;
 import org.kappatrail.history.Problem;
@@ -20,6 +21,9 @@ interface DutySource extends AutoCloseable {
   List<FileAccount> accounts();
 
   List<ReadingFates> fates();
+
+  /** Readings of bearings that the register does not have, by name. */
+  Map<String, Long> unknownBearings();
 
   List<Problem> problems();
 

@@ -53,7 +53,9 @@ final class FaultSql {
 
   /** The state of a temperature that is no number. */
   static String noTemperature() {
-    return "CASE WHEN temperature_text IS NULL OR trim(temperature_text) = '' THEN "
+    return "CASE WHEN temperature_text IS NULL OR "
+        + MissingSql.isUsual("temperature_text")
+        + " THEN "
         + ReadingState.NO_TEMPERATURE.code()
         + " WHEN regexp_matches(temperature_text, '\\d') THEN "
         + ReadingState.TEMPERATURE_UNREADABLE.code()
@@ -64,6 +66,8 @@ final class FaultSql {
 
   /** 1 where a speed stands there and is no number. */
   static String flaw() {
-    return "CASE WHEN speed IS NOT NULL THEN 0 WHEN trim(speed_text) <> '' THEN 1 ELSE 0 END";
+    return "CASE WHEN speed IS NOT NULL THEN 0 WHEN speed_text IS NULL THEN 0 WHEN "
+        + MissingSql.isUsual("speed_text")
+        + " THEN 0 ELSE 1 END";
   }
 }

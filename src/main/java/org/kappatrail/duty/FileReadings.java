@@ -1,8 +1,6 @@
 package org.kappatrail.duty;
 
 import java.util.List;
-import java.util.stream.Collectors;
-import java.util.stream.IntStream;
 import org.kappatrail.history.Bearing;
 import org.kappatrail.history.Settings;
 
@@ -65,12 +63,12 @@ final class FileReadings {
           time_text, asset_text, bearing_text, temperature_text, speed_text, quality_text, row_number
         FROM whole
         LEFT JOIN names ON names.asset = trim(asset_text) AND names.name = trim(bearing_text)"""
-        .replace("{names}", names())
+        .replace("{names}", RegisterNames.rows(bearings))
         .replace("{common}", columns.common())
         .replace("{asset}", columns.text(LogLayout.ASSET))
         .replace("{bearing}", columns.text(LogLayout.BEARING))
-        .replace("{temperature_text}", columns.text(LogLayout.TEMPERATURE))
-        .replace("{speed_text}", columns.text(LogLayout.SPEED))
+        .replace("{temperature_text}", columns.value(LogLayout.TEMPERATURE))
+        .replace("{speed_text}", columns.value(LogLayout.SPEED))
         .replace("{quality}", columns.text(LogLayout.QUALITY))
         .replace(
             "{temperature}",
@@ -82,22 +80,5 @@ final class FileReadings {
         .replace("{fault}", FaultSql.fault())
         .replace("{flaw}", FaultSql.flaw())
         .replace("{scan}", scan);
-  }
-
-  private String names() {
-    if (bearings.isEmpty()) {
-      return "(0, NULL, NULL)";
-    }
-    return IntStream.range(0, bearings.size())
-        .mapToObj(
-            index ->
-                "("
-                    + (index + 1)
-                    + ", "
-                    + SqlText.literal(bearings.get(index).asset())
-                    + ", "
-                    + SqlText.literal(bearings.get(index).id())
-                    + ")")
-        .collect(Collectors.joining(", "));
   }
 }

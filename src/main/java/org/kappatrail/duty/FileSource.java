@@ -1,9 +1,13 @@
 package org.kappatrail.duty;
 
+import java.sql.ResultSet;
 import java.sql.SQLException;
+import java.sql.Statement;
 import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Map;
+import java.util.OptionalLong;
 import org.jspecify.annotations.Nullable;
 import org.kappatrail.history.Bearing;
 import org.kappatrail.history.BearingKey;
@@ -31,6 +35,7 @@ final class FileSource implements DutySource {
   private List<FileAccount> accounts = List.of();
   private List<ReadingFates> fates = List.of();
   private List<Problem> problems = List.of();
+  private Map<String, Long> unknown = Map.of();
 
   /**
    * Reads the headers.
@@ -97,13 +102,16 @@ final class FileSource implements DutySource {
         int source = groups.get(group).firstSource() + index;
         ReadingFates fate = new ReadingFates(file(group, index), tally.counts(source));
         newFates.add(fate);
-        newAccounts.add(tally.account(source, fate, readings.get(group).layout().unused()));
+        newAccounts.add(
+            tally.account(
+                source, fate, fileRows(group, index), readings.get(group).layout().unused()));
         look(group, index, rejected);
       }
     }
     accounts = List.copyOf(newAccounts);
     fates = List.copyOf(newFates);
     problems = rejected.problems();
+    unknown = rejected.unknownBearings();
   }
 
   @Override
@@ -114,6 +122,11 @@ final class FileSource implements DutySource {
   @Override
   public List<ReadingFates> fates() {
     return fates;
+  }
+
+  @Override
+  public Map<String, Long> unknownBearings() {
+    return unknown;
   }
 
   @Override
@@ -206,6 +219,19 @@ final class FileSource implements DutySource {
         texts.of(CellFault.SPEED).values().stream().mapToLong(OddTexts.Occurrence::count).sum();
     LogTable table = groups.get(group).tables().get(index);
     rejected.add(table, alone.layout(), texts, tally.unreadable(source) + speeds);
+  }
+
+  /** Rows of a file with a column per tag, where what is counted are the cells. */
+  private OptionalLong fileRows(int group, int index) throws SQLException {
+    if (readings.get(group).layout().form() != LogLayout.Form.WIDE) {
+      return OptionalLong.empty();
+    }
+    String all = FileScan.of(groups.get(group).only(index), !serial[group]);
+    try (Statement statement = engine.statement();
+        ResultSet rows = statement.executeQuery("SELECT COUNT(*) FROM " + all)) {
+      rows.next();
+      return OptionalLong.of(rows.getLong(1));
+    }
   }
 
   private String file(int group, int index) {

@@ -14,6 +14,10 @@ import org.kappatrail.history.UnusableInputException;
 /** Which column of a table of readings carries what. */
 final class LogLayout {
   static final String TIME = "time";
+
+  /** Stands beside a time that is only a day; a column is it only where the settings say so. */
+  static final String TIME_OF_DAY = "time_of_day";
+
   static final String ASSET = "asset";
   static final String BEARING = "bearing";
   static final String TEMPERATURE = "temperature_c";
@@ -23,7 +27,7 @@ final class LogLayout {
   static final String VALUE = "value";
 
   private static final List<String> CANONICAL =
-      List.of(TIME, ASSET, BEARING, TEMPERATURE, SPEED, QUALITY, TAG, VALUE);
+      List.of(TIME, TIME_OF_DAY, ASSET, BEARING, TEMPERATURE, SPEED, QUALITY, TAG, VALUE);
 
   /** Forms of a table of readings. */
   enum Form {
@@ -71,6 +75,11 @@ final class LogLayout {
       place(header.get(index), index, wanted);
     }
     requireColumns(header);
+  }
+
+  /** True where day and time of day stand in columns of their own. */
+  boolean splitsTime() {
+    return columns.containsKey(TIME_OF_DAY) && columns.containsKey(TIME);
   }
 
   Form form() {
@@ -135,7 +144,35 @@ final class LogLayout {
         .findFirst();
   }
 
+  /** True where a tag has no asset of its own, so that the row's asset tells the bearing. */
+  boolean takesAssetsFromRows() {
+    return mapping.tags().values().stream().anyMatch(tag -> tag.asset().isEmpty());
+  }
+
+  /** Bearings whose asset a row of a log with a column per tag must tell. */
+  List<String> bearingsOfRowAsset() {
+    return tagColumns.values().stream()
+        .filter(tag -> tag.asset().isEmpty())
+        .map(Tag::bearing)
+        .distinct()
+        .toList();
+  }
+
+  /** The bearing that a tag without an asset names; empty for any other tag. */
+  Optional<String> bearingOfRowAsset(String tag) {
+    return Optional.ofNullable(mapping.tags().get(tag))
+        .filter(known -> known.asset().isEmpty())
+        .map(Tag::bearing);
+  }
+
   private void requireColumns(List<String> header) {
+    if (takesAssetsFromRows() && !columns.containsKey(ASSET) && constant(ASSET).isEmpty()) {
+      throw new UnusableInputException(
+          name
+              + ": has no column asset, which the tags without asset: need; it has "
+              + String.join(", ", header)
+              + "; name it in columns:, or put asset: to each of tags: in kappatrail.yaml");
+    }
     for (String required : form.required()) {
       if (!columns.containsKey(required) && !mapping.constants().containsKey(required)) {
         throw new UnusableInputException(
@@ -180,7 +217,7 @@ final class LogLayout {
       wanted.put(key(entry.getKey()), canonical);
     }
     for (String canonical : CANONICAL) {
-      if (!wanted.containsValue(canonical)) {
+      if (!wanted.containsValue(canonical) && !canonical.equals(TIME_OF_DAY)) {
         wanted.putIfAbsent(canonical, canonical);
       }
     }

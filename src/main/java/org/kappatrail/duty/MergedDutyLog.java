@@ -2,8 +2,11 @@ package org.kappatrail.duty;
 
 import java.sql.SQLException;
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Map;
+import java.util.TreeMap;
 import java.util.concurrent.CancellationException;
 import java.util.function.Consumer;
 import org.jspecify.annotations.Nullable;
@@ -14,9 +17,13 @@ import org.kappatrail.history.SourceLine;
 
 /** The log of a site from all its sources, each in the order of the bearings. */
 final class MergedDutyLog implements DutyLog {
+  private static final String TWICE = "of a bearing that has readings elsewhere";
+
   private final List<DutySource> sources;
   private final List<Problem> firstProblems;
   private List<Problem> problems;
+  private List<FileAccount> accounts = List.of();
+  private Map<String, Long> unknown = Map.of();
 
   MergedDutyLog(List<DutySource> sources, List<Problem> firstProblems) {
     this.sources = List.copyOf(sources);
@@ -32,6 +39,7 @@ final class MergedDutyLog implements DutyLog {
   @Override
   public void forEachBearing(Consumer<BearingDuty> use, RowsRead progress) {
     List<Problem> found = new ArrayList<>(firstProblems);
+    Map<Integer, Long> unneeded = new TreeMap<>();
     List<@Nullable BearingDuty> heads = new ArrayList<>();
     for (DutySource source : sources) {
       heads.add(first(source, progress));
@@ -42,6 +50,7 @@ final class MergedDutyLog implements DutyLog {
       BearingDuty duty = heads.get(least);
       if (duty != null && duty.bearing().equals(last)) {
         found.add(twice(duty.bearing()));
+        unneeded.merge(least, readings(duty), Long::sum);
       } else if (duty != null) {
         last = duty.bearing();
         use.accept(duty);
@@ -49,20 +58,32 @@ final class MergedDutyLog implements DutyLog {
       heads.set(least, next(sources.get(least)));
       least = least(heads);
     }
-    for (DutySource source : sources) {
+    List<FileAccount> files = new ArrayList<>();
+    Map<String, Long> names = new TreeMap<>();
+    for (int index = 0; index < sources.size(); index++) {
+      DutySource source = sources.get(index);
       finish(source);
       found.addAll(source.problems());
+      source.unknownBearings().forEach((name, readings) -> names.merge(name, readings, Long::sum));
+      // Only a database comes after another source, and it is one table.
+      long left = unneeded.getOrDefault(index, 0L);
+      source.accounts().forEach(account -> files.add(account.without(left, TWICE)));
     }
     found.sort(null);
     problems = List.copyOf(found);
+    files.sort(Comparator.comparing(FileAccount::file));
+    accounts = List.copyOf(files);
+    unknown = Collections.unmodifiableMap(names);
   }
 
   @Override
   public List<FileAccount> accounts() {
-    return sources.stream()
-        .flatMap(source -> source.accounts().stream())
-        .sorted(Comparator.comparing(FileAccount::file))
-        .toList();
+    return accounts;
+  }
+
+  @Override
+  public Map<String, Long> unknownBearings() {
+    return unknown;
   }
 
   @Override
@@ -112,6 +133,14 @@ final class MergedDutyLog implements DutyLog {
     return Thread.currentThread().isInterrupted()
         ? new CancellationException("the reading of the logs was cancelled")
         : source.explain(failure);
+  }
+
+  private static long readings(BearingDuty duty) {
+    long readings = 0;
+    for (int cell = 0; cell < duty.cells().size(); cell++) {
+      readings += duty.cells().readings(cell);
+    }
+    return readings;
   }
 
   private static int least(List<@Nullable BearingDuty> heads) {

@@ -31,20 +31,37 @@ final class NumberSql {
   /** The column as a floating point number; NULL where it is none. */
   static String number(String column, String type, ExportMapping mapping, String place) {
     if (isNumeric(type)) {
-      return "CAST(" + column + " AS DOUBLE)";
+      return MissingSql.withoutNamedNumber("CAST(" + column + " AS DOUBLE)", mapping);
     }
     if (!type.equals(LogTable.TEXT)) {
       throw new UnusableInputException(
           place + ": a column of type " + type + " holds no numbers; give a number or a text");
     }
-    String text = column;
+    String text = MissingSql.withoutNamed(column, mapping);
     if (mapping.thousands().isPresent()) {
-      text = "replace(" + text + ", " + SqlText.literal(mapping.thousands().get()) + ", '')";
+      text = withoutThousands(text, mapping.thousands().get(), mapping.decimalComma());
     }
     if (mapping.decimalComma()) {
       text = "CASE WHEN NOT contains(" + text + ", '.') THEN replace(" + text + ", ',', '.') END";
     }
     return "TRY_CAST(" + text + " AS DOUBLE)";
+  }
+
+  /** Groups of three without the sign between them; NULL where the sign stands elsewhere. */
+  private static String withoutThousands(String text, String sign, boolean decimalComma) {
+    String even = text;
+    if (sign.isBlank()) {
+      // No-break and narrow blanks count as blanks.
+      even = "translate(trim(" + text + "), '\u00A0\u202F\u2009', '   ')";
+    }
+    String escaped = sign.isBlank() ? " " : "\\" + sign;
+    String groups =
+        "[+-]?\\d{1,3}(" + escaped + "\\d{3})+(" + (decimalComma ? "," : "\\.") + "\\d*)?";
+    return "CASE WHEN NOT contains({e}, {s}) THEN {e} WHEN regexp_full_match(trim({e}), {g})"
+        .concat(" THEN replace({e}, {s}, '') END")
+        .replace("{g}", SqlText.literal(groups))
+        .replace("{s}", SqlText.literal(sign.isBlank() ? " " : sign))
+        .replace("{e}", even);
   }
 
   /**

@@ -8,6 +8,7 @@ import java.util.EnumMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 
 /**
  * The distinct texts of one file that the statement could not use, by kind. The engine itself tells
@@ -43,11 +44,13 @@ final class OddTexts {
     return text.strip();
   }
 
-  /** The same texts but those of one kind. */
-  OddTexts without(CellFault fault) {
+  /** The same texts but some of one kind. */
+  OddTexts without(CellFault fault, Set<String> some) {
     OddTexts rest = new OddTexts();
     rest.texts.putAll(texts);
-    rest.texts.remove(fault);
+    Map<String, Occurrence> left = new LinkedHashMap<>(of(fault));
+    left.keySet().removeAll(some);
+    rest.texts.put(fault, left);
     return rest;
   }
 

@@ -3,6 +3,7 @@ package org.kappatrail.duty;
 import java.util.Collections;
 import java.util.EnumMap;
 import java.util.Map;
+import java.util.TreeMap;
 
 /**
  * Why the readings of a file were used or left out.
@@ -23,6 +24,18 @@ public record ReadingFates(String file, Map<ReadingState, Long> counts) {
 
   public long total() {
     return counts.values().stream().mapToLong(Long::longValue).sum();
+  }
+
+  /** Readings left out, by reason. */
+  public Map<String, Long> rejected() {
+    Map<String, Long> rejected = new TreeMap<>();
+    counts.forEach(
+        (state, readings) -> {
+          if (!state.isUsed()) {
+            rejected.put(state.label(), readings);
+          }
+        });
+    return rejected;
   }
 
   public long used() {

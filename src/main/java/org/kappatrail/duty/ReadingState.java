@@ -1,11 +1,13 @@
 package org.kappatrail.duty;
 
+import org.kappatrail.history.FileAccount;
+
 /** What becomes of a reading; the statement speaks of a state by its code. */
 public enum ReadingState {
   RUNNING(0, "used, running"),
   STOPPED(1, "used, stopped"),
   REPEATED(2, "at an instant that has another reading"),
-  LATER(3, "later than the review"),
+  LATER(3, FileAccount.LATER),
   TIME_UNREADABLE(4, "time that cannot be read"),
   TOO_MANY_CELLS(5, "more cells than the header"),
   UNKNOWN_BEARING(6, "bearing that is not in the register"),

@@ -1,6 +1,7 @@
 package org.kappatrail.duty;
 
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
@@ -30,9 +31,11 @@ final class RejectedCells {
    * @param unreadable cells that are listed one by one, as the statement counted them
    */
   void add(LogTable table, LogLayout layout, OddTexts odd, long unreadable) {
-    if (layout.form() == LogLayout.Form.TAGGED && !odd.of(CellFault.BEARING).isEmpty()) {
-      problems.add(unknownTags(table, odd.of(CellFault.BEARING)));
-      odd = odd.without(CellFault.BEARING);
+    Map<String, OddTexts.Occurrence> tags = new LinkedHashMap<>(odd.of(CellFault.BEARING));
+    tags.keySet().removeIf(text -> !text.endsWith(String.valueOf(OddTexts.BETWEEN)));
+    if (layout.form() == LogLayout.Form.TAGGED && !tags.isEmpty()) {
+      problems.add(unknownTags(table, tags));
+      odd = odd.without(CellFault.BEARING, tags.keySet());
     }
     addCells(table, layout, odd, unreadable);
   }
@@ -69,6 +72,10 @@ final class RejectedCells {
     all.addAll(unknownBearings.problems());
     all.sort(null);
     return all;
+  }
+
+  Map<String, Long> unknownBearings() {
+    return unknownBearings.readings();
   }
 
   private void addTexts(LogTable table, OddTexts odd) {

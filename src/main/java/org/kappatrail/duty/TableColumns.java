@@ -29,7 +29,7 @@ final class TableColumns {
         .replace("{first}", Integer.toString(group.firstSource()))
         .replace("{row}", csv ? "0" : "file_row_number + 1")
         .replace("{overflow}", csv ? FileScan.OVERFLOW : "CAST(NULL AS VARCHAR)")
-        .replace("{time}", text(LogLayout.TIME))
+        .replace("{time}", layout.splitsTime() ? dayAndTime() : text(LogLayout.TIME))
         .replace("{clock}", time.clockMs())
         .replace("{zoned}", time.zoned());
   }
@@ -54,6 +54,21 @@ final class TableColumns {
     return "CAST(" + FileScan.column(group.shape(), index) + " AS VARCHAR)";
   }
 
+  /** The text of a column of numbers; NULL where the settings take it for missing. */
+  String value(String canonical) {
+    Optional<Integer> index = layout.find(canonical);
+    return index.isPresent() && layout.constant(canonical).isEmpty()
+        ? value(index.get())
+        : text(canonical);
+  }
+
+  String value(int index) {
+    String column = FileScan.column(group.shape(), index);
+    return NumberSql.isNumeric(group.shape().types().get(index))
+        ? "CAST(" + MissingSql.withoutNamedNumber(column, mapping) + " AS VARCHAR)"
+        : MissingSql.withoutNamed(text(index), mapping);
+  }
+
   /** A canonical column as a number in the unit of the file. */
   String number(String canonical) {
     Optional<Integer> index = layout.find(canonical);
@@ -73,13 +88,24 @@ final class TableColumns {
       return TimeSql.iso(text(LogLayout.TIME));
     }
     int index = layout.find(LogLayout.TIME).orElseThrow();
+    String format = mapping.dateFormat().orElse("");
+    if (layout.splitsTime()) {
+      String joined = dayAndTime();
+      return format.isEmpty() ? TimeSql.iso(joined) : DateFormatSql.of(joined, format, name());
+    }
     String column = FileScan.column(group.shape(), index);
     String type = group.shape().types().get(index);
-    String format = mapping.dateFormat().orElse("");
     if (!type.equals(LogTable.TEXT)) {
       return TimeSql.typed(column, type, format, name());
     }
     return format.isEmpty() ? TimeSql.iso(column) : DateFormatSql.of(column, format, name());
+  }
+
+  /** Day and time of day joined with a blank; a row without one of them has no time. */
+  private String dayAndTime() {
+    return "CASE WHEN trim({time}) <> '' THEN trim({day}) || ' ' || trim({time}) ELSE {day} || ' ?' END"
+        .replace("{day}", text(LogLayout.TIME))
+        .replace("{time}", text(LogLayout.TIME_OF_DAY));
   }
 
   private String name() {

@@ -63,6 +63,10 @@ final class TableReadings {
     this.columns = List.copyOf(columns);
     this.mapping = mapping;
     this.names = names;
+    if (mapping.columns().containsValue(LogLayout.TIME_OF_DAY)) {
+      throw new UnusableInputException(
+          table + ": time_of_day is for files; make a view with a timestamp and name that");
+    }
     if (!mapping.tags().isEmpty()) {
       throw new UnusableInputException(
           table + ": tags: are for files; make a view with a row per reading and name that");
@@ -166,7 +170,7 @@ final class TableReadings {
               + column.get().type()
               + " and no number; make a view with numbers and name that");
     }
-    return engine.number(column.get().quoted());
+    return MissingSql.withoutNamedNumber(engine.number(column.get().quoted()), mapping);
   }
 
   private String text(String canonical) {

@@ -7,7 +7,6 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.stream.Collectors;
 import org.kappatrail.history.Bearing;
-import org.kappatrail.history.BearingKey;
 import org.kappatrail.history.ExportMapping;
 import org.kappatrail.history.ExportMapping.Tag;
 import org.kappatrail.history.NearestName;
@@ -65,66 +64,104 @@ final class TagReadings {
     return mapping.tags().values().stream().anyMatch(tag -> tag.quantity() == Tag.Quantity.QUALITY);
   }
 
+  /** A bearing as tags name it: without an asset where a column of the file tells that. */
+  private record Place(Optional<String> asset, String bearing) {
+    static Place of(Tag tag) {
+      return new Place(tag.asset(), tag.bearing());
+    }
+
+    @Override
+    public String toString() {
+      return asset.map(name -> name + "/").orElse("") + bearing;
+    }
+  }
+
   /** An event per row and bearing; rows that cannot be placed make one event of no bearing. */
   private String wide(String scan) {
-    Map<BearingKey, Map<Tag.Quantity, Integer>> byBearing = new LinkedHashMap<>();
+    Map<Place, Map<Tag.Quantity, Integer>> byPlace = new LinkedHashMap<>();
     layout.tagColumns().entrySet().stream()
         .sorted(Map.Entry.comparingByKey())
-        .forEach(entry -> put(byBearing, entry.getValue(), entry.getKey()));
+        .forEach(entry -> put(byPlace, entry.getValue(), entry.getKey()));
     List<String> cells = new ArrayList<>();
-    byBearing.forEach((bearing, found) -> cells.add(cells(bearing, found)));
+    byPlace.forEach((place, found) -> cells.add(cells(key(place), place.bearing(), found)));
     return """
         SELECT source, row_number, overflow, time_text, clock_ms, zoned, quality_text,
-          CAST(NULL AS VARCHAR) AS tag_text, e.bearing AS bearing, 0 AS rank,
+          CAST(NULL AS VARCHAR) AS tag_text, row_asset AS asset_text, e.name AS name_text,
+          {bearing} AS bearing, 0 AS rank,
           e.temperature_text AS temperature_text, e.temperature_c AS temperature_c,
           e.speed_text AS speed_text, e.speed_rpm AS speed_rpm, e.mark_text AS mark_text
         FROM (
-          SELECT source, row_number, overflow, time_text, clock_ms, zoned, quality_text,
+          SELECT source, row_number, overflow, time_text, clock_ms, zoned, quality_text, row_asset,
             UNNEST(CASE WHEN clock_ms IS NULL OR trim(overflow) <> '' THEN [{nothing}]
               ELSE [{cells}] END) AS e
-          FROM (SELECT {common}, {quality} AS quality_text, * FROM {scan})
+          FROM (SELECT {common}, {quality} AS quality_text, {asset} AS row_asset, * FROM {scan})
         )
+        {names}
         WHERE e.bearing = 0 OR trim(e.temperature_text) <> '' OR trim(e.speed_text) <> ''
           OR trim(e.mark_text) <> ''"""
-        .replace("{nothing}", cells(0, Map.of()))
+        .replace("{bearing}", bearing("e.bearing"))
+        .replace("{names}", names("e.bearing", "e.name"))
+        .replace("{nothing}", cells(0, "", Map.of()))
         .replace("{cells}", String.join(", ", cells))
         .replace("{common}", columns.common())
         .replace("{quality}", columns.text(LogLayout.QUALITY))
+        .replace("{asset}", columns.text(LogLayout.ASSET))
         .replace("{scan}", scan);
   }
 
-  private void put(Map<BearingKey, Map<Tag.Quantity, Integer>> byBearing, Tag tag, int index) {
+  /** The key of the register that a tag leads to, with the row's asset where it has none. */
+  private String bearing(String ofTag) {
+    return layout.takesAssetsFromRows()
+        ? "CASE WHEN {t} < 0 THEN COALESCE(names.bearing, 0) ELSE COALESCE({t}, 0) END"
+            .replace("{t}", ofTag)
+        : "COALESCE(" + ofTag + ", 0)";
+  }
+
+  private String names(String ofTag, String name) {
+    return layout.takesAssetsFromRows()
+        ? "LEFT JOIN (VALUES {rows}) names (bearing, asset, name) ON {t} < 0"
+            .concat(" AND names.asset = trim(row_asset) AND names.name = {n}")
+            .replace("{t}", ofTag)
+            .replace("{n}", name)
+            .replace("{rows}", RegisterNames.rows(bearings))
+        : "";
+  }
+
+  private void put(Map<Place, Map<Tag.Quantity, Integer>> byPlace, Tag tag, int index) {
     Map<Tag.Quantity, Integer> found =
-        byBearing.computeIfAbsent(tag.bearing(), key -> new LinkedHashMap<>());
+        byPlace.computeIfAbsent(Place.of(tag), key -> new LinkedHashMap<>());
     if (found.put(tag.quantity(), index) != null) {
       throw new UnusableInputException(
           group.tables().get(0).file().name()
               + ": two tags carry "
               + tag.quantity().label()
               + " of "
-              + tag.bearing()
+              + Place.of(tag)
               + "; name one of them in tags: only");
     }
   }
 
-  private String cells(BearingKey bearing, Map<Tag.Quantity, Integer> found) {
-    return cells(key(bearing), found);
+  /** A missing value is an empty cell here, so that the value before it is held. */
+  private String value(int index) {
+    return MissingSql.withoutUsual(columns.value(index));
   }
 
-  private String cells(int key, Map<Tag.Quantity, Integer> found) {
+  private String cells(int key, String name, Map<Tag.Quantity, Integer> found) {
     Optional<Integer> temperature = Optional.ofNullable(found.get(Tag.Quantity.TEMPERATURE));
     Optional<Integer> speed = Optional.ofNullable(found.get(Tag.Quantity.SPEED));
     Optional<Integer> mark = Optional.ofNullable(found.get(Tag.Quantity.QUALITY));
     return "{'bearing': "
         + key
+        + ", 'name': "
+        + SqlText.literal(name)
         + ", 'temperature_text': "
-        + temperature.map(columns::text).orElse("CAST(NULL AS VARCHAR)")
+        + temperature.map(this::value).orElse("CAST(NULL AS VARCHAR)")
         + ", 'temperature_c': "
         + temperature
             .map(index -> NumberSql.celsius(columns.number(index), mapping))
             .orElse("CAST(NULL AS DOUBLE)")
         + ", 'speed_text': "
-        + speed.map(columns::text).orElse("CAST(NULL AS VARCHAR)")
+        + speed.map(this::value).orElse("CAST(NULL AS VARCHAR)")
         + ", 'speed_rpm': "
         + speed
             .map(index -> NumberSql.rpm(columns.number(index), mapping))
@@ -138,39 +175,49 @@ final class TagReadings {
   private String tagged(String scan) {
     String tags =
         mapping.tags().entrySet().stream()
-            .map(
-                entry ->
-                    "("
-                        + SqlText.literal(entry.getKey().strip())
-                        + ", "
-                        + key(entry.getValue().bearing())
-                        + ", "
-                        + rank(entry.getValue().quantity())
-                        + ")")
+            .map(entry -> tag(entry.getKey().strip(), entry.getValue()))
             .collect(Collectors.joining(", "));
     return """
         SELECT source, row_number, overflow, time_text, clock_ms, zoned, quality_text, tag_text,
-          COALESCE(tags.bearing, 0) AS bearing, COALESCE(tags.quantity, 0) AS rank,
+          CASE WHEN tags.bearing < 0 THEN row_asset ELSE tag_text END AS asset_text,
+          CASE WHEN tags.bearing < 0 THEN tags.name END AS name_text,
+          {bearing} AS bearing, COALESCE(tags.quantity, 0) AS rank,
           CASE WHEN tags.quantity = 0 THEN value_text END AS temperature_text,
           CASE WHEN tags.quantity = 0 THEN {celsius} END AS temperature_c,
           CASE WHEN tags.quantity = 1 THEN value_text END AS speed_text,
           CASE WHEN tags.quantity = 1 THEN {rpm} END AS speed_rpm,
           CASE WHEN tags.quantity = 2 THEN value_text END AS mark_text
         FROM (
-          SELECT {common}, {quality} AS quality_text, {tag} AS tag_text,
+          SELECT {common}, {quality} AS quality_text, {tag} AS tag_text, {asset} AS row_asset,
             {value_text} AS value_text, {number} AS number
           FROM {scan}
         )
-        LEFT JOIN (VALUES {tags}) tags (tag, bearing, quantity) ON tags.tag = trim(tag_text)"""
+        LEFT JOIN (VALUES {tags}) tags (tag, bearing, quantity, name) ON tags.tag = trim(tag_text)
+        {names}"""
+        .replace("{bearing}", bearing("tags.bearing"))
+        .replace("{names}", names("tags.bearing", "tags.name"))
         .replace("{celsius}", NumberSql.celsius("number", mapping))
         .replace("{rpm}", NumberSql.rpm("number", mapping))
         .replace("{common}", columns.common())
         .replace("{quality}", columns.text(LogLayout.QUALITY))
         .replace("{tag}", columns.text(LogLayout.TAG))
-        .replace("{value_text}", columns.text(LogLayout.VALUE))
+        .replace("{asset}", columns.text(LogLayout.ASSET))
+        .replace("{value_text}", MissingSql.withoutUsual(columns.value(LogLayout.VALUE)))
         .replace("{number}", columns.number(LogLayout.VALUE))
         .replace("{tags}", tags)
         .replace("{scan}", scan);
+  }
+
+  private String tag(String name, Tag tag) {
+    return "("
+        + SqlText.literal(name)
+        + ", "
+        + key(Place.of(tag))
+        + ", "
+        + rank(tag.quantity())
+        + ", "
+        + SqlText.literal(tag.bearing())
+        + ")";
   }
 
   /** As the query names them. */
@@ -182,20 +229,30 @@ final class TagReadings {
     };
   }
 
-  private int key(BearingKey bearing) {
+  /** Place in the register, from 1; -1 where the asset of the row is needed to know it. */
+  private int key(Place place) {
     for (int index = 0; index < bearings.size(); index++) {
-      if (bearings.get(index).key().equals(bearing)) {
-        return index + 1;
+      Bearing bearing = bearings.get(index);
+      if (bearing.id().equals(place.bearing())) {
+        if (place.asset().isEmpty()) {
+          return -1;
+        }
+        if (place.asset().get().equals(bearing.asset())) {
+          return index + 1;
+        }
       }
     }
+    List<String> known =
+        bearings.stream()
+            .map(bearing -> place.asset().isEmpty() ? bearing.id() : bearing.key().toString())
+            .toList();
     String nearest =
-        NearestName.of(
-                bearing.toString(), bearings.stream().map(known -> known.key().toString()).toList())
-            .map(known -> "; the nearest name is '" + known + "'")
+        NearestName.of(place.toString(), known)
+            .map(name -> "; the nearest name is '" + name + "'")
             .orElse("");
     throw new UnusableInputException(
         "kappatrail.yaml: temperatures: tags: the register has no bearing '"
-            + bearing
+            + place
             + "'"
             + nearest);
   }

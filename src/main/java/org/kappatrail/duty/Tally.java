@@ -5,6 +5,7 @@ import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalLong;
 import org.kappatrail.history.FileAccount;
 
 /** Counts what became of the readings, source by source. */
@@ -71,14 +72,19 @@ final class Tally {
         + count(source, ReadingState.TEMPERATURE_UNREADABLE);
   }
 
-  /** The account of a file. */
-  FileAccount account(int source, ReadingFates fate, List<String> unusedColumns) {
+  /**
+   * The account of a file.
+   *
+   * @param fileRows its rows, where what is counted are cells
+   */
+  FileAccount account(
+      int source, ReadingFates fate, OptionalLong fileRows, List<String> unusedColumns) {
     return new FileAccount(
         fate.file(),
         FileAccount.Kind.TEMPERATURES,
-        fate.total(),
+        fileRows,
         fate.used(),
-        fate.total() - fate.used(),
+        fate.rejected(),
         day(firstDay[source]),
         day(lastDay[source]),
         unusedColumns);

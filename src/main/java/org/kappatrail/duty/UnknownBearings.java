@@ -3,6 +3,7 @@ package org.kappatrail.duty;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.TreeMap;
 import org.kappatrail.history.BearingKey;
 import org.kappatrail.history.ExportMapping;
 import org.kappatrail.history.NearestName;
@@ -26,6 +27,12 @@ final class UnknownBearings {
         name,
         new Seen(place, readings),
         (first, next) -> new Seen(first.first(), first.readings() + next.readings()));
+  }
+
+  Map<String, Long> readings() {
+    Map<String, Long> readings = new TreeMap<>();
+    seen.forEach((name, found) -> readings.put(name, found.readings()));
+    return readings;
   }
 
   List<Problem> problems() {

@@ -48,8 +48,24 @@ public record ExportMapping(
     Map<String, Tag> tags,
     List<String> missing) {
 
-  /** What a historian's tag measures. */
-  public record Tag(BearingKey bearing, Quantity quantity) {
+  /**
+   * What a historian's tag measures.
+   *
+   * @param asset asset it is mounted on; empty where a column of the file names it
+   * @param bearing bearing within the asset
+   * @param quantity what it carries
+   */
+  public record Tag(Optional<String> asset, String bearing, Quantity quantity) {
+    public Tag {
+      asset.ifPresent(name -> Names.require("asset", name));
+      Names.require("bearing", bearing);
+    }
+
+    /** A tag of one bearing. */
+    public Tag(BearingKey key, Quantity quantity) {
+      this(Optional.of(key.asset()), key.bearing(), quantity);
+    }
+
     /** Quantities a tag can carry. */
     public enum Quantity {
       TEMPERATURE("temperature_c"),

@@ -4,15 +4,12 @@ import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
-import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeSet;
 
 /** Writes the block of the settings for a foreign export. */
 final class AdoptionBlock {
-  private static final String TIME_OF_DAY = "\\d{1,2}:\\d{2}(:\\d{2})?(\\s?[AaPp][Mm])?";
-
   private final String name;
   private final MappingReader.Kind kind;
   private final AdoptionGrid grid;
@@ -57,11 +54,13 @@ final class AdoptionBlock {
     line("  - files: " + quoted(folder + name));
     note("a pattern such as " + folder + "north-*.csv takes every export of this kind");
     mapping();
-    units();
+    NumberGuess numbers = numbers();
+    Optional<AdoptionTags> tags = tags(numbers);
+    units(tags);
     dates();
-    numbers();
+    numbers(numbers);
     form();
-    tags();
+    tags.ifPresent(found -> found.lines(find("asset").isPresent()).forEach(this::line));
     return out.toString();
   }
 
@@ -73,6 +72,10 @@ final class AdoptionBlock {
             : "workbook";
     line("# " + name + ": a " + what + ", " + form + ", " + shape.body().size() + " rows seen.");
     line("# Lines that begin with # say what the file does not settle.");
+    line(
+        "# Where kappatrail.yaml has "
+            + (kind == MappingReader.Kind.SAMPLES ? "samples:" : "temperatures:")
+            + " already, put the lines from '- files' on below it.");
   }
 
   private void mapping() {
@@ -95,6 +98,15 @@ final class AdoptionBlock {
       note("not recognised, so read under their own names where they hold numbers:");
       unknown.forEach(header -> note("  " + header));
     }
+    List<String> places = new ArrayList<>(List.of("asset", "bearing"));
+    places.removeIf(place -> found.contains(place) || !required().contains(place));
+    if (kind == MappingReader.Kind.TEMPERATURES && !places.isEmpty()) {
+      note("not found: " + String.join(" and ", places) + "; put in what the file is of:");
+      String fill =
+          String.join(", ", places.stream().map(name -> name + ": " + blank(name)).toList());
+      line("    constant: {" + fill + "}");
+      found.addAll(places);
+    }
     for (String required : required()) {
       if (!found.contains(required)) {
         note(
@@ -110,6 +122,11 @@ final class AdoptionBlock {
     }
   }
 
+  /** Stands where a name is to be put in. */
+  private static String blank(String column) {
+    return column.equals("asset") ? "ASSET" : "BEARING";
+  }
+
   private List<String> required() {
     if (kind == MappingReader.Kind.SAMPLES) {
       return List.of("sample", "asset", "sampled_at");
@@ -120,11 +137,12 @@ final class AdoptionBlock {
     return isWide() ? List.of("time") : List.of("time", "asset", "bearing", "temperature_c");
   }
 
-  private void units() {
+  private void units(Optional<AdoptionTags> tags) {
     Map<String, String> units = new LinkedHashMap<>();
+    tags.ifPresent(found -> units.putAll(found.units()));
     List<String> doubts = new ArrayList<>();
     for (ColumnGuess guess : columns) {
-      String column = guess.canonical().orElse(isWide() ? "temperature_c" : "");
+      String column = guess.canonical().orElse("");
       List<String> known = Units.of(column);
       if (known.isEmpty()) {
         continue;
@@ -139,13 +157,18 @@ final class AdoptionBlock {
       line("    units:");
       units.forEach((column, unit) -> line("      " + column + ": " + unit));
     }
+    tags.flatMap(AdoptionTags::unitDoubt).ifPresent(doubts::add);
     doubts.forEach(this::note);
   }
 
   private void dates() {
     List<String> texts = new ArrayList<>();
+    Optional<ColumnGuess> timeOfDay = find("time_of_day");
     for (ColumnGuess guess : columns) {
-      if (List.of("sampled_at", "received_on", "time").contains(guess.canonical().orElse(""))) {
+      if (guess.is("time") && timeOfDay.isPresent()) {
+        texts.addAll(joined(guess, timeOfDay.get()));
+      } else if (List.of("sampled_at", "received_on", "time")
+          .contains(guess.canonical().orElse(""))) {
         texts.addAll(texts(guess));
       }
     }
@@ -157,17 +180,13 @@ final class AdoptionBlock {
       note("date-format: the form of '" + texts.get(0) + "' is not recognised; write it here");
     }
     for (ColumnGuess guess : columns) {
-      if (!guess.values().isEmpty()
-          && guess.values().stream().allMatch(value -> value.matches(TIME_OF_DAY))) {
-        note(
-            "the time of day stands in a column of its own, '"
-                + guess.header().name()
-                + "', which is not read; export day and time in one column");
+      if (kind == MappingReader.Kind.SAMPLES && guess.isTimesOfDay()) {
+        note("the time of day in '" + guess.header().name() + "' is not read; the day suffices");
       }
     }
   }
 
-  private void numbers() {
+  private NumberGuess numbers() {
     List<String> texts = new ArrayList<>();
     for (ColumnGuess guess : columns) {
       boolean named = List.of("sample", "asset", "bearing").contains(guess.canonical().orElse(""));
@@ -175,7 +194,29 @@ final class AdoptionBlock {
         texts.addAll(texts(guess));
       }
     }
-    NumberGuess numbers = NumberGuess.of(texts);
+    return NumberGuess.of(texts);
+  }
+
+  private Optional<ColumnGuess> find(String canonical) {
+    return columns.stream().filter(guess -> guess.is(canonical)).findFirst();
+  }
+
+  /** The time of a row, of one column or two. */
+  String timeText(RawRow row, ColumnGuess day) {
+    return find("time_of_day")
+        .map(time -> row.cell(day.position()) + ' ' + row.cell(time.position()))
+        .orElse(row.cell(day.position()));
+  }
+
+  private List<String> joined(ColumnGuess day, ColumnGuess time) {
+    return shape.body().stream()
+        .filter(row -> !Texts.isMissing(row.cell(day.position())))
+        .filter(row -> !Texts.isMissing(row.cell(time.position())))
+        .map(row -> row.cell(day.position()) + ' ' + row.cell(time.position()))
+        .toList();
+  }
+
+  private void numbers(NumberGuess numbers) {
     if (numbers.decimalComma()) {
       line("    decimal: comma");
     }
@@ -209,6 +250,8 @@ final class AdoptionBlock {
     for (ColumnGuess guess : columns) {
       if (guess.isMostlyNumbers()) {
         guess.values().stream().filter(value -> !GridShape.isNumber(value)).forEach(odd::add);
+      } else if (guess.is("iso_4406")) {
+        guess.values().stream().filter(value -> !ColumnGuess.isCode(value)).forEach(odd::add);
       }
     }
     if (!odd.isEmpty()) {
@@ -222,35 +265,12 @@ final class AdoptionBlock {
     }
   }
 
-  private void tags() {
+  private Optional<AdoptionTags> tags(NumberGuess guessed) {
+    NumberText numbers = new NumberText(guessed.decimalComma(), guessed.thousands());
     if (isTagged()) {
-      TreeSet<String> tags = new TreeSet<>();
-      columns.stream().filter(guess -> guess.is("tag")).forEach(g -> tags.addAll(g.values()));
-      tagLines(tags.stream().limit(200).toList());
-    } else if (isWide()) {
-      tagLines(
-          columns.stream()
-              .filter(guess -> guess.canonical().isEmpty() && guess.isMostlyNumbers())
-              .map(guess -> guess.header().name())
-              .distinct()
-              .toList());
+      return Optional.of(AdoptionTags.ofRows(columns, shape.body(), numbers));
     }
-  }
-
-  private void tagLines(List<String> tags) {
-    note(
-        "which bearing each tag belongs to is not in the file; asset and bearing are to be put in");
-    line("    tags:");
-    for (String tag : tags) {
-      String lower = tag.toLowerCase(Locale.ROOT);
-      boolean speed = lower.matches(".*(speed|rpm|drehz|(^|\\W)s[it]c?\\d|n_?ist).*");
-      line(
-          "      "
-              + quoted(tag)
-              + ": {asset: ASSET, bearing: BEARING, quantity: "
-              + (speed ? "speed_rpm" : "temperature_c")
-              + "}");
-    }
+    return isWide() ? Optional.of(AdoptionTags.ofColumns(columns, numbers)) : Optional.empty();
   }
 
   boolean isTagged() {
@@ -291,7 +311,7 @@ final class AdoptionBlock {
     return delimiter == '\t' ? "tabs" : "'" + delimiter + "'";
   }
 
-  private static String quoted(String text) {
+  static String quoted(String text) {
     return '"' + text.replace("\\", "\\\\").replace("\"", "\\\"").replace("\t", "\\t") + '"';
   }
 }

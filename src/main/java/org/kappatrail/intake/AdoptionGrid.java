@@ -11,7 +11,9 @@ import java.nio.charset.CodingErrorAction;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayDeque;
 import java.util.ArrayList;
+import java.util.Deque;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -26,7 +28,8 @@ import org.kappatrail.history.UnusableInputException;
  * @param delimiter delimiter of a text; empty for a workbook
  * @param encoding encoding of a text; empty for a workbook
  * @param sheet sheet of a workbook with several
- * @param whole true where the file was read to its end
+ * @param whole true where the rows are all of the file's
+ * @param tail last rows of a longer file
  * @param use1904 true for a workbook that counts days from 1904
  */
 record AdoptionGrid(
@@ -35,13 +38,16 @@ record AdoptionGrid(
     Optional<String> encoding,
     Optional<String> sheet,
     boolean whole,
+    List<RawRow> tail,
     boolean use1904) {
   private static final int MOST_LINES = 5_000;
+  private static final int TAIL_LINES = 30;
   private static final int PROBE_BYTES = 1 << 20;
   private static final char[] DELIMITERS = {';', '\t', '|', ','};
 
   AdoptionGrid {
     rows = List.copyOf(rows);
+    tail = List.copyOf(tail);
   }
 
   static AdoptionGrid read(Path file) {
@@ -58,13 +64,19 @@ record AdoptionGrid(
     try {
       Charset charset = charset(file);
       List<TextLines.Line> lines = new ArrayList<>();
-      boolean whole = true;
+      Deque<TextLines.Line> last = new ArrayDeque<>();
       try (TextLines text = new TextLines(new InputStreamReader(open(file), charset))) {
         TextLines.@Nullable Line line = text.next();
-        while (line != null && whole) {
-          lines.add(line);
+        while (line != null) {
+          if (lines.size() < MOST_LINES) {
+            lines.add(line);
+          } else {
+            last.add(line);
+          }
+          if (last.size() > TAIL_LINES) {
+            last.remove();
+          }
           line = text.next();
-          whole = lines.size() < MOST_LINES || line == null;
         }
       }
       char delimiter = delimiter(lines);
@@ -73,7 +85,8 @@ record AdoptionGrid(
           Optional.of(delimiter),
           Optional.of(charset.name()),
           Optional.empty(),
-          whole,
+          last.isEmpty(),
+          rows(List.copyOf(last), delimiter),
           false);
     } catch (IOException e) {
       throw new UnusableInputException(name + ": cannot be read (" + e.getMessage() + ")", e);
@@ -94,6 +107,7 @@ record AdoptionGrid(
         Optional.empty(),
         all.size() > 1 ? Optional.of(best.name()) : Optional.empty(),
         true,
+        List.of(),
         best.use1904());
   }
 

@@ -95,10 +95,11 @@ final class AdoptionPreview {
         String name = guess.canonical().orElse(guess.header().name());
         boolean tag = guess.canonical().isEmpty() && block.isWide() && guess.isMostlyNumbers();
         if (guess.is("time")) {
+          text = block.timeText(row, guess);
           words.add("time " + dates.parse(text, false).map(m -> m.at().toString()).orElse("?"));
         } else if (tag || List.of("temperature_c", "speed_rpm", "value").contains(name)) {
           words.add(name + " " + number(text, name, mapping, numbers));
-        } else if (guess.canonical().isPresent()) {
+        } else if (guess.canonical().isPresent() && !guess.is("time_of_day")) {
           words.add(name + " " + text);
         }
       }

@@ -3,9 +3,9 @@ package org.kappatrail.intake;
 import java.util.ArrayList;
 import java.util.HashSet;
 import java.util.List;
-import java.util.Locale;
 import java.util.Optional;
 import java.util.Set;
+import java.util.regex.Pattern;
 
 /**
  * What a column of a foreign file seems to carry.
@@ -22,7 +22,12 @@ record ColumnGuess(
     Optional<String> canonical,
     Optional<String> doubt,
     List<String> values) {
-  private static final String CODE = "(ISO\\s*)?[>≥*\\-\\d]{1,3}\\s*/\\s*[>≥*\\-\\d]{1,3}.*";
+  private static final String CODE = "(ISO\\s*)?[>≥*\\-\\d\\s]{1,4}/\\s*[>≥*\\-\\d]{1,3}.*";
+
+  private static final Pattern TIME_OF_DAY =
+      Pattern.compile("\\d{1,2}:\\d{2}(:\\d{2}([.,]\\d{1,6})?)?(\\s?[AaPp]\\.?[Mm]\\.?)?");
+  private static final Set<String> NUMBER_WORDS =
+      Set.of("no", "nr", "n", "id", "number", "nummer", "numero", "num", "ref", "code");
 
   /** Columns of an export of a laboratory. */
   static List<ColumnGuess> ofSamples(List<RawTable.Header> headers, List<RawRow> body) {
@@ -45,6 +50,16 @@ record ColumnGuess(
       Optional<String> found = ColumnSynonyms.ofReadings(header);
       guesses.add(guess(header, position, found, taken, body));
     }
+    splitTime(guesses, taken);
+    for (int index = 0; index < guesses.size(); index++) {
+      ColumnGuess guess = guesses.get(index);
+      if (guess.is("value") && !taken.contains("tag") && !taken.contains("temperature_c")) {
+        guesses.set(index, guess.as("temperature_c", "no other column holds a temperature"));
+      } else if (!taken.contains("asset") && guess.mayNameAssets()) {
+        taken.add("asset");
+        guesses.set(index, guess.as("asset", "they are texts that repeat"));
+      }
+    }
     if (!taken.contains("time")) {
       for (int index = 0; index < guesses.size(); index++) {
         ColumnGuess guess = guesses.get(index);
@@ -55,6 +70,47 @@ record ColumnGuess(
       }
     }
     return guesses;
+  }
+
+  /** Takes a column of days and one of times of day for the time, where there are both. */
+  private static void splitTime(List<ColumnGuess> guesses, Set<String> taken) {
+    Optional<ColumnGuess> time = guesses.stream().filter(ColumnGuess::isTimesOfDay).findFirst();
+    Optional<ColumnGuess> day =
+        guesses.stream()
+            .filter(guess -> guess.is("time") || guess.canonical().isEmpty())
+            .filter(guess -> guess.values().stream().noneMatch(value -> value.contains(":")))
+            .filter(guess -> DateGuess.of(guess.values()).isPresent())
+            .findFirst();
+    if (time.isPresent() && day.isPresent()) {
+      taken.add("time");
+      guesses.replaceAll(guess -> guess.is("time") ? guess.named(Optional.empty()) : guess);
+      guesses.set(day.get().position(), day.get().named(Optional.of("time")));
+      guesses.set(time.get().position(), time.get().named(Optional.of("time_of_day")));
+    }
+  }
+
+  private ColumnGuess named(Optional<String> name) {
+    return new ColumnGuess(header, position, name, Optional.empty(), values);
+  }
+
+  /** True where all values are times of day without a day. */
+  boolean isTimesOfDay() {
+    return !values.isEmpty() && values.stream().allMatch(TIME_OF_DAY.asMatchPredicate());
+  }
+
+  /** True for texts of which few differ, in a column without a meaning. */
+  private boolean mayNameAssets() {
+    return canonical.isEmpty()
+        && values.size() > 2
+        && !isMostlyNumbers()
+        && !isTimesOfDay()
+        && new HashSet<>(values).size() * 3 <= values.size()
+        && DateGuess.of(values).isEmpty();
+  }
+
+  /** True for a text in the form of a cleanliness code. */
+  static boolean isCode(String text) {
+    return text.matches(CODE);
   }
 
   boolean isMostlyNumbers() {
@@ -112,8 +168,8 @@ record ColumnGuess(
     for (int index = 0; index < guesses.size() && !taken.contains("sample"); index++) {
       ColumnGuess guess = guesses.get(index);
       boolean distinct = new HashSet<>(guess.values()).size() == guess.values().size();
-      String name = guess.header().name().toLowerCase(Locale.ROOT);
-      boolean called = name.contains("no") || name.contains("nr") || name.contains("id");
+      List<String> words = List.of(Texts.key(guess.header().name()).split("_", -1));
+      boolean called = words.stream().anyMatch(NUMBER_WORDS::contains);
       if (guess.canonical().isEmpty() && distinct && called && guess.values().size() > 1) {
         taken.add("sample");
         guesses.set(index, guess.as("sample", "no two are alike"));

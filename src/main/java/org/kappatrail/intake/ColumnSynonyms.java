@@ -1,6 +1,13 @@
 package org.kappatrail.intake;
 
+import java.io.BufferedReader;
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.InputStreamReader;
+import java.io.UncheckedIOException;
+import java.nio.charset.StandardCharsets;
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -8,145 +15,43 @@ import java.util.Optional;
 import java.util.Set;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import java.util.stream.Collectors;
 import org.kappatrail.history.SampleColumns;
 
-/** Names that columns commonly go by in exports of laboratories and historians, as keys. */
+/** Finds the column that a header of a foreign export stands for, by the names of a table. */
 final class ColumnSynonyms {
-  private static final Map<String, String> LAB = new LinkedHashMap<>();
-  private static final Map<String, String> LOG = new LinkedHashMap<>();
-  private static final Map<String, String> ELEMENTS = new LinkedHashMap<>();
+  private static final String TABLE = "column-names.csv";
+  private static final Map<String, String> LAB = names("lab");
+  private static final Map<String, String> LOG = names("log");
+  private static final Map<String, String> ELEMENTS = names("element");
+
   private static final Pattern TRAILING_UNIT =
       Pattern.compile(
-          "(_(ppm|mg_kg|cst|mm2_s|percent|pct|%|wt%|degc|degf|hours|hrs|h|mg_koh_g))+$");
+          "(_(ppm|mg_kg|cst|mm2_s|percent|pct|%|wt%|mg_koh_g|mgkoh_g|hours|hrs|h"
+              + "|deg_?[cf]|c|f|k|celsius|fahrenheit|kelvin"
+              + "|rpm|r_min|1_min|u_min|rev_min|min_1|hz))+$");
   private static final Set<String> WATER =
+      Set.of("water", "wasser", "karl", "kf", "eau", "agua", "acqua", "vatten", "h2o");
+  private static final Set<String> BESIDE_WATER =
       Set.of(
-          "water", "wasser", "kf", "karl", "fischer", "content", "total", "by", "nach", "in",
-          "oil");
+          "fischer",
+          "k",
+          "f",
+          "content",
+          "total",
+          "by",
+          "nach",
+          "in",
+          "oil",
+          "gehalt",
+          "teneur",
+          "en",
+          "contenido",
+          "de",
+          "ppm");
+  private static final Set<String> BESIDE_ELEMENT = Set.of("ppm", "mg", "kg", "content", "icp");
   private static final Pattern COUNT =
       Pattern.compile("(^|.*_)(4|6|14)_?(um|micron|microns|mu)(_.*|c|$)");
-
-  static {
-    put(
-        LAB,
-        "sample",
-        "sample",
-        "sample_no",
-        "sample_number",
-        "sample_id",
-        "sampleid",
-        "sample_nr");
-    put(LAB, "sample", "lab_no", "lab_number", "lab_id", "report_no", "report_number", "bottle");
-    put(LAB, "sample", "bottle_no", "bottle_id", "probe", "proben_nr", "probennummer", "probe_nr");
-    put(LAB, "asset", "asset", "asset_id", "machine", "machine_id", "unit", "unit_id", "equipment");
-    put(
-        LAB,
-        "asset",
-        "equipment_id",
-        "maschine",
-        "anlage",
-        "component",
-        "sample_point",
-        "aggregat");
-    put(LAB, "sampled_at", "sampled_at", "sampled", "sample_date", "date_sampled", "sampled_on");
-    put(
-        LAB,
-        "sampled_at",
-        "sampling_date",
-        "drawn",
-        "drawn_on",
-        "date_drawn",
-        "taken",
-        "date_taken");
-    put(
-        LAB,
-        "sampled_at",
-        "date",
-        "datum",
-        "probedatum",
-        "probenahme",
-        "entnahmedatum",
-        "entnahme");
-    put(LAB, "received_on", "received", "received_on", "date_received", "received_date", "receipt");
-    put(LAB, "received_on", "reported", "report_date", "date_reported", "eingang", "eingangsdatum");
-    put(LAB, "laboratory", "lab", "laboratory", "labor", "lab_name");
-    put(LAB, "oil_hours", "oil_hours", "hours_on_oil", "hrs_on_oil", "oil_age", "oil_hrs", "oil_h");
-    put(
-        LAB,
-        "oil_hours",
-        "oil_running_hours",
-        "fluid_hours",
-        "oilstunden",
-        "olstunden",
-        "lube_hours");
-    put(LAB, "water_ppm", "water", "water_ppm", "water_content", "karl_fischer", "kf", "moisture");
-    put(LAB, "water_ppm", "h2o", "wasser", "wassergehalt", "water_kf", "water_karl_fischer");
-    put(LAB, "iso_4406", "iso_4406", "iso4406", "iso_code", "cleanliness", "cleanliness_code");
-    put(
-        LAB,
-        "iso_4406",
-        "iso_cleanliness",
-        "reinheitsklasse",
-        "particle_code",
-        "contamination_code");
-    put(LAB, "acid_number_mg_koh_g", "acid_number_mg_koh_g", "acid_number", "acid_no", "tan", "an");
-    put(LAB, "acid_number_mg_koh_g", "total_acid_number", "neutralisation_number", "nz", "sz");
-    put(LAB, "acid_number_mg_koh_g", "neutralization_number", "saurezahl", "neutralisationszahl");
-    put(
-        LAB,
-        "temperature_c",
-        "temperature_c",
-        "temperature",
-        "temp",
-        "oil_temperature",
-        "oil_temp");
-    put(LAB, "temperature_c", "sump_temperature", "sump_temp", "oltemperatur", "temperatur");
-
-    put(LOG, "time", "time", "timestamp", "ts", "datetime", "date_time", "zeit", "zeitstempel");
-    put(LOG, "time", "date", "time_stamp", "local_time", "datum", "datum_zeit", "reading_time");
-    put(LOG, "asset", "asset", "asset_id", "machine", "unit", "equipment", "maschine", "anlage");
-    put(LOG, "bearing", "bearing", "bearing_id", "brg", "lager", "lagerstelle", "bearing_position");
-    put(LOG, "temperature_c", "temperature_c", "temperature", "temp", "bearing_temperature");
-    put(LOG, "temperature_c", "bearing_temp", "temperatur", "lagertemperatur", "oil_temperature");
-    put(LOG, "speed_rpm", "speed_rpm", "speed", "rpm", "shaft_speed", "drehzahl", "speed_rev_min");
-    put(LOG, "quality", "quality", "status", "q", "data_quality", "qualitat", "opc_quality");
-    put(LOG, "tag", "tag", "tag_name", "tagname", "point", "point_name", "signal", "sensor");
-    put(LOG, "tag", "variable", "messstelle", "channel", "tag_id", "item");
-    put(LOG, "value", "value", "val", "tag_value", "wert", "reading", "messwert", "pv");
-
-    String[] elements = {
-      "fe iron eisen",
-      "cu copper kupfer",
-      "cr chromium chrome chrom",
-      "pb lead blei",
-      "sn tin zinn",
-      "al aluminium aluminum",
-      "ni nickel",
-      "ag silver silber",
-      "ti titanium titan",
-      "mo molybdenum molybdan",
-      "si silicon silizium",
-      "na sodium natrium",
-      "k potassium kalium",
-      "b boron bor",
-      "mg magnesium",
-      "ca calcium kalzium",
-      "ba barium",
-      "p phosphorus phosphor",
-      "zn zinc zink",
-      "v vanadium",
-      "mn manganese mangan",
-      "li lithium",
-      "s sulfur sulphur schwefel",
-      "w tungsten",
-      "cd cadmium"
-    };
-    for (String element : elements) {
-      String[] names = element.split(" ", -1);
-      for (String name : names) {
-        ELEMENTS.put(name, names[1] + SampleColumns.ELEMENT_SUFFIX);
-      }
-    }
-  }
 
   private ColumnSynonyms() {}
 
@@ -178,8 +83,9 @@ final class ColumnSynonyms {
         return Optional.of(hot ? SampleColumns.VISCOSITY_100C : SampleColumns.VISCOSITY_40C);
       }
     }
-    if ((key.contains("water") || key.contains("wasser") || key.startsWith("karl"))
-        && WATER.containsAll(List.of(key.split("_", -1)))) {
+    List<String> words = List.of(key.split("_", -1));
+    if (words.stream().anyMatch(WATER::contains)
+        && words.stream().allMatch(word -> WATER.contains(word) || BESIDE_WATER.contains(word))) {
       return Optional.of(SampleColumns.WATER);
     }
     if (key.contains("4406")) {
@@ -189,7 +95,22 @@ final class ColumnSynonyms {
     if (count.matches()) {
       return Optional.of("particles_" + count.group(2) + "um_per_ml");
     }
-    return Optional.ofNullable(ELEMENTS.get(key));
+    return element(words);
+  }
+
+  /** The element that all words name, such as {@code fe} and {@code iron}. */
+  private static Optional<String> element(List<String> words) {
+    Set<String> elements =
+        words.stream()
+            .filter(word -> !BESIDE_ELEMENT.contains(word) || words.size() == 1)
+            .map(word -> ELEMENTS.getOrDefault(word, ""))
+            .collect(Collectors.toSet());
+    return elements.size() == 1
+        ? elements.stream()
+            .filter(element -> !element.isEmpty())
+            .map(element -> element + SampleColumns.ELEMENT_SUFFIX)
+            .findFirst()
+        : Optional.empty();
   }
 
   private static List<String> keys(RawTable.Header header) {
@@ -206,9 +127,24 @@ final class ColumnSynonyms {
     return keys.stream().filter(key -> !key.isEmpty()).distinct().toList();
   }
 
-  private static void put(Map<String, String> map, String canonical, String... names) {
-    for (String name : names) {
-      map.put(name, canonical);
+  /** Column by name, of one part of the table. */
+  private static Map<String, String> names(String part) {
+    Map<String, String> names = new LinkedHashMap<>();
+    try (InputStream in = ColumnSynonyms.class.getResourceAsStream(TABLE)) {
+      if (in == null) {
+        throw new IllegalStateException("table " + TABLE + " is missing from the program");
+      }
+      new BufferedReader(new InputStreamReader(in, StandardCharsets.UTF_8))
+          .lines()
+          .map(line -> line.split(",", -1))
+          .filter(cells -> cells.length == 3 && cells[0].equals(part))
+          .forEach(
+              cells ->
+                  Arrays.stream(cells[2].split(" ", -1))
+                      .forEach(name -> names.putIfAbsent(name, cells[1])));
+    } catch (IOException e) {
+      throw new UncheckedIOException("table " + TABLE + " cannot be read", e);
     }
+    return names;
   }
 }

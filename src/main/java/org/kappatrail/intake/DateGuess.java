@@ -68,7 +68,7 @@ record DateGuess(Optional<String> pattern, Optional<String> doubt) {
       boolean monthFirst = matched.stream().anyMatch(m -> Integer.parseInt(m.group("b")) > 12);
       day =
           monthFirst && !dayFirst ? "MM" + sep + "dd" + sep + year : "dd" + sep + "MM" + sep + year;
-      String other = "MM" + sep + "dd" + sep + year;
+      String other = "MM" + sep + "dd" + sep + year + time(matched);
       if (dayFirst && monthFirst) {
         doubt = Optional.of("some dates fit day first only, others month first only; see which");
       } else if (!dayFirst && !monthFirst) {

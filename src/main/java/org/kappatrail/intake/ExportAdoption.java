@@ -21,6 +21,9 @@ public final class ExportAdoption {
    * @throws UnusableInputException where the file cannot be read or holds no table
    */
   public static String adopt(Path file) {
+    if (file.getFileName() == null) {
+      throw new UnusableInputException(file + ": is no file; give an export to adopt");
+    }
     String name = file.getFileName().toString();
     AdoptionGrid grid = AdoptionGrid.read(file);
     GridShape shape =

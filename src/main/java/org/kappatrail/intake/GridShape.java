@@ -14,8 +14,10 @@ import java.util.regex.Pattern;
  */
 record GridShape(int skipLines, List<RawRow> header, List<RawRow> body, Optional<String> footer) {
   private static final int MOST_HEADER_ROWS = 3;
+  private static final int SHORTEST_FOOTER = 5;
+  private static final Pattern FOOTER_WORDS = Pattern.compile("\\d.*", Pattern.DOTALL);
   private static final Pattern NUMBER =
-      Pattern.compile("[<>≤≥=\\s]*[+-]?\\d[\\d.,' \\u00A0]*([eE][+-]?\\d+)?\\s*%?");
+      Pattern.compile("[<>≤≥=\\s]*[+-]?\\d[\\d.,'’ \\u00A0\\u202F\\u2009]*([eE][+-]?\\d+)?\\s*%?");
   private static final Pattern DATE =
       Pattern.compile(
           "\\d{1,4}[-/.]\\d{1,2}[-/.]\\d{1,4}.*|\\d{1,2}[- ./]\\p{L}{3,9}\\.?[- ./]\\d{2,4}.*");
@@ -42,12 +44,22 @@ record GridShape(int skipLines, List<RawRow> header, List<RawRow> body, Optional
         && isSecondHeader(rows.get(header - 1), rows.get(header), width)) {
       header--;
     }
+    boolean valueFirst = isValue(rows.get(first).cell(0));
     int end = rows.size();
-    while (grid.whole() && end > first + 1 && isFooter(rows.get(end - 1), width)) {
+    while (grid.whole() && end > first + 1 && isFooter(rows.get(end - 1), width, valueFirst)) {
       end--;
     }
-    Optional<String> footer =
-        end < rows.size() ? Optional.of(rows.get(end).cell(0)) : Optional.empty();
+    Optional<String> footer = Optional.empty();
+    if (end < rows.size()) {
+      footer = Optional.of(beginning(rows.get(end).cell(0)));
+    }
+    for (int at = grid.tail().size() - 1; at >= 0; at--) {
+      RawRow row = grid.tail().get(at);
+      if (!isFooter(row, width, valueFirst)) {
+        break;
+      }
+      footer = Optional.of(beginning(row.cell(0)));
+    }
     return Optional.of(
         new GridShape(
             (int) rows.get(header).line() - 1,
@@ -65,7 +77,7 @@ record GridShape(int skipLines, List<RawRow> header, List<RawRow> body, Optional
   }
 
   private static int filled(RawRow row) {
-    return (int) row.cells().stream().filter(cell -> !Texts.clean(cell).isEmpty()).count();
+    return (int) row.cells().stream().filter(cell -> !Texts.isMissing(Texts.clean(cell))).count();
   }
 
   private static int commonWidth(List<RawRow> rows) {
@@ -78,12 +90,10 @@ record GridShape(int skipLines, List<RawRow> header, List<RawRow> body, Optional
   }
 
   private static boolean isData(RawRow row, int width) {
-    int filled = filled(row);
-    long values =
-        row.cells().stream()
-            .map(Texts::clean)
-            .filter(cell -> isNumber(cell) || isDate(cell))
-            .count();
+    List<String> cells =
+        row.cells().stream().map(Texts::clean).filter(cell -> !Texts.isMissing(cell)).toList();
+    int filled = cells.size();
+    long values = cells.stream().filter(cell -> isNumber(cell) || isDate(cell)).count();
     return filled * 2 >= width && values >= 1 && values * 4 >= filled && filled > 1;
   }
 
@@ -93,12 +103,24 @@ record GridShape(int skipLines, List<RawRow> header, List<RawRow> body, Optional
     return adjacent && filled(above) >= 2 && filled(above) * 4 >= width && !isData(above, width);
   }
 
-  private static boolean isFooter(RawRow row, int width) {
+  /**
+   * True for a row of few cells that begins with a text.
+   *
+   * @param valueFirst true where the table's rows begin with a number or date
+   */
+  private static boolean isFooter(RawRow row, int width, boolean valueFirst) {
     String first = row.cell(0);
-    return width > 3
-        && filled(row) * 3 < width
-        && !first.isEmpty()
-        && !isNumber(first)
-        && !isDate(first);
+    boolean few = width > 3 ? filled(row) * 3 < width : valueFirst && filled(row) < width;
+    return few && !first.isEmpty() && !isValue(first);
+  }
+
+  private static boolean isValue(String text) {
+    return isNumber(text) || isDate(text);
+  }
+
+  /** A footer without the number or date in it, which will be another one in the next export. */
+  private static String beginning(String footer) {
+    String words = FOOTER_WORDS.matcher(footer).replaceAll("");
+    return Texts.clean(words).length() < SHORTEST_FOOTER ? footer : Texts.clean(words);
   }
 }

@@ -4,11 +4,12 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.LocalDate;
 import java.util.ArrayList;
-import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalLong;
 import java.util.Set;
+import java.util.TreeMap;
 import java.util.stream.Collectors;
 import org.kappatrail.history.Asset;
 import org.kappatrail.history.Bearing;
@@ -108,28 +109,28 @@ public final class HistoryReader {
       notes.addAll(read.notes());
       files.add(read);
     }
-    List<Sample> used = merge.samples();
-    Set<SourceLine> sources = new HashSet<>();
-    used.forEach(sample -> sources.add(sample.source()));
     for (SampleFile file : files) {
-      register.accounts().add(account(file, sources));
+      register.accounts().add(account(file, merge));
     }
-    return used;
+    return merge.samples();
   }
 
-  private static FileAccount account(SampleFile file, Set<SourceLine> used) {
-    List<LocalDate> days =
-        file.samples().stream()
-            .filter(sample -> used.contains(sample.source()))
-            .map(Sample::day)
-            .sorted()
-            .toList();
+  private static FileAccount account(SampleFile file, SampleMerge merge) {
+    List<LocalDate> days = new ArrayList<>();
+    Map<String, Long> rejected = new TreeMap<>(file.rejected());
+    for (Sample sample : file.samples()) {
+      merge
+          .whyNot(sample)
+          .ifPresentOrElse(
+              reason -> rejected.merge(reason, 1L, Long::sum), () -> days.add(sample.day()));
+    }
+    days.sort(null);
     return new FileAccount(
         file.name(),
         FileAccount.Kind.SAMPLES,
-        file.rows(),
+        OptionalLong.empty(),
         days.size(),
-        file.rows() - days.size(),
+        rejected,
         days.stream().findFirst(),
         days.isEmpty() ? Optional.empty() : Optional.of(days.get(days.size() - 1)),
         file.unused());

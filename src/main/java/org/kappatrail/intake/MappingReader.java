@@ -9,7 +9,6 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.regex.Pattern;
 import java.util.regex.PatternSyntaxException;
-import org.kappatrail.history.BearingKey;
 import org.kappatrail.history.ExportMapping;
 import org.kappatrail.history.NearestName;
 import org.kappatrail.history.SampleColumns;
@@ -18,7 +17,16 @@ import org.kappatrail.history.SampleColumns;
 final class MappingReader {
   /** Canonical columns of readings. */
   static final List<String> READING_COLUMNS =
-      List.of("time", "asset", "bearing", "temperature_c", "speed_rpm", "quality", "tag", "value");
+      List.of(
+          "time",
+          "time_of_day",
+          "asset",
+          "bearing",
+          "temperature_c",
+          "speed_rpm",
+          "quality",
+          "tag",
+          "value");
 
   private static final List<String> KEYS =
       List.of(
@@ -262,11 +270,12 @@ final class MappingReader {
     Map<String, ExportMapping.Tag> tags = new LinkedHashMap<>();
     for (String name : node.keys()) {
       SettingsNode tag = node.child(name).only(List.of("asset", "bearing", "quantity"));
-      String asset = required(tag, "asset", "fan-1");
+      if (tag.text("asset").filter(String::isBlank).isPresent()) {
+        throw tag.bad("asset", "is empty; name it, or leave it out where a column does", "fan-1");
+      }
       String bearing = required(tag, "bearing", "DE");
       String quantity = tag.text("quantity").orElse("temperature_c");
-      tags.put(
-          name, new ExportMapping.Tag(new BearingKey(asset, bearing), quantity(tag, quantity)));
+      tags.put(name, new ExportMapping.Tag(tag.text("asset"), bearing, quantity(tag, quantity)));
     }
     return tags;
   }

@@ -24,7 +24,7 @@ record NumberGuess(boolean decimalComma, Optional<String> thousands, Optional<St
   private static final Pattern OPEN_COMMA = Pattern.compile("[+-]?[1-9]\\d{0,2},\\d{3}");
   private static final Pattern OPEN_POINT = Pattern.compile("[+-]?[1-9]\\d{0,2}\\.\\d{3}");
   private static final Pattern BLANK_GROUPS =
-      Pattern.compile("[+-]?\\d{1,3}([ \\u00A0\\u202F]\\d{3})+([.,]\\d+)?");
+      Pattern.compile("[+-]?\\d{1,3}([ \\u00A0\\u202F\\u2009]\\d{3})+([.,]\\d+)?");
   private static final Pattern TICK_GROUPS = Pattern.compile("[+-]?\\d{1,3}('\\d{3})+([.,]\\d+)?");
 
   /** The guess for all values of columns of numbers. */

@@ -5,7 +5,10 @@ import java.time.LocalDate;
 import java.util.ArrayList;
 import java.util.Collection;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalLong;
+import java.util.TreeMap;
 import java.util.function.Function;
 import org.kappatrail.history.ExportMapping;
 import org.kappatrail.history.FileAccount;
@@ -54,12 +57,14 @@ final class RegisterTable {
       List<String> unused,
       Function<T, Optional<LocalDate>> day) {
     List<T> records = new ArrayList<>();
+    Map<String, Long> rejected = new TreeMap<>();
     @org.jspecify.annotations.Nullable LocalDate from = null;
     @org.jspecify.annotations.Nullable LocalDate to = null;
     for (RawRow raw : table.rows()) {
       Row row = new Row(file, raw, columns, problems);
       Optional<T> made = row.isRejected() ? Optional.empty() : make(row, record);
       if (made.isEmpty()) {
+        rejected.merge(row.rejection(), 1L, Long::sum);
         continue;
       }
       records.add(made.get());
@@ -73,9 +78,9 @@ final class RegisterTable {
         new FileAccount(
             file,
             kind,
-            table.rows().size(),
+            OptionalLong.empty(),
             records.size(),
-            table.rows().size() - records.size(),
+            rejected,
             Optional.ofNullable(from),
             Optional.ofNullable(to),
             unused));

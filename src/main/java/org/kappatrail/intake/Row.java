@@ -19,6 +19,7 @@ final class Row {
   private final SourceLine source;
   private final List<Problem> problems;
   private boolean rejected;
+  private String faulty = "";
 
   Row(String file, RawRow raw, Columns columns, List<Problem> problems) {
     this.raw = raw;
@@ -35,6 +36,11 @@ final class Row {
   /** True where the row is to be left out. */
   boolean isRejected() {
     return rejected;
+  }
+
+  /** Why the row is left out, in the words of the account. */
+  String rejection() {
+    return faulty.isEmpty() ? "row cannot be read" : faulty + " cannot be used";
   }
 
   /** Text of a column as it stands, or the constant of the settings; empty where there is none. */
@@ -166,6 +172,9 @@ final class Row {
 
   /** Notes what is wrong with a cell; the row stays. */
   void problem(String column, String value, String text) {
+    if (!rejected) {
+      faulty = column;
+    }
     problems.add(new Problem(source, column, printable(value), text));
   }
 

@@ -35,6 +35,8 @@ record SampleColumn(
     Optional<String> note) {
   private static final Pattern BRACKETED = Pattern.compile("[(\\[{]([^)\\]}]*)[)\\]}]");
 
+  private static final Pattern LAST_WORD = Pattern.compile(".+[\\s_,;]+([^\\s_,;]+)");
+
   SampleColumn {
     missing = Set.copyOf(missing);
   }
@@ -171,7 +173,7 @@ record SampleColumn(
     return new SampleColumn(name, position, Optional.empty(), unit, numbers, missing, note);
   }
 
-  /** The unit that a header states in brackets or in a row of its own. */
+  /** The unit that a header states in brackets, in a row of its own, or as its last word. */
   static Optional<String> statedUnit(String name, RawTable.Header header) {
     Set<String> candidates = new LinkedHashSet<>();
     Matcher bracketed = BRACKETED.matcher(header.name());
@@ -181,6 +183,10 @@ record SampleColumn(
     candidates.addAll(header.aliases());
     if (header.name().endsWith("%")) {
       candidates.add("%");
+    }
+    Matcher last = LAST_WORD.matcher(header.name());
+    if (last.matches()) {
+      candidates.add(last.group(1));
     }
     return candidates.stream().flatMap(text -> Units.find(name, text).stream()).findFirst();
   }

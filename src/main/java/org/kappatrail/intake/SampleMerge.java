@@ -4,8 +4,10 @@ import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import org.kappatrail.history.Problem;
 import org.kappatrail.history.Sample;
+import org.kappatrail.history.SourceLine;
 
 /**
  * Puts samples of several files together. A sample that stands twice with the same values is used
@@ -13,6 +15,7 @@ import org.kappatrail.history.Sample;
  */
 final class SampleMerge {
   private final Map<String, Sample> used = new LinkedHashMap<>();
+  private final Map<SourceLine, String> left = new LinkedHashMap<>();
   private final List<Problem> problems;
 
   SampleMerge(List<Problem> problems) {
@@ -25,6 +28,7 @@ final class SampleMerge {
     if (before == null) {
       used.put(sample.id(), sample);
     } else if (isSame(before, sample)) {
+      left.put(sample.source(), "repeated with the same values");
       tell(sample, "stands already at " + before.source() + " with the same values; used once");
     } else if (isLater(before, sample)) {
       used.put(sample.id(), sample);
@@ -39,7 +43,13 @@ final class SampleMerge {
     return new ArrayList<>(used.values());
   }
 
+  /** Why a sample is not used; empty where it is. */
+  Optional<String> whyNot(Sample sample) {
+    return Optional.ofNullable(left.get(sample.source()));
+  }
+
   private void tellBoth(Sample winner, Sample loser) {
+    left.put(loser.source(), "sample that stands with other values elsewhere");
     tell(
         winner,
         "stands with other values at "

@@ -61,11 +61,11 @@ final class SampleReader {
 
   SampleFile read() {
     List<Sample> samples = new ArrayList<>();
+    Map<String, Long> rejected = new TreeMap<>();
     for (RawRow raw : table.rows()) {
       Row row = new Row(table.file(), raw, columns, context.problems());
-      if (!row.isRejected()) {
-        sample(row, raw).ifPresent(samples::add);
-      }
+      Optional<Sample> sample = row.isRejected() ? Optional.empty() : sample(row, raw);
+      sample.ifPresentOrElse(samples::add, () -> rejected.merge(row.rejection(), 1L, Long::sum));
     }
     List<String> unused = new ArrayList<>(columns.further().values());
     List<String> notes = new ArrayList<>();
@@ -74,7 +74,7 @@ final class SampleReader {
       unused.remove(column.name());
       column.note().ifPresent(note -> notes.add(table.file() + ": " + note));
     }
-    return new SampleFile(table.file(), table.rows().size(), samples, unused, notes);
+    return new SampleFile(table.file(), rejected, samples, unused, notes);
   }
 
   private Optional<Sample> sample(Row row, RawRow raw) {

@@ -4,19 +4,12 @@ import java.text.Normalizer;
 import java.util.List;
 import java.util.Locale;
 import java.util.regex.Pattern;
+import org.kappatrail.history.MissingTexts;
 
 /** Handling of cell and header texts. */
 final class Texts {
   /** What a decoder puts in place of a byte that is none in the encoding. */
   static final char REPLACEMENT = '\uFFFD';
-
-  /** Texts that stand for a missing value in any column; case aside. */
-  private static final List<String> MISSING =
-      List.of(
-          "", "-", "–", "—", "--", "---", ".", "n/a", "#n/a", "na", "n.a.", "nd", "n.d.", "null",
-          "none", "nan");
-
-  private static final int LONGEST_MISSING = 4;
 
   /** Texts that stand for a missing name; shorter, as a name may be NA or ND. */
   private static final List<String> MISSING_NAME =
@@ -43,8 +36,7 @@ final class Texts {
   }
 
   static boolean isMissing(String cleaned) {
-    return cleaned.length() <= LONGEST_MISSING
-        && MISSING.contains(cleaned.toLowerCase(Locale.ROOT));
+    return MissingTexts.isUsual(cleaned);
   }
 
   static boolean isMissingName(String cleaned) {

@@ -56,6 +56,9 @@ final class Units {
           Map.entry("d", "days"),
           Map.entry("r/min", "rpm"),
           Map.entry("1/min", "rpm"),
+          Map.entry("u/min", "rpm"),
+          Map.entry("rev/min", "rpm"),
+          Map.entry("min-1", "rpm"),
           Map.entry("1/s", "hz"),
           Map.entry("mgkoh/g", "mg-koh-g"));
 

@@ -60,6 +60,10 @@ public record Manifest(String programVersion, List<Input> inputs) {
       node.put("read", account.rowsRead());
       node.put("used", account.rowsUsed());
       node.put("rejected", account.rowsRejected());
+      ObjectNode reasons = node.putObject("reasons");
+      account.rejected().forEach(reasons::put);
+      node.put("counted", account.fileRows().isPresent() ? "readings" : "rows");
+      account.fileRows().ifPresent(rows -> node.put("file_rows", rows));
     }
     root.put("problems", review.problems().size());
     String text = json.writeValueAsString(root).replace("\r\n", "\n") + "\n";

@@ -10,11 +10,13 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
 import org.kappatrail.report.chart.ChartFiles;
+import org.kappatrail.report.json.ReviewJson;
 import org.kappatrail.report.page.Page;
 import org.kappatrail.report.page.Picture;
 import org.kappatrail.report.page.Pictures;
 import org.kappatrail.report.table.CsvFile;
 import org.kappatrail.report.table.ReviewTables;
+import org.kappatrail.report.workbook.ReviewWorkbook;
 import org.kappatrail.review.Progress;
 import org.kappatrail.review.Review;
 import tech.tablesaw.api.Table;
@@ -59,10 +61,13 @@ public final class Pack {
 
   private void write(Path folder) throws IOException {
     progress.at("tables and page", 0, 1);
-    for (Table table : ReviewTables.all(review)) {
+    List<Table> tables = ReviewTables.all(review);
+    for (Table table : tables) {
       CsvFile.write(table, folder.resolve(table.name() + ".csv"));
     }
     CsvFile.write(ReviewTables.kappaDaily(review), folder.resolve("kappa-daily.csv"));
+    new ReviewWorkbook(review, tables).write(folder.resolve("review.xlsx"));
+    new ReviewJson(review, manifest.programVersion()).write(folder.resolve("review.json"));
     manifest.write(folder.resolve("manifest.json"), review);
     Pictures pictures = charts ? writeCharts(folder) : Pictures.none();
     new Page(review, pictures).write(folder);

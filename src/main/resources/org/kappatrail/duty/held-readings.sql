@@ -1,7 +1,7 @@
 -- Readings from events of tags, for DuckDB: an event carries temperature or speed or both.
 --
 -- {events}: source, row_number, overflow, time_text, clock_ms, zoned, quality_text (of the row),
---   tag_text, bearing, rank (0 with a temperature, 1 speed alone, 2 quality alone),
+--   tag_text, asset_text and name_text (what an unknown bearing is reported by), bearing, rank (0 with a temperature, 1 speed alone, 2 quality alone),
 --   temperature_text, temperature_c, speed_text, speed_rpm, mark_text (of a tag of quality)
 --
 -- A cell that is not empty and no usable number ends the value before it: it is held as -2147483648.
@@ -26,6 +26,7 @@ judged AS (
       WHEN mark > 0 THEN mark
       WHEN temperature IS NULL AND trim(temperature_text) <> '' THEN {no_temperature}
       WHEN rank = 0 AND temperature IS NULL AND tag_text IS NOT NULL THEN 9
+      WHEN rank = 1 AND speed IS NULL AND COALESCE(trim(speed_text), '') = '' THEN 9
       ELSE 0
     END AS own_fault,
     {flaw} AS flaw
@@ -90,6 +91,6 @@ SELECT bearing, source, instant_ms, temperature_now AS temperature, speed_now AS
     WHEN temperature_now IS NULL THEN 9
     ELSE 0
   END AS fault,
-  flaw, time_text, COALESCE(tag_text, '') AS asset_text, CAST(NULL AS VARCHAR) AS bearing_text,
+  flaw, time_text, COALESCE(asset_text, '') AS asset_text, name_text AS bearing_text,
   temperature_text, speed_text, COALESCE(mark_text, quality_text) AS quality_text, row_number
 FROM filled

@@ -1,6 +1,7 @@
 package org.kappatrail.duty;
 
 import java.util.LinkedHashMap;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import org.jspecify.annotations.Nullable;
@@ -16,6 +17,7 @@ final class Block {
   private final Map<String, String> constants = new LinkedHashMap<>();
   private final Map<String, Tag> tags = new LinkedHashMap<>();
   private final Map<String, String> texts = new LinkedHashMap<>();
+  private List<String> missing = List.of();
   private boolean decimalComma;
   private int skipLines;
   private int headerRows = 1;
@@ -43,6 +45,11 @@ final class Block {
     return this;
   }
 
+  Block tag(String name, Tag tag) {
+    tags.put(name, tag);
+    return this;
+  }
+
   Block tag(String name, BearingKey bearing, Tag.Quantity quantity) {
     tags.put(name, new Tag(bearing, quantity));
     return this;
@@ -51,6 +58,11 @@ final class Block {
   /** One of date-format, thousands, delimiter, encoding, footer, timezone, jdbc and table. */
   Block with(String key, String text) {
     texts.put(key, text);
+    return this;
+  }
+
+  Block missing(String... markers) {
+    missing = List.of(markers);
     return this;
   }
 
@@ -83,7 +95,8 @@ final class Block {
         constants,
         Optional.empty(),
         text("timezone"),
-        tags);
+        tags,
+        missing);
   }
 
   private Optional<String> text(String key) {

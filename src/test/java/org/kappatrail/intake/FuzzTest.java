@@ -13,7 +13,6 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
-import org.kappatrail.history.FileAccount;
 import org.kappatrail.history.UnusableInputException;
 
 /** Mutated inputs give a result or a message, never anything else. The seed makes runs alike. */
@@ -73,10 +72,7 @@ class FuzzTest {
       Files.write(target, mutate(Files.readAllBytes(source), random));
       try {
         Intake intake = HistoryReader.read(temporary);
-        for (FileAccount account : intake.files()) {
-          assertThat(account.rowsUsed() + account.rowsRejected()).isEqualTo(account.rowsRead());
-        }
-        HistoryCheck.text(intake, List.of(), List.of(), List.of());
+        HistoryCheck.text(intake, LogAccount.NONE);
         results++;
       } catch (UnusableInputException e) {
         assertThat(e.getMessage()).as("run %d", run).isNotBlank();

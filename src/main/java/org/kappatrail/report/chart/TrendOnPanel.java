@@ -15,7 +15,6 @@ import org.kappatrail.review.trend.Drift;
 import org.kappatrail.review.trend.FanPoint;
 import org.kappatrail.review.trend.Outlook;
 import org.kappatrail.review.trend.SeasonalDip;
-import org.kappatrail.statistics.Quantiles;
 
 /**
  * Draws on the κ panel where the present charge is going: the line of the achieved trail with its
@@ -93,13 +92,13 @@ final class TrendOnPanel {
             .mapToDouble(point -> point.sample().day().toEpochDay())
             .toArray();
     double from = days[0];
-    double middle = Quantiles.median(days).orElseThrow();
+    double middle = (days[(days.length - 1) / 2] + days[days.length / 2]) / 2;
     double to = latest.get().sample().day().toEpochDay();
     return bearing
         .trend()
         .drift(number)
         .map(ChargeDrift::achieved)
-        .filter(drift -> drift.line().isPresent())
+        .filter(drift -> drift.slopePer30Days().isPresent())
         .map(drift -> new Charge(drift, from, middle, to));
   }
 
@@ -109,9 +108,9 @@ final class TrendOnPanel {
       return;
     }
     Charge charge = found.get();
-    var line = charge.drift().line().orElseThrow();
-    OptionalDouble low = line.slopeLow();
-    OptionalDouble high = line.slopeHigh();
+    Drift drift = charge.drift();
+    OptionalDouble low = drift.slopeLowPer30Days();
+    OptionalDouble high = drift.slopeHighPer30Days();
     if (low.isEmpty() || high.isEmpty()) {
       return;
     }
@@ -121,8 +120,9 @@ final class TrendOnPanel {
     double[] top = new double[STEPS + 1];
     for (int i = 0; i <= STEPS; i++) {
       days[i] = charge.from() + i * (charge.to() - charge.from()) / STEPS;
-      double steep = line.at(middle) + low.getAsDouble() * (days[i] - middle);
-      double flat = line.at(middle) + high.getAsDouble() * (days[i] - middle);
+      double months = (days[i] - middle) / Drift.SLOPE_DAYS;
+      double steep = at(drift, middle) + low.getAsDouble() * months;
+      double flat = at(drift, middle) + high.getAsDouble() * months;
       bottom[i] = Math.exp(Math.min(steep, flat));
       top[i] = Math.exp(Math.max(steep, flat));
     }
@@ -132,17 +132,22 @@ final class TrendOnPanel {
     canvas.polyline(days, top, Palette.wash(Palette.KAPPA, 0.5), hair);
   }
 
+  private static double at(Drift drift, double day) {
+    return drift.lnKappaOn(day).orElseThrow();
+  }
+
   private void line(Canvas canvas) {
     charge()
         .ifPresent(
-            charge -> {
-              var line = charge.drift().line().orElseThrow();
-              canvas.polyline(
-                  new double[] {charge.from(), charge.to()},
-                  new double[] {Math.exp(line.at(charge.from())), Math.exp(line.at(charge.to()))},
-                  Palette.wash(Palette.KAPPA, 0.8),
-                  new BasicStroke(1f));
-            });
+            charge ->
+                canvas.polyline(
+                    new double[] {charge.from(), charge.to()},
+                    new double[] {
+                      Math.exp(at(charge.drift(), charge.from())),
+                      Math.exp(at(charge.drift(), charge.to()))
+                    },
+                    Palette.wash(Palette.KAPPA, 0.8),
+                    new BasicStroke(1f)));
   }
 
   /** The dip as a bar at the floor, where it falls within the time shown. */

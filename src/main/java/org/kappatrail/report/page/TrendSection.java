@@ -113,7 +113,9 @@ final class TrendSection {
             low.isPresent() && high.isPresent() ? percent(low) + " to " + percent(high) : "")
         .element(
             "td class=\"n\"",
-            drift.test().map(test -> Long.toString(test.s()).replace('-', '−')).orElse(""))
+            drift.score().isPresent()
+                ? Long.toString(drift.score().getAsLong()).replace('-', '−')
+                : "")
         .element("td class=\"n\"", Numbers.significant(drift.p(), 2))
         .element("td", drift.direction().label())
         .element("td", sum)

@@ -97,8 +97,8 @@ final class TrendTables {
   }
 
   private static OptionalDouble score(Drift drift) {
-    return drift.test().isPresent()
-        ? OptionalDouble.of((double) drift.test().get().s())
+    return drift.score().isPresent()
+        ? OptionalDouble.of((double) drift.score().getAsLong())
         : OptionalDouble.empty();
   }
 

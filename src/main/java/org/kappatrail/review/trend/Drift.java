@@ -2,6 +2,7 @@ package org.kappatrail.review.trend;
 
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.OptionalLong;
 import org.kappatrail.statistics.MannKendall;
 import org.kappatrail.statistics.TheilSen;
 
@@ -81,5 +82,15 @@ public record Drift(
     return slope.isPresent()
         ? OptionalDouble.of(slope.getAsDouble() * SLOPE_DAYS)
         : OptionalDouble.empty();
+  }
+
+  /** Score of the Mann–Kendall test. */
+  public OptionalLong score() {
+    return test.map(found -> OptionalLong.of(found.s())).orElse(OptionalLong.empty());
+  }
+
+  /** ln κ by the line on a day; empty without a line. */
+  public OptionalDouble lnKappaOn(double day) {
+    return line.map(found -> OptionalDouble.of(found.at(day))).orElse(OptionalDouble.empty());
   }
 }
