@@ -1,18 +1,9 @@
 package org.kappatrail.report.slides;
 
-import java.awt.Color;
 import java.awt.geom.Rectangle2D;
-import java.io.StringWriter;
-import java.time.LocalDate;
 import java.util.List;
-import java.util.Locale;
-import java.util.Optional;
-import java.util.SortedMap;
-import javax.xml.stream.XMLOutputFactory;
 import javax.xml.stream.XMLStreamException;
-import javax.xml.stream.XMLStreamWriter;
 import org.kappatrail.report.chart.Palette;
-import org.kappatrail.report.table.SixDigits;
 
 /**
  * A chart in the XML of office drawings (ECMA-376 part 1, 21.2), whose order of elements is fixed.
@@ -20,19 +11,14 @@ import org.kappatrail.report.table.SixDigits;
  * from cells and labels of series together.
  */
 final class ChartXml {
-  private static final String CHART = "http://schemas.openxmlformats.org/drawingml/2006/chart";
-  private static final String DRAWING = "http://schemas.openxmlformats.org/drawingml/2006/main";
-  private static final String GENERAL = "General";
-  private static final String DATES = "yyyy-mm-dd";
-
-  private static final double TEXT = 12;
+  /** Size of all text but the title. */
+  static final double TEXT = 12;
   private static final double TITLE_TEXT = 14;
   private static final double LEGEND_KEY = 40;
   private static final double TITLE_GAP = 30;
   private static final double AXIS_ROOM = 40;
   private static final double TICK_ROOM = 54;
   private static final double LEGEND_LINE = 22;
-  private static final int EMU = 12_700;
 
   private static final int DAY_AXIS = 1;
   private static final int LEFT_AXIS = 2;
@@ -44,8 +30,7 @@ final class ChartXml {
   private final double legendFrom;
   private final double legendHeight;
   private final int mostTicks;
-  private final StringWriter text = new StringWriter();
-  private final XMLStreamWriter xml;
+  private final DrawingXml xml;
 
   /** The XML of a chart that takes a place on a slide. */
   ChartXml(NativeChart chart, Rectangle2D place, TextFit fit) {
@@ -61,7 +46,7 @@ final class ChartXml {
     legendHeight = (keys > place.getWidth() - legendFrom ? 2 : 1) * LEGEND_LINE;
     mostTicks = (int) Math.max(2, (place.getWidth() - 2 * AXIS_ROOM) / TICK_ROOM);
     try {
-      xml = XMLOutputFactory.newInstance().createXMLStreamWriter(text);
+      xml = new DrawingXml();
     } catch (XMLStreamException e) {
       throw new IllegalStateException(e);
     }
@@ -70,69 +55,62 @@ final class ChartXml {
   String text() {
     try {
       write();
+      return xml.end();
     } catch (XMLStreamException e) {
       throw new IllegalStateException(e);
     }
-    return text.toString();
   }
 
   private void write() throws XMLStreamException {
-    xml.setPrefix("c", CHART);
-    xml.setPrefix("a", DRAWING);
-    open("chartSpace");
-    xml.writeNamespace("c", CHART);
-    xml.writeNamespace("a", DRAWING);
-    value("date1904", "0");
-    value("roundedCorners", "0");
-    open("chart");
+    xml.value("date1904", "0");
+    xml.value("roundedCorners", "0");
+    xml.open("chart");
     title();
-    value("autoTitleDeleted", "0");
+    xml.value("autoTitleDeleted", "0");
     plot();
     legend();
-    value("plotVisOnly", "1");
-    value("dispBlanksAs", "span");
-    close();
-    open("spPr");
-    solid(Palette.PAPER);
-    noLine();
-    close();
-    textProperties(TEXT, Palette.INK, false);
-    close();
-    xml.flush();
+    xml.value("plotVisOnly", "1");
+    xml.value("dispBlanksAs", "span");
+    xml.close();
+    xml.open("spPr");
+    xml.solid(Palette.PAPER);
+    xml.noLine();
+    xml.close();
+    xml.textProperties(TEXT, Palette.INK, false);
   }
 
   private void title() throws XMLStreamException {
-    open("title");
-    open("tx");
-    open("rich");
-    drawing("bodyPr");
-    close();
-    drawing("p");
-    drawing("r");
-    drawing("rPr");
-    attribute("lang", "en-GB");
-    attribute("sz", hundredths(TITLE_TEXT));
-    attribute("b", "1");
-    solid(chart.right().isPresent() ? Palette.INK : chart.left().ink());
-    close();
-    drawing("t");
-    xml.writeCharacters(chart.title());
-    close();
-    close();
-    close();
-    close();
-    close();
-    layout(false, 0.01, 0.01, 0, 0);
-    value("overlay", "1");
-    close();
+    xml.open("title");
+    xml.open("tx");
+    xml.open("rich");
+    xml.drawing("bodyPr");
+    xml.close();
+    xml.drawing("p");
+    xml.drawing("r");
+    xml.drawing("rPr");
+    xml.attribute("lang", "en-GB");
+    xml.attribute("sz", DrawingXml.hundredths(TITLE_TEXT));
+    xml.attribute("b", "1");
+    xml.solid(chart.right().isPresent() ? Palette.INK : chart.left().ink());
+    xml.close();
+    xml.drawing("t");
+    xml.characters(chart.title());
+    xml.close();
+    xml.close();
+    xml.close();
+    xml.close();
+    xml.close();
+    xml.layout(false, 0.01, 0.01, 0, 0);
+    xml.value("overlay", "1");
+    xml.close();
   }
 
   /** Both charts of an asset have their plot between the same edges. */
   private void plot() throws XMLStreamException {
-    open("plotArea");
+    xml.open("plotArea");
     double top = (legendHeight + 8) / place.getHeight();
     double foot = 24 / place.getHeight();
-    layout(
+    xml.layout(
         true,
         AXIS_ROOM / place.getWidth(),
         top,
@@ -147,7 +125,7 @@ final class ChartXml {
       dayAxis(HIDDEN_DAY_AXIS, RIGHT_AXIS, false);
       valueAxis(RIGHT_AXIS, HIDDEN_DAY_AXIS, chart.right().get(), false);
     }
-    close();
+    xml.close();
   }
 
   private void group(String element, ChartSeries.Kind kind, int dayAxis, int valueAxis)
@@ -157,328 +135,106 @@ final class ChartXml {
     if (members.isEmpty()) {
       return;
     }
-    open(element);
-    value("grouping", kind == ChartSeries.Kind.AREA ? "stacked" : "standard");
-    value("varyColors", "0");
+    xml.open(element);
+    xml.value("grouping", kind == ChartSeries.Kind.AREA ? "stacked" : "standard");
+    xml.value("varyColors", "0");
+    SeriesXml series = new SeriesXml(xml, chart);
     for (ChartSeries item : members) {
-      series(item);
+      series.write(item);
     }
     if (kind != ChartSeries.Kind.AREA) {
-      value("marker", "1");
+      xml.value("marker", "1");
     }
-    value("axId", Integer.toString(dayAxis));
-    value("axId", Integer.toString(valueAxis));
-    close();
-  }
-
-  private void series(ChartSeries item) throws XMLStreamException {
-    String index = Integer.toString(chart.series().indexOf(item));
-    open("ser");
-    value("idx", index);
-    value("order", index);
-    open("tx");
-    open("strRef");
-    element("f", chart.sheet().nameCell(item.column()));
-    open("strCache");
-    value("ptCount", "1");
-    open("pt");
-    attribute("idx", "0");
-    element("v", chart.sheet().name(item.column()));
-    close();
-    close();
-    close();
-    close();
-    open("spPr");
-    if (item.kind() == ChartSeries.Kind.AREA) {
-      solid(item.ink());
-      noLine();
-    } else {
-      line(item.ink(), item.points(), item.dash());
-    }
-    close();
-    if (item.kind() != ChartSeries.Kind.AREA) {
-      marker(item);
-    }
-    if (!item.label().isEmpty()) {
-      labels(item);
-    }
-    if (item.above().isPresent() && item.below().isPresent()) {
-      whiskers(item);
-    }
-    open("cat");
-    numbers(chart.sheet().dayRange(), Optional.empty());
-    close();
-    open("val");
-    numbers(
-        chart.sheet().valueRange(item.column()), Optional.of(chart.sheet().values(item.column())));
-    close();
-    if (item.kind() != ChartSeries.Kind.AREA) {
-      value("smooth", "0");
-    }
-    close();
-  }
-
-  private void marker(ChartSeries item) throws XMLStreamException {
-    open("marker");
-    value("symbol", item.marker());
-    if (!item.marker().equals("none")) {
-      value("size", "6");
-      open("spPr");
-      solid(item.ink());
-      line(item.ink(), 0.75, "solid");
-      close();
-    }
-    close();
-  }
-
-  private void labels(ChartSeries item) throws XMLStreamException {
-    open("dLbls");
-    open("spPr");
-    xml.writeEmptyElement("a", "noFill", DRAWING);
-    noLine();
-    close();
-    textProperties(TEXT, item.ink(), false);
-    value("dLblPos", item.label());
-    value("showLegendKey", "0");
-    value("showVal", "0");
-    value("showCatName", "0");
-    value("showSerName", "1");
-    value("showPercent", "0");
-    value("showBubbleSize", "0");
-    close();
-  }
-
-  private void whiskers(ChartSeries item) throws XMLStreamException {
-    open("errBars");
-    value("errDir", "y");
-    value("errBarType", "both");
-    value("errValType", "cust");
-    value("noEndCap", "1");
-    for (boolean up : new boolean[] {true, false}) {
-      int column = up ? item.above().getAsInt() : item.below().getAsInt();
-      open(up ? "plus" : "minus");
-      numbers(chart.sheet().valueRange(column), Optional.of(chart.sheet().values(column)));
-      close();
-    }
-    open("spPr");
-    line(item.whiskerInk(), 1.25, "solid");
-    close();
-    close();
-  }
-
-  /** A column with what it holds; the days where no values are given. */
-  private void numbers(String range, Optional<SortedMap<LocalDate, Double>> values)
-      throws XMLStreamException {
-    List<LocalDate> days = chart.sheet().days();
-    open("numRef");
-    element("f", range);
-    open("numCache");
-    element("formatCode", values.isPresent() ? GENERAL : DATES);
-    value("ptCount", Integer.toString(days.size()));
-    for (int i = 0; i < days.size(); i++) {
-      LocalDate day = days.get(i);
-      Double number =
-          values.isPresent() ? values.get().get(day) : Double.valueOf(ChartSheet.serial(day));
-      if (number != null) {
-        open("pt");
-        attribute("idx", Integer.toString(i));
-        element("v", SixDigits.text(number));
-        close();
-      }
-    }
-    close();
-    close();
+    xml.value("axId", Integer.toString(dayAxis));
+    xml.value("axId", Integer.toString(valueAxis));
+    xml.close();
   }
 
   private void dayAxis(int id, int crossed, boolean shown) throws XMLStreamException {
-    open("dateAx");
-    value("axId", Integer.toString(id));
-    open("scaling");
-    value("orientation", "minMax");
-    value("max", number(ChartSheet.serial(chart.span().to())));
-    value("min", number(ChartSheet.serial(chart.span().from())));
-    close();
-    value("delete", shown ? "0" : "1");
-    value("axPos", "b");
-    open("numFmt");
-    attribute("formatCode", "mmm yy");
-    attribute("sourceLinked", "0");
-    close();
-    value("majorTickMark", "out");
-    value("minorTickMark", "none");
-    value("tickLblPos", "low");
-    open("spPr");
-    line(Palette.QUIET_INK, 0.75, "solid");
-    close();
-    textProperties(TEXT, Palette.INK, false);
-    value("crossAx", Integer.toString(crossed));
-    value("crosses", "min");
-    value("auto", "0");
-    value("lblOffset", "50");
-    value("baseTimeUnit", "days");
-    value("majorUnit", Integer.toString(chart.span().stepMonths(mostTicks)));
-    value("majorTimeUnit", "months");
-    close();
+    xml.open("dateAx");
+    xml.value("axId", Integer.toString(id));
+    xml.open("scaling");
+    xml.value("orientation", "minMax");
+    xml.value("max", DrawingXml.number(ChartSheet.serial(chart.span().to())));
+    xml.value("min", DrawingXml.number(ChartSheet.serial(chart.span().from())));
+    xml.close();
+    xml.value("delete", shown ? "0" : "1");
+    xml.value("axPos", "b");
+    xml.open("numFmt");
+    xml.attribute("formatCode", "mmm yy");
+    xml.attribute("sourceLinked", "0");
+    xml.close();
+    xml.value("majorTickMark", "out");
+    xml.value("minorTickMark", "none");
+    xml.value("tickLblPos", "low");
+    xml.open("spPr");
+    xml.line(Palette.QUIET_INK, 0.75, "solid");
+    xml.close();
+    xml.textProperties(TEXT, Palette.INK, false);
+    xml.value("crossAx", Integer.toString(crossed));
+    xml.value("crosses", "min");
+    xml.value("auto", "0");
+    xml.value("lblOffset", "50");
+    xml.value("baseTimeUnit", "days");
+    xml.value("majorUnit", Integer.toString(chart.span().stepMonths(mostTicks)));
+    xml.value("majorTimeUnit", "months");
+    xml.close();
   }
 
   private void valueAxis(int id, int crossed, ValueAxis axis, boolean left)
       throws XMLStreamException {
-    open("valAx");
-    value("axId", Integer.toString(id));
-    open("scaling");
+    xml.open("valAx");
+    xml.value("axId", Integer.toString(id));
+    xml.open("scaling");
     if (axis.logarithmic()) {
-      value("logBase", number(axis.step()));
+      xml.value("logBase", DrawingXml.number(axis.step()));
     }
-    value("orientation", "minMax");
-    value("max", number(axis.high()));
-    value("min", number(axis.low()));
-    close();
-    value("delete", "0");
-    value("axPos", left ? "l" : "r");
+    xml.value("orientation", "minMax");
+    xml.value("max", DrawingXml.number(axis.high()));
+    xml.value("min", DrawingXml.number(axis.low()));
+    xml.close();
+    xml.value("delete", "0");
+    xml.value("axPos", left ? "l" : "r");
     if (left) {
-      open("majorGridlines");
-      open("spPr");
-      line(Palette.RULE, 0.75, "solid");
-      close();
-      close();
+      xml.open("majorGridlines");
+      xml.open("spPr");
+      xml.line(Palette.RULE, 0.75, "solid");
+      xml.close();
+      xml.close();
     }
-    open("numFmt");
-    attribute("formatCode", GENERAL);
-    attribute("sourceLinked", "0");
-    close();
-    value("majorTickMark", "none");
-    value("minorTickMark", "none");
-    value("tickLblPos", "nextTo");
-    open("spPr");
-    noLine();
-    close();
-    textProperties(TEXT, axis.ink(), true);
-    value("crossAx", Integer.toString(crossed));
-    value("crosses", left ? "min" : "max");
-    value("crossBetween", "midCat");
-    value("majorUnit", number(axis.step()));
-    close();
+    xml.open("numFmt");
+    xml.attribute("formatCode", "General");
+    xml.attribute("sourceLinked", "0");
+    xml.close();
+    xml.value("majorTickMark", "none");
+    xml.value("minorTickMark", "none");
+    xml.value("tickLblPos", "nextTo");
+    xml.open("spPr");
+    xml.noLine();
+    xml.close();
+    xml.textProperties(TEXT, axis.ink(), true);
+    xml.value("crossAx", Integer.toString(crossed));
+    xml.value("crosses", left ? "min" : "max");
+    xml.value("crossBetween", "midCat");
+    xml.value("majorUnit", DrawingXml.number(axis.step()));
+    xml.close();
   }
 
   private void legend() throws XMLStreamException {
-    open("legend");
-    value("legendPos", "t");
+    xml.open("legend");
+    xml.value("legendPos", "t");
     for (int i = 0; i < chart.series().size(); i++) {
       if (!chart.series().get(i).inLegend()) {
-        open("legendEntry");
-        value("idx", Integer.toString(i));
-        value("delete", "1");
-        close();
+        xml.open("legendEntry");
+        xml.value("idx", Integer.toString(i));
+        xml.value("delete", "1");
+        xml.close();
       }
     }
     double from = legendFrom / place.getWidth();
-    layout(false, from, 0.0, 1 - from, (legendHeight + 2) / place.getHeight());
-    value("overlay", "1");
-    textProperties(TEXT, Palette.INK, false);
-    close();
-  }
-
-  private void layout(boolean inner, double x, double y, double width, double height)
-      throws XMLStreamException {
-    open("layout");
-    open("manualLayout");
-    if (inner) {
-      value("layoutTarget", "inner");
-    }
-    value("xMode", "edge");
-    value("yMode", "edge");
-    value("x", number(x));
-    value("y", number(y));
-    if (width > 0) {
-      value("w", number(width));
-      value("h", number(height));
-    }
-    close();
-    close();
-  }
-
-  private void textProperties(double points, Color ink, boolean strong) throws XMLStreamException {
-    open("txPr");
-    drawing("bodyPr");
-    attribute("rot", "0");
-    attribute("vert", "horz");
-    close();
-    drawing("p");
-    drawing("pPr");
-    drawing("defRPr");
-    attribute("sz", hundredths(points));
-    attribute("b", strong ? "1" : "0");
-    solid(ink);
-    close();
-    close();
-    drawing("endParaRPr");
-    attribute("lang", "en-GB");
-    close();
-    close();
-    close();
-  }
-
-  private void line(Color ink, double points, String dash) throws XMLStreamException {
-    if (points == 0) {
-      noLine();
-      return;
-    }
-    drawing("ln");
-    attribute("w", Integer.toString((int) Math.round(points * EMU)));
-    solid(ink);
-    drawing("prstDash");
-    attribute("val", dash);
-    close();
-    close();
-  }
-
-  private void noLine() throws XMLStreamException {
-    drawing("ln");
-    xml.writeEmptyElement("a", "noFill", DRAWING);
-    close();
-  }
-
-  private void solid(Color colour) throws XMLStreamException {
-    drawing("solidFill");
-    drawing("srgbClr");
-    attribute("val", Hatch.hex(colour));
-    close();
-    close();
-  }
-
-  private void open(String name) throws XMLStreamException {
-    xml.writeStartElement("c", name, CHART);
-  }
-
-  private void drawing(String name) throws XMLStreamException {
-    xml.writeStartElement("a", name, DRAWING);
-  }
-
-  private void close() throws XMLStreamException {
-    xml.writeEndElement();
-  }
-
-  private void attribute(String name, String value) throws XMLStreamException {
-    xml.writeAttribute(name, value);
-  }
-
-  private void value(String name, String value) throws XMLStreamException {
-    open(name);
-    attribute("val", value);
-    close();
-  }
-
-  private void element(String name, String content) throws XMLStreamException {
-    open(name);
-    xml.writeCharacters(content);
-    close();
-  }
-
-  private static String hundredths(double points) {
-    return Integer.toString((int) Math.round(points * 100));
-  }
-
-  private static String number(double value) {
-    return String.format(Locale.ROOT, "%.6g", value);
+    xml.layout(false, from, 0.0, 1 - from, (legendHeight + 2) / place.getHeight());
+    xml.value("overlay", "1");
+    xml.textProperties(TEXT, Palette.INK, false);
+    xml.close();
   }
 }
