@@ -100,7 +100,8 @@ class MalformedLogTest {
         Block.of("temperatures/bad.csv").column("ts", "time").column("Temp C", "temperature_c"));
     refuses(
         "kappatrail.yaml: temperatures: columns: 'temperature' is not a column of readings; these"
-            + " are time, asset, bearing, temperature_c, speed_rpm, quality, tag, value",
+            + " are time, time_of_day, asset, bearing, temperature_c, speed_rpm, quality, tag,"
+            + " value",
         Block.of("temperatures/bad.csv").column("temp", "temperature"));
   }
 

@@ -69,10 +69,9 @@ public final class AssetChart {
             asset.asset().id() + " · " + asset.asset().name(),
             subtitle(),
             (site.isEmpty() ? "" : site + "; ")
-                + "oil samples and bearing logs up to "
+                + "samples and logs up to "
                 + review.asOf()
-                + "; κ by ISO 281 from viscosity by ASTM D341; whiskers: 95 % interval; fan: Theil–Sen slope"
-                + " of the oil at the present operating point",
+                + "; κ by ISO 281, viscosity by ASTM D341; whiskers: 95 %; fan: the oil's own drift where it runs",
             span,
             EventMark.of(asset));
     stack.samples(asset.samples());

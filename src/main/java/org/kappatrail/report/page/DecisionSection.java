@@ -34,7 +34,7 @@ final class DecisionSection {
         .raw("</b>: ")
         .text(decision.reason())
         .raw(".</p>\n");
-    html.raw("<div class=\"scroll\"><table class=\"questions\" data-name=\"questions\"><tbody>\n");
+    html.raw("<div class=\"scroll\"><table class=\"questions\"><tbody>\n");
     question(html, "Is the drop real?", decision.real());
     question(html, "Does it matter?", decision.matters());
     question(html, "Is it the oil's doing?", decision.oilToBlame());
@@ -42,6 +42,7 @@ final class DecisionSection {
     question(html, "Is it urgent?", decision.urgent());
     html.raw("</tbody></table></div>\n");
     remedies(html, decision);
+    new OtherBearings(decision).write(html);
     html.element(
         "p class=\"note\"", "Rests on: " + String.join("; ", decision.assumptions()) + ".");
   }
@@ -89,10 +90,10 @@ final class DecisionSection {
 
   private static void row(Html html, Remedy remedy, int rank, String bearing) {
     Outcome outcome = remedy.outcome(bearing).orElseThrow();
-    html.raw(remedy.pays() ? "<tr class=\"pays\">" : "<tr>")
+    html.raw("<tr>")
         .element("td class=\"n\"", Integer.toString(rank))
         .element("td", remedy.name() + (remedy.pays() ? " (pays)" : ""))
-        .element("td class=\"n deciding\"", Numbers.significant(outcome.kappa(), 3))
+        .element("td class=\"n\"", Numbers.significant(outcome.kappa(), 3))
         .element(
             "td class=\"n\"",
             Numbers.significant(outcome.kappaLow(), 3)
@@ -103,23 +104,25 @@ final class DecisionSection {
         .element("td class=\"n\"", Numbers.grouped(outcome.ratingLifeH()))
         .element("td class=\"n\"", percent(remedy.failureProbability()))
         .element("td class=\"n\"", Numbers.grouped(remedy.price()))
-        .element("td class=\"n\"", Numbers.grouped(remedy.netSaving()))
         .element(
-            "td",
+            remedy.netSaving().isPresent() ? "td class=\"n deciding\"" : "td class=\"n\"",
+            Numbers.grouped(remedy.netSaving()).replace('-', '−'))
+        .element(
+            remedy.netSaving().isPresent() ? "td class=\"word\"" : "td class=\"word deciding\"",
             remedy.breakEvenRatio().isPresent()
                 ? Numbers.significant(remedy.breakEvenRatio(), 2) + " times its price"
                 : "")
         .raw("</tr>\n");
   }
 
-  private static String percent(OptionalDouble share) {
+  static String percent(OptionalDouble share) {
     if (share.isEmpty()) {
       return "";
     }
     double value = share.getAsDouble();
     return value < 0.001
         ? "below 0.1"
-        : value > 0.999 ? "above 99.9" : Numbers.significant(value * 100, 2);
+        : value > 0.999 ? "above 99.9" : Numbers.significant(value * 100, value < 0.99 ? 2 : 3);
   }
 
   private void causes(Html html) {

@@ -48,7 +48,7 @@ final class Figure {
           overlay(html, "role=\"listbox\" aria-orientation=\"horizontal\"", listName);
           for (int i = 0; i < spots.size(); i++) {
             html.raw("<rect class=\"spot\" role=\"option\" aria-selected=\"false\" tabindex=\"")
-                .raw(i == spots.size() - 1 ? "0" : "-1");
+                .raw(i == spots.size() - 1 ? "0\"" : "-1\"");
             place(html, spots.get(i), label.apply(i));
           }
           html.raw("</svg>");

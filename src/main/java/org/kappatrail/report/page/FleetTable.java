@@ -45,7 +45,7 @@ final class FleetTable {
               .raw("<th>κ over its samples</th><th class=\"n\" data-sort=\"number\">κ</th>")
               .raw("<th class=\"n\">95 % interval</th><th data-sort=\"number\">level</th>")
               .raw("<th data-sort=\"number\">verdict</th>")
-              .raw("<th class=\"n\" data-sort=\"number\">κ since the sample before</th>")
+              .raw("<th class=\"n\" data-sort=\"number\">change of κ</th>")
               .raw("<th class=\"n\" data-sort=\"number\">water, mg/kg</th>")
               .raw("<th data-sort=\"text\">code</th>")
               .raw("<th class=\"n\" data-sort=\"number\">mixed regime, h</th>")
@@ -56,7 +56,8 @@ final class FleetTable {
                   "p class=\"note\"",
                   "The bearing is the one with the least κ over its floor (dashed). Mixed regime:"
                       + " hours with κ below 1 between the last sample and the one before it. κ"
-                      + " stands for the latest sample that has one.");
+                      + " stands for the latest sample that has one, its change for that since the"
+                      + " one before.");
         });
   }
 

@@ -85,7 +85,8 @@ final class TrendSection {
     if (drift.isEmpty()) {
       return;
     }
-    html.raw("<div class=\"scroll\"><table data-name=\"drift\">\n<thead><tr><th>trail of charge ")
+    html.raw(
+            "<div class=\"scroll\"><table class=\"narrow\" data-name=\"drift\">\n<thead><tr><th>trail of charge ")
         .text(Integer.toString(latest.charge().number()))
         .raw("</th><th class=\"n\">samples</th><th class=\"n\">slope, % in 30 days</th>")
         .raw("<th class=\"n\">95 % limits</th><th class=\"n\">Mann–Kendall S</th>")
@@ -109,10 +110,12 @@ final class TrendSection {
         .element("td class=\"n\"", percent(drift.slopePer30Days()))
         .element(
             "td class=\"n\"",
-            low.isPresent() && high.isPresent() ? percent(low) + " – " + percent(high) : "")
+            low.isPresent() && high.isPresent() ? percent(low) + " to " + percent(high) : "")
         .element(
             "td class=\"n\"",
-            drift.score().isPresent() ? Long.toString(drift.score().getAsLong()) : "")
+            drift.score().isPresent()
+                ? Long.toString(drift.score().getAsLong()).replace('-', '−')
+                : "")
         .element("td class=\"n\"", Numbers.significant(drift.p(), 2))
         .element("td", drift.direction().label())
         .element("td", sum)
@@ -180,7 +183,7 @@ final class TrendSection {
     if (same.size() < 2) {
       return;
     }
-    html.raw("<div class=\"scroll\"><table data-name=\"season\">\n<thead><tr><th>")
+    html.raw("<div class=\"scroll\"><table class=\"narrow\" data-name=\"season\">\n<thead><tr><th>")
         .text(month.getDisplayName(TextStyle.FULL, Locale.ENGLISH) + " of")
         .raw("</th><th class=\"n\">running days</th><th class=\"n\">median T, °C</th>")
         .raw("<th class=\"n\">median κ</th><th class=\"n\">κ of the present oil there</th>")

@@ -13,6 +13,8 @@ import java.util.stream.Stream;
 import org.apache.commons.compress.archivers.zip.Zip64Mode;
 import org.apache.poi.ss.usermodel.Cell;
 import org.apache.poi.ss.usermodel.CellStyle;
+import org.apache.poi.util.DefaultTempFileCreationStrategy;
+import org.apache.poi.util.TempFile;
 import org.apache.poi.xssf.streaming.SXSSFSheet;
 import org.apache.poi.xssf.streaming.SXSSFWorkbook;
 import org.kappatrail.report.office.FixedZip;
@@ -55,10 +57,26 @@ public final class ReviewWorkbook {
     this.mostRows = mostRows;
   }
 
+  /** Writes it; the library's own temporary files lie beside it meanwhile, and go with the pack. */
   public void write(Path file) throws IOException {
+    Path work = Files.createTempDirectory(file.toAbsolutePath().getParent(), ".sheets-");
+    TempFile.setThreadLocalTempFileCreationStrategy(
+        new DefaultTempFileCreationStrategy(work.toFile()));
     try (OutputStream out = new BufferedOutputStream(Files.newOutputStream(file))) {
       FixedZip.write(bytes(), out);
+    } finally {
+      TempFile.setThreadLocalTempFileCreationStrategy(null);
+      delete(work);
     }
+  }
+
+  private static void delete(Path folder) throws IOException {
+    try (Stream<Path> left = Files.list(folder)) {
+      for (Path path : left.toList()) {
+        Files.delete(path);
+      }
+    }
+    Files.delete(folder);
   }
 
   private byte[] bytes() throws IOException {

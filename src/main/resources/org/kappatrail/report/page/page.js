@@ -152,9 +152,10 @@
     tip.style.top = `${Math.max(8, Math.min(top, innerHeight - tip.offsetHeight - 8))}px`;
   };
 
+  // A place that has the focus keeps its words.
   const hideTip = () => {
-    const focused = document.activeElement?.closest?.(".spots");
-    const spot = focused && document.activeElement;
+    const focused = document.activeElement;
+    const spot = focused?.matches(".spots a") ? focused.firstElementChild : focused;
     if (spot?.matches(".spot")) showTip(spot);
     else tip.hidden = true;
   };
@@ -193,7 +194,7 @@
     const spot = spotOf(event);
     if (spot?.matches("[role=option]")) choose(spot);
   });
-  document.addEventListener("scroll", () => (tip.hidden = true), { passive: true });
+  document.addEventListener("scroll", () => tip.hidden || hideTip(), { passive: true });
   document.addEventListener("keydown", (event) => {
     if (event.key === "Escape") tip.hidden = true;
     const spot = event.target instanceof Element && event.target.closest("[role=option]");
