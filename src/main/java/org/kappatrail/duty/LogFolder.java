@@ -1,9 +1,11 @@
 package org.kappatrail.duty;
 
 import java.io.IOException;
+import java.nio.file.DirectoryIteratorException;
+import java.nio.file.DirectoryStream;
 import java.nio.file.FileSystems;
-import java.nio.file.FileVisitOption;
 import java.nio.file.Files;
+import java.nio.file.LinkOption;
 import java.nio.file.Path;
 import java.nio.file.PathMatcher;
 import java.util.ArrayList;
@@ -11,7 +13,6 @@ import java.util.List;
 import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
-import java.util.stream.Stream;
 import org.kappatrail.history.ExportMapping;
 import org.kappatrail.history.Problem;
 import org.kappatrail.history.SourceLine;
@@ -38,7 +39,10 @@ final class LogFolder {
     List<ExportMapping> blocks =
         mappings.stream().filter(mapping -> mapping.jdbc().isEmpty()).toList();
     boolean[] matched = new boolean[blocks.size()];
-    for (var entry : list(history).entrySet()) {
+    boolean anywhere = blocks.stream().anyMatch(block -> !block.files().startsWith(FOLDER + "/"));
+    SortedMap<String, Path> entries = new TreeMap<>();
+    list(history, anywhere ? history : history.resolve(FOLDER), 0, entries);
+    for (var entry : entries.entrySet()) {
       String name = entry.getKey();
       int block = matching(blocks, name);
       if (block >= 0) {
@@ -87,9 +91,11 @@ final class LogFolder {
       throw new UnusableInputException(
           file.name() + ": is a folder with the name of a file of readings; rename or move it");
     }
-    if (!Files.isReadable(file.path())) {
+    if (!Files.isRegularFile(file.path()) || !Files.isReadable(file.path())) {
       throw new UnusableInputException(
-          file.name() + ": may not be read; give read permission or move it out of the folder");
+          file.name()
+              + ": cannot be read; it must be a file with read permission, or a link that leads to"
+              + " one");
     }
     files.add(file);
   }
@@ -109,21 +115,26 @@ final class LogFolder {
     return -1;
   }
 
-  private static SortedMap<String, Path> list(Path history) {
-    SortedMap<String, Path> found = new TreeMap<>();
-    if (!Files.isDirectory(history)) {
-      return found;
+  /** All entries below a folder; behind a link only those of the first level, so that none loops. */
+  private static void list(
+      Path history, Path folder, int depth, SortedMap<String, Path> found) {
+    if (!Files.isDirectory(folder)) {
+      return;
     }
-    try (Stream<Path> paths = Files.walk(history, DEEPEST, FileVisitOption.FOLLOW_LINKS)) {
-      paths
-          .filter(path -> !path.equals(history))
-          .forEach(path -> found.put(relativeName(history, path), path));
-    } catch (IOException | java.io.UncheckedIOException e) {
+    try (DirectoryStream<Path> entries = Files.newDirectoryStream(folder)) {
+      for (Path entry : entries) {
+        if (isHidden(entry.getFileName().toString())) {
+          continue;
+        }
+        found.put(relativeName(history, entry), entry);
+        if (depth < DEEPEST && Files.isDirectory(entry, LinkOption.NOFOLLOW_LINKS)) {
+          list(history, entry, depth + 1, found);
+        }
+      }
+    } catch (IOException | DirectoryIteratorException e) {
       throw new UnusableInputException(
-          history + ": the folder cannot be listed (" + e.getMessage() + ")", e);
+          folder + ": the folder cannot be listed (" + e.getMessage() + ")", e);
     }
-    found.keySet().removeIf(LogFolder::isHidden);
-    return found;
   }
 
   private static String relativeName(Path history, Path path) {
@@ -132,11 +143,6 @@ final class LogFolder {
 
   /** Leftovers of editors and file managers. */
   private static boolean isHidden(String name) {
-    for (String part : name.split("/", -1)) {
-      if (part.startsWith(".") || part.startsWith("~")) {
-        return true;
-      }
-    }
-    return false;
+    return name.startsWith(".") || name.startsWith("~");
   }
 }

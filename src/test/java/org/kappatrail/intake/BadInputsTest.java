@@ -24,7 +24,7 @@ class BadInputsTest {
   @TempDir Path folder;
 
   @ParameterizedTest
-  @MethodSource("org.kappatrail.intake.BadInput#all")
+  @MethodSource("org.kappatrail.intake.BadInput#ofRecords")
   void everyBadInputHasItsExpectedOutcome(BadInput input) throws IOException {
     input.make(folder);
     Assumptions.assumeFalse(input.isBeyondThisMachine(folder));
