@@ -29,17 +29,17 @@ final class ReviewSummary {
 
   void print(PrintWriter out) {
     String site = review.settings().site();
+    List<AssetReview> assets = review.assets();
     out.println(
         (site.isEmpty() ? "Review" : site)
             + ", state of "
             + review.asOf()
             + ": "
-            + review.assets().size()
-            + " assets, "
-            + review.assets().stream().mapToInt(asset -> asset.bearings().size()).sum()
-            + " bearings, "
-            + review.assets().stream().mapToInt(asset -> asset.samples().size()).sum()
-            + " samples");
+            + count(assets.size(), "asset")
+            + ", "
+            + count(assets.stream().mapToInt(asset -> asset.bearings().size()).sum(), "bearing")
+            + ", "
+            + count(assets.stream().mapToInt(asset -> asset.samples().size()).sum(), "sample"));
     review.since().ifPresent(since -> since(out, since));
     List<AssetReview> troubled =
         review.worstFirst().stream()
@@ -66,14 +66,19 @@ final class ReviewSummary {
         known ->
             out.printf(
                 Locale.ROOT,
-                "  %-6s %s %s: κ %s (%s to %s), %s%n",
+                "  %-6s %s %s: κ %s (%s to %s), %s%s%n",
                 known.level().label(),
                 asset.asset().id(),
                 bearing.bearing().id(),
                 Numbers.significant(known.kappa(), 3),
                 Numbers.significant(known.uncertainty().low(), 3),
                 Numbers.significant(known.uncertainty().high(), 3),
-                known.regime().label()));
+                known.regime().label(),
+                asset.decision().map(found -> ": " + found.verdict().label()).orElse("")));
+  }
+
+  private static String count(int number, String thing) {
+    return number + " " + thing + (number == 1 ? "" : "s");
   }
 
   private static void since(PrintWriter out, Since since) {

@@ -82,16 +82,13 @@ final class AdoptionBlock {
     line("    columns:");
     List<String> unknown = new ArrayList<>();
     List<String> found = new ArrayList<>();
-    TreeSet<String> names = new TreeSet<>();
     for (ColumnGuess guess : columns) {
-      if (guess.canonical().isPresent() && !names.add(guess.header().name())) {
-        note("  '" + guess.header().name() + "' stands twice; rename the second in the file");
-      } else if (guess.canonical().isPresent()) {
+      if (guess.canonical().isPresent()) {
         found.add(guess.canonical().get());
-        line("      " + quoted(guess.header().name()) + ": " + guess.canonical().get());
+        line("      " + quoted(title(guess)) + ": " + guess.canonical().get());
         guess.doubt().ifPresent(doubt -> note("  not sure: " + doubt));
       } else if (!guess.header().name().isEmpty()) {
-        unknown.add(guess.header().name() + guess.doubt().map(why -> " (" + why + ")").orElse(""));
+        unknown.add(title(guess) + guess.doubt().map(why -> " (" + why + ")").orElse(""));
       }
     }
     if (!isWide() && !unknown.isEmpty()) {
@@ -120,6 +117,14 @@ final class AdoptionBlock {
                         + ": …}"));
       }
     }
+  }
+
+  /** The header; with its number where several columns go by it. */
+  private String title(ColumnGuess guess) {
+    String name = guess.header().name();
+    long same = columns.stream().filter(other -> other.header().name().equals(name)).count();
+    List<String> aliases = guess.header().aliases();
+    return same > 1 && !aliases.isEmpty() ? aliases.get(aliases.size() - 1) : name;
   }
 
   /** Stands where a name is to be put in. */

@@ -36,7 +36,16 @@ record ColumnGuess(
     for (int position = 0; position < headers.size(); position++) {
       RawTable.Header header = headers.get(position);
       Optional<String> found = ColumnSynonyms.ofSamples(header);
-      guesses.add(guess(header, position, found, taken, body));
+      ColumnGuess guess = guess(header, position, found, new HashSet<>(), body);
+      boolean fits =
+          found.isEmpty()
+              || Units.of(found.get()).isEmpty()
+              || guess.isMostlyNumbers()
+              || guess.values().isEmpty();
+      guesses.add(
+          fits
+              ? guess(header, position, found, taken, body)
+              : guess.without("it could be " + found.get() + ", but holds few numbers"));
     }
     return byValues(guesses, taken);
   }
@@ -122,6 +131,10 @@ record ColumnGuess(
     return canonical.equals(Optional.of(name));
   }
 
+  private ColumnGuess without(String why) {
+    return new ColumnGuess(header, position, Optional.empty(), Optional.of(why), values);
+  }
+
   private ColumnGuess as(String name, String why) {
     return new ColumnGuess(
         header, position, Optional.of(name), Optional.of("by its values: " + why), values);
@@ -160,7 +173,8 @@ record ColumnGuess(
         taken.add("sampled_at");
         guesses.set(index, guess.as("sampled_at", "they are dates"));
       } else if (!taken.contains("iso_4406")
-          && guess.values().stream().allMatch(value -> value.matches(CODE))) {
+          && guess.values().stream().filter(ColumnGuess::isCode).count() * 5
+              >= guess.values().size() * 4L) {
         taken.add("iso_4406");
         guesses.set(index, guess.as("iso_4406", "they are cleanliness codes"));
       }

@@ -171,7 +171,11 @@ final class Columns {
               + (found.get(0) + 1)
               + " and "
               + (found.get(1) + 1)
-              + " both go by this name; rename one, or name the right one in full in columns:");
+              + " both go by this name; name the right one in columns:, as '"
+              + name
+              + " #1' or '"
+              + name
+              + " #2'");
     }
     return found.isEmpty() ? OptionalInt.empty() : OptionalInt.of(found.get(0));
   }

@@ -24,7 +24,7 @@ record DateGuess(Optional<String> pattern, Optional<String> doubt) {
       Pattern.compile(
           "\\d{1,2}(?<sep>[- ./])(?<name>\\p{L}{3,9})[- ./](?<year>\\d{4}|\\d{2})" + TIME);
   private static final Pattern NAME_FIRST =
-      Pattern.compile("(?<name>\\p{L}{3,9}) \\d{1,2}, ?(?<year>\\d{4})" + TIME);
+      Pattern.compile("(?<name>\\p{L}{3,9}) \\d{1,2}(?<comma>,?) ?(?<year>\\d{4})" + TIME);
   private static final DateText ISO = DateText.iso(java.time.ZoneOffset.UTC);
 
   /** The guess for the values of a column; empty where they are no dates. */
@@ -84,7 +84,7 @@ record DateGuess(Optional<String> pattern, Optional<String> doubt) {
       day =
           form == NAMED
               ? "d" + one.group("sep") + name + one.group("sep") + year
-              : name + " d, " + year;
+              : name + " d" + one.group("comma") + " " + year;
     }
     String pattern = day + time(matched);
     DateText reader =

@@ -17,10 +17,12 @@ record GridShape(int skipLines, List<RawRow> header, List<RawRow> body, Optional
   private static final int SHORTEST_FOOTER = 5;
   private static final Pattern FOOTER_WORDS = Pattern.compile("\\d.*", Pattern.DOTALL);
   private static final Pattern NUMBER =
-      Pattern.compile("[<>≤≥=\\s]*[+-]?\\d[\\d.,'’ \\u00A0\\u202F\\u2009]*([eE][+-]?\\d+)?\\s*%?");
+      Pattern.compile(
+          "[<>≤≥=\\s]*[+-]?[.,]?\\d[\\d.,'’ \\u00A0\\u202F\\u2009]*([eE][+-]?\\d+)?\\s*%?");
   private static final Pattern DATE =
       Pattern.compile(
-          "\\d{1,4}[-/.]\\d{1,2}[-/.]\\d{1,4}.*|\\d{1,2}[- ./]\\p{L}{3,9}\\.?[- ./]\\d{2,4}.*");
+          "\\d{1,4}[-/.]\\d{1,2}[-/.]\\d{1,4}.*|\\d{1,2}[- ./]\\p{L}{3,9}\\.?[- ./]\\d{2,4}.*"
+              + "|\\p{L}{3,9} \\d{1,2},? ?\\d{4}.*");
 
   GridShape {
     header = List.copyOf(header);

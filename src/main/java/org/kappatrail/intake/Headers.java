@@ -1,6 +1,7 @@
 package org.kappatrail.intake;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
@@ -28,7 +29,24 @@ final class Headers {
     for (int column = 0; column < width; column++) {
       headers.add(header(rows, column, carried));
     }
-    return headers;
+    return numbered(headers);
+  }
+
+  /** Gives headers of one and the same name a further one, {@code Fe #1} and {@code Fe #2}. */
+  private static List<RawTable.Header> numbered(List<RawTable.Header> headers) {
+    List<String> names = headers.stream().map(RawTable.Header::name).toList();
+    List<RawTable.Header> numbered = new ArrayList<>();
+    for (int column = 0; column < headers.size(); column++) {
+      String name = names.get(column);
+      if (name.isEmpty() || Collections.frequency(names, name) == 1) {
+        numbered.add(headers.get(column));
+      } else {
+        List<String> aliases = new ArrayList<>(headers.get(column).aliases());
+        aliases.add(name + " #" + Collections.frequency(names.subList(0, column + 1), name));
+        numbered.add(new RawTable.Header(name, aliases));
+      }
+    }
+    return numbered;
   }
 
   private static RawTable.Header header(List<RawRow> rows, int column, String[] carried) {

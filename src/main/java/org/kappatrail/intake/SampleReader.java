@@ -8,6 +8,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.TreeMap;
+import java.util.regex.Pattern;
 import org.kappatrail.history.ExportMapping;
 import org.kappatrail.history.Measurement;
 import org.kappatrail.history.Problem;
@@ -20,6 +21,9 @@ import org.kappatrail.tribology.CleanlinessCode;
 final class SampleReader {
   private static final List<String> REQUIRED =
       List.of(SampleColumns.SAMPLE, SampleColumns.ASSET, SampleColumns.SAMPLED_AT);
+
+  /** Some laboratories write the standard's name before the code. */
+  private static final Pattern ISO = Pattern.compile("(?i)^iso(\\s*4406)?[\\s:]*");
 
   private final Context context;
   private final RawTable table;
@@ -156,7 +160,7 @@ final class SampleReader {
       return Optional.empty();
     }
     try {
-      return Optional.of(CleanlinessCode.parse(text));
+      return Optional.of(CleanlinessCode.parse(ISO.matcher(text).replaceFirst("")));
     } catch (IllegalArgumentException e) {
       row.problem(
           SampleColumns.ISO_4406, text, e.getMessage() + "; write it like 18/16/13, 0 to 30 each");

@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.io.InterruptedIOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
@@ -61,16 +62,47 @@ public final class Pack {
 
   private void write(Path folder) throws IOException {
     progress.at("tables and page", 0, 1);
-    List<Table> tables = ReviewTables.all(review);
-    for (Table table : tables) {
-      CsvFile.write(table, folder.resolve(table.name() + ".csv"));
-    }
-    CsvFile.write(ReviewTables.kappaDaily(review), folder.resolve("kappa-daily.csv"));
-    new ReviewWorkbook(review, tables).write(folder.resolve("review.xlsx"));
-    new ReviewJson(review, manifest.programVersion()).write(folder.resolve("review.json"));
-    manifest.write(folder.resolve("manifest.json"), review);
     Pictures pictures = charts ? writeCharts(folder) : Pictures.none();
-    new Page(review, pictures).write(folder);
+    List<Table> tables = ReviewTables.all(review);
+    List<Output> outputs = new ArrayList<>();
+    outputs.add(() -> new Page(review, pictures).write(folder));
+    outputs.add(
+        () ->
+            new ReviewJson(review, manifest.programVersion()).write(folder.resolve("review.json")));
+    outputs.add(() -> new ReviewWorkbook(review, tables).write(folder.resolve("review.xlsx")));
+    for (Table table : tables) {
+      outputs.add(() -> CsvFile.write(table, folder.resolve(table.name() + ".csv")));
+    }
+    outputs.add(
+        () -> CsvFile.write(ReviewTables.kappaDaily(review), folder.resolve("kappa-daily.csv")));
+    outputs.add(() -> manifest.write(folder.resolve("manifest.json"), review));
+    writeTogether(outputs);
+  }
+
+  private interface Output {
+    void write() throws IOException;
+  }
+
+  /** Writes files side by side; none depends on another. */
+  private static void writeTogether(List<Output> outputs) throws IOException {
+    Thread caller = Thread.currentThread();
+    List<IOException> failures =
+        outputs.parallelStream().flatMap(output -> failure(output, caller).stream()).toList();
+    if (!failures.isEmpty()) {
+      throw failures.get(0);
+    }
+  }
+
+  private static Optional<IOException> failure(Output output, Thread caller) {
+    try {
+      if (caller.isInterrupted()) {
+        throw new InterruptedIOException("the writing of the pack was stopped");
+      }
+      output.write();
+      return Optional.empty();
+    } catch (IOException e) {
+      return Optional.of(e);
+    }
   }
 
   /** Writes the charts; the page reads them again when their turn comes. */

@@ -105,27 +105,31 @@ public final class Reviewer {
     log.forEachBearing(
         duty -> {
           if (inputs.containsKey(duty.bearing().asset())) {
-            review(duty, bearings, logFindings);
+            Reviewed reviewed = reviewed(duty);
+            bearings.put(duty.bearing(), reviewed.bearing());
+            logFindings.put(duty.bearing(), reviewed.logFindings());
           }
           progress.at("bearings", bearings.size(), total);
         },
         (rows, ofRows) -> progress.at("log rows", rows, ofRows));
-    for (Bearing bearing : history.bearings()) {
-      if (!bearings.containsKey(bearing.key())) {
-        review(BearingDuty.none(bearing.key()), bearings, logFindings);
-        progress.at("bearings", bearings.size(), total);
-      }
+    List<Reviewed> withoutLog =
+        history.bearings().parallelStream()
+            .filter(bearing -> !bearings.containsKey(bearing.key()))
+            .map(bearing -> reviewed(BearingDuty.none(bearing.key())))
+            .toList();
+    for (Reviewed each : withoutLog) {
+      bearings.put(each.bearing().bearing().key(), each.bearing());
+      logFindings.put(each.bearing().bearing().key(), each.logFindings());
     }
     progress.at("bearings", total, total);
-    return history.assets().stream()
+    return history.assets().parallelStream()
         .map(asset -> review(inputs(asset.id()), bearings, logFindings))
         .toList();
   }
 
-  private void review(
-      BearingDuty duty,
-      Map<BearingKey, BearingReview> bearings,
-      Map<BearingKey, List<Finding>> logFindings) {
+  private record Reviewed(BearingReview bearing, List<Finding> logFindings) {}
+
+  private Reviewed reviewed(BearingDuty duty) {
     BearingKey key = duty.bearing();
     AssetInputs asset = inputs(key.asset());
     Bearing bearing =
@@ -143,8 +147,7 @@ public final class Reviewer {
             history,
             duty,
             settings);
-    bearings.put(key, trail.review());
-    logFindings.put(key, LogFindings.of(duty, lastSample(asset).orElse(asOf)));
+    return new Reviewed(trail.review(), LogFindings.of(duty, lastSample(asset).orElse(asOf)));
   }
 
   private static Optional<LocalDate> lastSample(AssetInputs asset) {

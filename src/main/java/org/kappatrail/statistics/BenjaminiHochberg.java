@@ -1,7 +1,6 @@
 package org.kappatrail.statistics;
 
-import java.util.Comparator;
-import java.util.stream.IntStream;
+import java.util.Arrays;
 
 /**
  * False discovery rate over many tests at once (Benjamini and Hochberg, J. R. Statist. Soc. B 57
@@ -24,19 +23,17 @@ public final class BenjaminiHochberg {
         throw new IllegalArgumentException("p is " + value + "; it must lie within 0 and 1");
       }
     }
-    int[] fromGreatest =
-        IntStream.range(0, p.length)
-            .boxed()
-            .sorted(Comparator.<Integer>comparingDouble(i -> p[i]).reversed())
-            .mapToInt(Integer::intValue)
-            .toArray();
-    double[] adjusted = new double[p.length];
+    double[] sorted = p.clone();
+    Arrays.sort(sorted);
+    double[] leastFrom = new double[p.length];
     double least = 1;
-    for (int place = 0; place < p.length; place++) {
-      int rank = p.length - place;
-      int i = fromGreatest[place];
-      least = Math.min(least, p[i] * p.length / rank);
-      adjusted[i] = least;
+    for (int place = p.length - 1; place >= 0; place--) {
+      least = Math.min(least, sorted[place] * p.length / (place + 1));
+      leastFrom[place] = least;
+    }
+    double[] adjusted = new double[p.length];
+    for (int i = 0; i < p.length; i++) {
+      adjusted[i] = leastFrom[Arrays.binarySearch(sorted, p[i])];
     }
     return adjusted;
   }

@@ -87,7 +87,7 @@ class ForeignExportTest {
         .contains("iron_ppm: 4 of 4 samples (1 as a bound), 14 to 100")
         .contains("water_ppm: 3 of 4 samples (1 as a bound), 20 to 1250")
         .contains(
-            "historian.csv: 480 rows, 372 used, 108 rejected",
+            "historian.csv: 288 rows, 180 used, 108 rejected",
             "96 bearing that is not in the register, 8 marked bad, 4 no temperature");
   }
 

@@ -307,6 +307,38 @@ class ExportShapesTest {
   }
 
   @Test
+  void columnsOfOneNameAreToldApartByTheirNumber() throws IOException {
+    Folder folder =
+        Folder.in(temporary)
+            .put(
+                "samples/twice.csv",
+                """
+                Lab No,Equipment,Date Sampled,Fe,Fe,Water (Crackle),Water KF ppm,ISO
+                L1,press-1,Feb 13 2024,12,120,neg,.5,18/16
+                L2,press-1,Mar 13 2024,<1,1,pos,60,ISO 18/16/13
+                """);
+    String block = ExportAdoption.adopt(temporary.resolve("samples/twice.csv"));
+    Intake intake = folder.put("kappatrail.yaml", block).read();
+
+    assertThat(block)
+        .contains("\"Fe #1\": iron_ppm\n")
+        .contains("#   Fe #2 (it could be iron_ppm too, which a column before it is taken for)")
+        .contains("#   Water (Crackle) (it could be water_ppm, but holds few numbers)")
+        .contains("\"Water KF ppm\": water_ppm\n")
+        .contains("date-format: \"MMM d yyyy\"");
+    assertThat(intake.problems()).isEmpty();
+    assertThat(Folder.sample(intake, "L1").values())
+        .containsEntry("iron_ppm", Measurement.of(12))
+        .containsEntry("water_ppm", Measurement.of(0.5));
+    assertThat(Folder.sample(intake, "L2").statedCode()).hasToString("Optional[18/16/13]");
+
+    Intake second = folder.put("kappatrail.yaml", block.replace("Fe #1", "Fe #2")).read();
+    assertThat(Folder.sample(second, "L1").exact("iron_ppm")).hasValue(120);
+    assertThatThrownBy(() -> folder.put("kappatrail.yaml", block.replace("Fe #1", "Fe")).read())
+        .hasMessageContaining("name the right one in columns:, as 'Fe #1' or 'Fe #2'");
+  }
+
+  @Test
   void twoColumnsThatAMappingCouldMeanAreNotGuessedBetween() throws IOException {
     Folder folder =
         Folder.in(temporary)

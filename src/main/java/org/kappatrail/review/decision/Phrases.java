@@ -65,6 +65,6 @@ final class Phrases {
   /** A whole amount in the site's currency. */
   static String money(double amount) {
     long whole = Math.round(amount);
-    return (whole < 0 ? "−" : "") + text("%,d", Math.abs(whole)).replace(',', ' ');
+    return (whole < 0 ? "−" : "") + text("%,d", Math.abs(whole)).replace(',', '\u202F');
   }
 }
