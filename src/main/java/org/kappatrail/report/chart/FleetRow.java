@@ -34,16 +34,16 @@ public record FleetRow(
     List<FleetRow> rows = new ArrayList<>();
     for (AssetReview asset : review.assets()) {
       for (BearingReview bearing : asset.bearings()) {
-        bearing.latestFilm().ifPresent(point -> rows.add(of(bearing, point)));
+        bearing.latestFilm().ifPresent(point -> rows.add(of(asset, bearing, point)));
       }
     }
     rows.sort(WORST_FIRST);
     return List.copyOf(rows);
   }
 
-  private static FleetRow of(BearingReview bearing, KappaPoint point) {
+  private static FleetRow of(AssetReview asset, BearingReview bearing, KappaPoint point) {
     return new FleetRow(
-        bearing.bearing().asset(),
+        asset.asset().id(),
         bearing.bearing().id(),
         bearing.floor(),
         point.film().orElseThrow(),
