@@ -115,9 +115,10 @@ final class LogFolder {
     return -1;
   }
 
-  /** All entries below a folder; behind a link only those of the first level, so that none loops. */
-  private static void list(
-      Path history, Path folder, int depth, SortedMap<String, Path> found) {
+  /**
+   * All entries below a folder; behind a link only those of the first level, so that none loops.
+   */
+  private static void list(Path history, Path folder, int depth, SortedMap<String, Path> found) {
     if (!Files.isDirectory(folder)) {
       return;
     }

@@ -103,12 +103,16 @@ class HostileNamesTest {
   void aBrowserShowsThemAndRunsNothing() throws IOException {
     try (Chromium browser = Chromium.start();
         Tab tab = browser.open(pack.resolve("index.html"), 800, 900)) {
-      assertThat(tab.texts("[...document.querySelectorAll('table.fleet td.name a bdi')].map(a => a.textContent)"))
+      assertThat(
+              tab.texts(
+                  "[...document.querySelectorAll('table.fleet td.name a bdi')].map(a => a.textContent)"))
           .containsExactlyInAnyOrderElementsOf(
               HostileSite.ASSETS.stream().map(HostileSite::shown).toList());
       assertThat(tab.text("document.querySelector('h1').textContent"))
           .isEqualTo("<script>window.ran = 1</script>: oil film review");
-      assertThat(tab.texts("[...document.querySelectorAll('select[data-filter=area] option')].map(o => o.textContent)"))
+      assertThat(
+              tab.texts(
+                  "[...document.querySelectorAll('select[data-filter=area] option')].map(o => o.textContent)"))
           .containsExactly("any", HostileSite.AREA);
       assertThat(tab.look("document.querySelectorAll('img, iframe, object, b b').length").asInt())
           .isZero();

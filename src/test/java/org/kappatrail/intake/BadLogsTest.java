@@ -19,7 +19,9 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.MethodSource;
 import org.kappatrail.cli.Run;
 
-/** Bad logs through the whole review: a pack and the expected problems, or a message and nothing. */
+/**
+ * Bad logs through the whole review: a pack and the expected problems, or a message and nothing.
+ */
 @Tag("slow")
 class BadLogsTest {
   @TempDir Path folder;
@@ -30,8 +32,7 @@ class BadLogsTest {
   void everyBadLogHasItsExpectedOutcome(BadInput input) throws IOException {
     input.make(folder);
     Assumptions.assumeFalse(input.isBeyondThisMachine(folder));
-    Run run =
-        Run.of("review", folder.toString(), "--no-charts", "--out", packs.toString());
+    Run run = Run.of("review", folder.toString(), "--no-charts", "--out", packs.toString());
     assertThat(run.code()).as(run.err()).isEqualTo(input.exit());
     if (input.exit() == 3) {
       assertThat(run.err()).startsWith("kappatrail: ").contains(input.messages());

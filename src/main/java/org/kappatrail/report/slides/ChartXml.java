@@ -13,6 +13,7 @@ import org.kappatrail.report.chart.Palette;
 final class ChartXml {
   /** Size of all text but the title. */
   static final double TEXT = 12;
+
   private static final double TITLE_TEXT = 14;
   private static final double LEGEND_KEY = 40;
   private static final double TITLE_GAP = 30;

@@ -7,7 +7,9 @@ import javax.xml.stream.XMLOutputFactory;
 import javax.xml.stream.XMLStreamException;
 import javax.xml.stream.XMLStreamWriter;
 
-/** Writes the elements of which charts are made, in the XML of office drawings (ECMA-376 part 1). */
+/**
+ * Writes the elements of which charts are made, in the XML of office drawings (ECMA-376 part 1).
+ */
 final class DrawingXml {
   private static final String CHART = "http://schemas.openxmlformats.org/drawingml/2006/chart";
   private static final String DRAWING = "http://schemas.openxmlformats.org/drawingml/2006/main";

@@ -60,8 +60,7 @@ final class SeriesXml {
     numbers(sheet.dayRange(), Optional.empty());
     xml.close();
     xml.open("val");
-    numbers(
-        sheet.valueRange(item.column()), Optional.of(sheet.values(item.column())));
+    numbers(sheet.valueRange(item.column()), Optional.of(sheet.values(item.column())));
     xml.close();
     if (item.kind() != ChartSeries.Kind.AREA) {
       xml.value("smooth", "0");

@@ -43,7 +43,9 @@ class FleetChartTest {
                 asset("fair", 150, 150, 60, 60),
                 asset("low", 150, 150, 60, 85),
                 asset("high", 150, 150, 60, 50)));
-    assertThat(FleetRow.of(review)).extracting(FleetRow::asset).containsExactly("low", "fair", "high");
+    assertThat(FleetRow.of(review))
+        .extracting(FleetRow::asset)
+        .containsExactly("low", "fair", "high");
     Drawing drawing = FleetChart.of(review).orElseThrow();
     assertThat(drawing.spots()).extracting(Spot::key).containsExactly("low", "fair", "high");
     assertThat(drawing.spots()).extracting(Spot::y).isSorted();
@@ -74,7 +76,10 @@ class FleetChartTest {
     String svg = ChartFiles.svg(FleetChart.of(review).orElseThrow());
     double kappa = FleetRow.of(review).get(0).film().kappa();
     assertThat(kappa).isLessThan(1);
-    assertThat(svg).contains(">" + KappaText.of(kappa) + "<").contains(">alarm<").contains(">mixed<");
+    assertThat(svg)
+        .contains(">" + KappaText.of(kappa) + "<")
+        .contains(">alarm<")
+        .contains(">mixed<");
   }
 
   @Test

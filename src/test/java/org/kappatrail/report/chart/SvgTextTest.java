@@ -29,7 +29,8 @@ class SvgTextTest {
                 "<line style=\"fill:none;stroke:rgb(217,220,223);stroke-width:0.6;"
                     + "stroke-miterlimit:10;stroke-linecap:square;\" x1=\"0\" x2=\"9\" y1=\"1\""
                     + " y2=\"1\"/>"))
-        .contains("<line stroke=\"#d9dcdf\" stroke-width=\"0.6\" x1=\"0\" x2=\"9\" y1=\"1\" y2=\"1\"/>")
+        .contains(
+            "<line stroke=\"#d9dcdf\" stroke-width=\"0.6\" x1=\"0\" x2=\"9\" y1=\"1\" y2=\"1\"/>")
         .doesNotContain("style");
   }
 
@@ -60,7 +61,8 @@ class SvgTextTest {
                 "<text style=\"fill:rgb(0,0,0);font-family:&quot;DejaVu Sans&quot;;"
                     + "font-size:17px;\" x=\"1\">&lt;b&gt; 0.123456 &amp; more</text>"))
         .contains("font-family=\"DejaVu Sans, sans-serif\"")
-        .contains("<text fill=\"#000000\" font-size=\"17\" x=\"1\">&lt;b&gt; 0.123456 &amp; more</text>");
+        .contains(
+            "<text fill=\"#000000\" font-size=\"17\" x=\"1\">&lt;b&gt; 0.123456 &amp; more</text>");
   }
 
   private static String compact(String content) throws IOException {
